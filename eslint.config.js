@@ -1,0 +1,137 @@
+import { createTypeScriptImportResolver } from 'eslint-import-resolver-typescript';
+import { importX } from 'eslint-plugin-import-x';
+import reactHooks from 'eslint-plugin-react-hooks';
+import { defineConfig } from 'eslint/config';
+import tseslint from 'typescript-eslint';
+import { holdoffRules } from './tests/structure/lint-rules.mjs';
+
+const noDefaultExport = {
+  selector: 'ExportDefaultDeclaration',
+  message: 'Named exports only; a default only where a tool demands it.',
+};
+
+const everywhere = [noDefaultExport];
+
+const inClient = [
+  {
+    selector: 'ExportAllDeclaration, ExportNamedDeclaration[source]',
+    message: 'No barrels: import the module that owns the thing.',
+  },
+  {
+    selector:
+      'Program > VariableDeclaration[kind="let"], Program > ExportNamedDeclaration > VariableDeclaration[kind="let"]',
+    message: 'No module-level mutable state: build it in a factory and pass it.',
+  },
+  {
+    selector:
+      ':matches(JSXElement, JSXFragment) > JSXExpressionContainer > LogicalExpression[operator="&&"]:not([left.type="BinaryExpression"]):not([left.type="UnaryExpression"])',
+    message: '`n && ...` prints 0 and NaN: write a ternary or an explicit test.',
+  },
+];
+
+const inDomain = [
+  {
+    selector:
+      'CallExpression[callee.object.name="Date"][callee.property.name="now"], NewExpression[callee.name="Date"][arguments.length=0], CallExpression[callee.name="Date"]',
+    message: 'The domain has no clock: take the time as an argument.',
+  },
+  {
+    selector: 'MemberExpression[object.name="Math"][property.name="random"]',
+    message: 'The domain has no dice: take the random source as an argument.',
+  },
+  {
+    selector: 'MemberExpression[object.name=/^(crypto|performance)$/]',
+    message: 'The domain has no clock and no dice: take what it needs as an argument.',
+  },
+];
+
+const typeScript = ['**/*.{ts,tsx}'];
+const tests = ['**/*.test.{ts,tsx}', '**/*.e2e.ts', 'tests/**/*.ts'];
+
+export default defineConfig(
+  { ignores: ['dist/**', 'dev-dist/**', 'coverage/**', '.holdoff/**', 'node_modules/**'] },
+  { linterOptions: { reportUnusedDisableDirectives: 'error', reportUnusedInlineConfigs: 'error' } },
+  {
+    files: ['**/*.{js,mjs,ts,tsx}'],
+    plugins: { holdoff: holdoffRules },
+    rules: {
+      'holdoff/import-zones': 'error',
+      'holdoff/kebab-case-file': 'error',
+      'no-restricted-syntax': ['error', ...everywhere],
+      eqeqeq: 'error',
+      'no-var': 'error',
+      'prefer-const': 'error',
+      'no-warning-comments': ['error', { terms: ['fixme', 'xxx', 'hack'], location: 'start' }],
+      'max-params': ['error', 3],
+      'max-lines': ['error', { max: 400, skipBlankLines: false, skipComments: false }],
+      'no-console': 'error',
+    },
+  },
+  {
+    files: typeScript,
+    extends: [tseslint.configs.strictTypeChecked],
+    languageOptions: {
+      parserOptions: { project: ['./tsconfig.json'], tsconfigRootDir: import.meta.dirname },
+    },
+    rules: {
+      '@typescript-eslint/consistent-type-imports': 'error',
+      '@typescript-eslint/consistent-type-exports': 'error',
+      '@typescript-eslint/require-array-sort-compare': 'error',
+      '@typescript-eslint/switch-exhaustiveness-check': [
+        'error',
+        { considerDefaultExhaustiveForUnions: true },
+      ],
+      '@typescript-eslint/restrict-template-expressions': [
+        'error',
+        { allowNumber: true, allowBoolean: true },
+      ],
+      '@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
+      // TypeScript itself says so, with the same marks.
+      '@typescript-eslint/no-unused-vars': 'off',
+    },
+  },
+  {
+    files: typeScript,
+    plugins: { 'import-x': importX },
+    settings: {
+      'import-x/resolver-next': [createTypeScriptImportResolver({ project: './tsconfig.json' })],
+      'import-x/parsers': { '@typescript-eslint/parser': ['.ts', '.tsx'] },
+    },
+    rules: { 'import-x/no-cycle': ['error', { ignoreExternal: true }] },
+  },
+  {
+    files: ['src/**/*.{ts,tsx}'],
+    extends: [reactHooks.configs.flat.recommended],
+    rules: { 'no-restricted-syntax': ['error', ...everywhere, ...inClient] },
+  },
+  {
+    files: ['src/domain/**/*.ts'],
+    rules: { 'no-restricted-syntax': ['error', ...everywhere, ...inClient, ...inDomain] },
+  },
+  {
+    files: tests,
+    rules: {
+      'no-restricted-syntax': ['error', ...everywhere],
+      'max-lines': 'off',
+      // A test reads what it has just built; a wrong guess shows as a failing test.
+      '@typescript-eslint/no-non-null-assertion': 'off',
+      '@typescript-eslint/no-unsafe-assignment': 'off',
+      '@typescript-eslint/no-unsafe-member-access': 'off',
+    },
+  },
+  {
+    files: [
+      'server/start.mjs',
+      'server/launch/**/*.mjs',
+      'server/maintenance/**/*.ts',
+      'tests/run.mjs',
+      'tests/runner/**/*.mjs',
+      'tests/reference/**/*.ts',
+    ],
+    rules: { 'no-console': 'off' },
+  },
+  {
+    files: ['eslint.config.js', 'vite.config.ts'],
+    rules: { 'no-restricted-syntax': 'off' },
+  },
+);

@@ -1,0 +1,50 @@
+import path from 'node:path';
+import { judgeImport } from './import-zones.mjs';
+
+const kebabFile = /^\.?[a-z0-9]+(-[a-z0-9]+)*(\.[a-z0-9]+(-[a-z0-9]+)*)*$/;
+const migrationFile = /^\d{14}_[a-z0-9]+(_[a-z0-9]+)*\.ts$/;
+
+/** @param {import('eslint').Rule.RuleContext} context */
+function projectPath(context) {
+  return path.relative(context.cwd, context.filename).split(path.sep).join('/');
+}
+
+/** @type {import('eslint').Rule.RuleModule} */
+const importZones = {
+  meta: { type: 'problem', schema: [], docs: { description: 'Hold the import table' } },
+  create(context) {
+    const file = projectPath(context);
+    /** @param {import('estree').Node | null | undefined} source */
+    const judge = (source) => {
+      if (source?.type !== 'Literal' || typeof source.value !== 'string') return;
+      const message = judgeImport(file, source.value);
+      if (message !== undefined) context.report({ node: source, message });
+    };
+    return {
+      ImportDeclaration: (node) => judge(node.source),
+      ImportExpression: (node) => judge(node.source),
+      ExportNamedDeclaration: (node) => judge(node.source),
+      ExportAllDeclaration: (node) => judge(node.source),
+      TSImportType: (/** @type {any} */ node) => judge(node.source ?? node.argument?.literal),
+    };
+  },
+};
+
+/** @type {import('eslint').Rule.RuleModule} */
+const kebabCaseFile = {
+  meta: { type: 'problem', schema: [], docs: { description: 'Files and folders are named in kebab-case' } },
+  create(context) {
+    return {
+      Program(node) {
+        const file = projectPath(context);
+        const parts = file.split('/');
+        const isMigration = parts[0] === 'migrations' && migrationFile.test(parts.at(-1) ?? '');
+        const wrong = isMigration ? undefined : parts.find((part) => part !== '..' && !kebabFile.test(part));
+        if (wrong !== undefined) context.report({ node, message: `"${wrong}" is not kebab-case` });
+      },
+    };
+  },
+};
+
+/** Rules that no package offers in the shape that this project needs. */
+export const holdoffRules = { rules: { 'import-zones': importZones, 'kebab-case-file': kebabCaseFile } };
