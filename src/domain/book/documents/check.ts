@@ -1,0 +1,135 @@
+import type { StepResult } from '../bodies/check-bodies';
+import type { EntryOf } from '../read-body';
+import type { SheetSpec } from '../sheet-spec';
+import { getDoc, putDoc, type Effect } from './effect';
+import { declare, updateRig } from './rig';
+import { traceOf, type Standing, type Trace } from './trace';
+
+export interface StepRecord extends Trace {
+  readonly state: 'done' | 'waived';
+  readonly result: StepResult | null;
+  readonly words: string;
+  readonly witness: string | null;
+  readonly irregular: string | null;
+}
+
+export interface CheckDoc {
+  readonly kind: 'check';
+  readonly id: string;
+  readonly parent: string;
+  readonly rig_revision: string;
+  readonly sheet: string;
+  readonly purpose: SheetSpec['purpose'];
+  readonly opened: Trace;
+  /** By step key; of several records of one step the last stands and the earlier stay in the Book. */
+  readonly steps: Readonly<Record<string, StepRecord>>;
+  readonly ended:
+    | (Trace & {
+        readonly how: 'closed' | 'abandoned';
+        readonly irregular: string | null;
+        readonly words: string;
+      })
+    | null;
+}
+
+type CheckEntry = EntryOf<
+  'check.opened' | 'check.step-done' | 'check.step-waived' | 'check.closed' | 'check.abandoned'
+>;
+
+export function* foldCheck(entry: CheckEntry, standing: Standing): Effect {
+  const trace = traceOf(entry.meta, standing);
+  if (entry.kind === 'check.opened') {
+    yield* openCheck(entry, trace);
+    return;
+  }
+  const check = yield* getDoc('check', entry.meta.subject);
+  if (check === undefined) return;
+  switch (entry.kind) {
+    case 'check.step-done':
+      yield* putDoc(
+        withStep(check, entry.body.step, {
+          ...trace,
+          state: 'done',
+          result: entry.body.result,
+          words: entry.body.note,
+          ...seen(entry, standing),
+        }),
+      );
+      return;
+    case 'check.step-waived':
+      yield* putDoc(
+        withStep(check, entry.body.step, {
+          ...trace,
+          state: 'waived',
+          result: null,
+          words: entry.body.why,
+          ...seen(entry, standing),
+        }),
+      );
+      return;
+    case 'check.abandoned':
+      yield* putDoc({
+        ...check,
+        ended: { ...trace, how: 'abandoned', irregular: standing.irregular, words: entry.body.why },
+      });
+      yield* updateRig(check.parent, (rig) => ({
+        ...rig,
+        open_checks: rig.open_checks.filter((id) => id !== check.id),
+      }));
+      return;
+    case 'check.closed':
+      yield* closeCheck(check, trace, standing);
+  }
+}
+
+function* openCheck(entry: EntryOf<'check.opened'>, trace: Trace): Effect {
+  const { rig, rig_revision, sheet } = entry.body;
+  const { id } = entry.meta;
+  const sheetDoc = yield* getDoc('sheet', sheet);
+  // An unknown sheet has no steps to close, so the purpose cannot make anything ready.
+  const purpose = sheetDoc?.spec.purpose ?? 'before-firing';
+  yield* putDoc({
+    kind: 'check',
+    id,
+    parent: rig,
+    rig_revision,
+    sheet,
+    purpose,
+    opened: trace,
+    steps: {},
+    ended: null,
+  });
+  yield* updateRig(rig, (doc) => ({ ...doc, open_checks: [...doc.open_checks, id] }));
+}
+
+/**
+ * A closed check declares: before firing "short off", make safe "shorted". An irregular closing (a step missing) keeps
+ * its place in the history and declares nothing but the danger: short off.
+ */
+function* closeCheck(check: CheckDoc, trace: Trace, standing: Standing): Effect {
+  if (check.ended !== null) return;
+  yield* putDoc({ ...check, ended: { ...trace, how: 'closed', irregular: standing.irregular, words: '' } });
+  yield* updateRig(check.parent, (rig) => {
+    const without = { ...rig, open_checks: rig.open_checks.filter((id) => id !== check.id) };
+    if (check.purpose === 'make-safe')
+      return standing.irregular === null ? declare(without, trace, 'shorted') : without;
+    const declared = declare(without, trace, 'short-off');
+    if (standing.irregular !== null) return declared;
+    const ready_check = {
+      check: check.id,
+      rig_revision: check.rig_revision,
+      closed: trace,
+      active: trace.stamp,
+      voided: null,
+    };
+    return { ...declared, ready_check };
+  });
+}
+
+function withStep(check: CheckDoc, key: string, record: StepRecord): CheckDoc {
+  return check.ended === null ? { ...check, steps: { ...check.steps, [key]: record } } : check;
+}
+
+function seen(entry: CheckEntry, standing: Standing) {
+  return { witness: entry.meta.witness, irregular: standing.irregular };
+}

@@ -1,0 +1,29 @@
+import type * as z from 'zod/mini';
+import { bookBodies } from './bodies/book-bodies';
+import { checkBodies } from './bodies/check-bodies';
+import { firingBodies } from './bodies/firing-bodies';
+import { peopleBodies } from './bodies/people-bodies';
+import { rigBodies } from './bodies/rig-bodies';
+
+const bodies = { ...rigBodies, ...checkBodies, ...firingBodies, ...peopleBodies, ...bookBodies } as const;
+
+export type Kind = keyof typeof bodies;
+export type BodyOf<K extends Kind> = z.infer<(typeof bodies)[K]>;
+
+/** Version that this app writes, per kind; a kind that is not listed writes 1. */
+const WRITTEN_VERSION: Partial<Record<Kind, number>> = {};
+
+export const KINDS = Object.keys(bodies) as readonly Kind[];
+
+export function isKind(kind: string): kind is Kind {
+  return Object.hasOwn(bodies, kind);
+}
+
+export function versionOf(kind: Kind): number {
+  return WRITTEN_VERSION[kind] ?? 1;
+}
+
+/** Schema of the body as this app writes it. Salt is checked apart, and unknown fields are dropped when reading. */
+export function bodySchema<K extends Kind>(kind: K): (typeof bodies)[K] {
+  return bodies[kind];
+}

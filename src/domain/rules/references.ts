@@ -1,0 +1,44 @@
+import type { ReadableEntry } from '../book/read-body';
+
+/** Entry ids that an entry names beside its subject, plus the subject itself. */
+export function namedIds(entry: ReadableEntry): readonly string[] {
+  return entry.meta.subject === entry.meta.id ? idsInBody(entry) : [entry.meta.subject, ...idsInBody(entry)];
+}
+
+function idsInBody(entry: ReadableEntry): readonly string[] {
+  switch (entry.kind) {
+    case 'rig.revised':
+      return [entry.body.based_on];
+    case 'rig.stand-down-retracted':
+      return [entry.body.stand_down];
+    case 'rig.returned':
+      return entry.body.lifts;
+    case 'hands.out':
+      return [entry.body.tag];
+    case 'permit.asked':
+    case 'permit.granted':
+      return [entry.body.rig_revision];
+    case 'permit.withdrawn':
+      return [entry.body.permit];
+    case 'parting.settled':
+      return entry.body.settles;
+    case 'sheet.published':
+      return entry.body.replaces === null ? [] : [entry.body.replaces];
+    case 'check.opened':
+      return [entry.body.rig_revision, entry.body.sheet];
+    case 'firing.opened':
+      return [entry.body.rig_revision, entry.body.check, entry.body.permit].filter((id) => id !== null);
+    case 'person.authorisation-ended':
+      return [entry.body.authorisation];
+    case 'entry.corrected':
+      return [entry.body.corrects];
+    case 'entry.struck':
+      return [entry.body.strikes];
+    case 'entry.adopted':
+      return entry.body.adopts;
+    case 'entry.claimed':
+      return [entry.body.claims];
+    default:
+      return [];
+  }
+}
