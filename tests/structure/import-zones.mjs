@@ -168,6 +168,12 @@ function stands(order, first, second) {
 
 const serverPorts = ['mail', 'attachments'];
 
+/** Plain scripts that run before there are packages: what each may import of the server besides itself. */
+const scriptFolders = new Map([
+  ['launch', []],
+  ['stand-ins', ['launch']],
+]);
+
 /**
  * @param {string} from
  * @param {{zone: string, folder: string}} to
@@ -181,6 +187,10 @@ function judgeServer(from, to, targetFile) {
   }
   if (to.zone !== 'server') return 'of src the server imports only the domain';
   if (assembles || from === to.folder || to.folder === ':base') return undefined;
+  const reach = scriptFolders.get(from);
+  if (reach !== undefined)
+    return allow(reach.includes(to.folder), 'start scripts know nothing of the server');
+  if (scriptFolders.has(to.folder)) return 'the server knows nothing of the scripts that start it';
   if (from === ':base') return 'server config and logger import nothing of the server';
   if (to.folder === ':root' || to.folder === 'maintenance')
     return 'only the composition root assembles the server';
