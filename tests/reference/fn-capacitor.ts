@@ -1,0 +1,64 @@
+import { bleedPower, bleedTime } from '../../src/domain/capacitor/bleed';
+import { sheetCapacitance } from '../../src/domain/capacitor/capacitance';
+import { shotCharge, storedEnergy } from '../../src/domain/capacitor/energy';
+import {
+  arcThreshold,
+  exceedsTouchLimit,
+  reflexThreshold,
+  shockThreshold,
+} from '../../src/domain/capacitor/hazard';
+import {
+  airFilmField,
+  dielectricStress,
+  petMinimumStrength,
+  stressMargin,
+} from '../../src/domain/capacitor/stress';
+import { repetitionRate, supplyPower } from '../../src/domain/charging/relaxation';
+import type { ReferenceFunction } from './fn-table';
+
+export const CAPACITOR_FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = {
+  'capacitor.energy': (i) => storedEnergy(i.number('C_F'), i.number('V_V')),
+  'capacitor.shotCharge': (i) => shotCharge(i.number('C_F'), i.number('V0_V'), i.number('reversal')),
+  'capacitor.sheet': (i) =>
+    sheetCapacitance({
+      eps_r: i.number('eps_r'),
+      area_m2: i.number('area_m2'),
+      thickness_m: i.number('t_m'),
+      layers: i.number('n_parallel', 1),
+    }),
+  'capacitor.stress': (i) => dielectricStress(i.number('V_V'), i.number('t_m')),
+  'capacitor.stressMargin': (i) => stressMargin(i.number('V_V'), i.number('t_m'), i.number('E_bd_kV_mm')),
+  'capacitor.airFilmField': (i) =>
+    airFilmField({
+      voltage_V: i.number('V_V'),
+      thickness_um: i.number('t_um'),
+      eps_r: i.number('eps_r'),
+      air_um: i.number('g_um'),
+    }),
+  'capacitor.dielectric.petMinStrength': (i) => petMinimumStrength(i.number('t_um')),
+  'capacitor.bleedTime': (i) =>
+    bleedTime(
+      { resistance_ohm: i.number('R_ohm'), capacitance_F: i.number('C_F') },
+      i.number('V0_V'),
+      i.number('Vsafe_V'),
+    ),
+  'capacitor.bleedPower': (i) => bleedPower(i.number('R_ohm'), i.number('V0_V')),
+  'capacitor.hazard.exceedsTouchLimit': (i) => exceedsTouchLimit(i.number('C_F'), i.number('V_V')),
+  'capacitor.hazard.reflexThreshold': (i) => reflexThreshold(i.number('V_V')),
+  'capacitor.hazard.shockThreshold': (i) => shockThreshold(i.number('V_V')),
+  'capacitor.hazard.arcThreshold': (i) => arcThreshold(i.number('V_V')),
+  'charging.repetitionRate': (i) =>
+    repetitionRate({
+      ballast_ohm: i.number('R_ohm'),
+      capacitance_F: i.number('C_F'),
+      supply_V: i.number('Vs_V'),
+      break_V: i.number('Vb_V'),
+    }),
+  'charging.supplyPower': (i) =>
+    supplyPower({
+      capacitance_F: i.number('C_F'),
+      break_V: i.number('Vb_V'),
+      supply_V: i.number('Vs_V'),
+      rate_Hz: i.number('f_Hz'),
+    }),
+};

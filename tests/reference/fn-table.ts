@@ -1,0 +1,21 @@
+import type { Answer } from '../../src/domain/units/answer';
+import type { Result } from '../../src/domain/units/result';
+import { CAPACITOR_FUNCTIONS } from './fn-capacitor';
+import { GAP_FUNCTIONS } from './fn-gap';
+import type { Inputs } from './inputs';
+
+/** What the project gives for one check. */
+export type Evaluated = Result<Answer> | Result<number> | Result<boolean>;
+
+/** A check that the project cannot answer yet, and why. */
+export interface Skipped {
+  readonly skip: string;
+}
+
+export type ReferenceFunction = (inputs: Inputs) => Evaluated | Skipped;
+
+/** Every function name of the check format that the project knows, and the public function behind it. */
+export const FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = {
+  ...GAP_FUNCTIONS,
+  ...CAPACITOR_FUNCTIONS,
+};
