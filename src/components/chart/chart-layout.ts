@@ -1,0 +1,101 @@
+/** All in px. */
+export interface ChartLayout {
+  readonly width: number;
+  readonly height: number;
+  readonly left: number;
+  readonly right: number;
+  readonly top: number;
+  readonly bottom: number;
+  /** Width of the hatched wall to the right of the plot. */
+  readonly wall: number;
+  /** Where the slice stands; null without one, or when it stands above the plot instead of beside it. */
+  readonly slice: { readonly left: number; readonly right: number } | null;
+}
+
+export interface LayoutNeeds {
+  readonly width: number;
+  readonly height: number;
+  /** Body text, px. */
+  readonly font: number;
+  readonly slice: boolean;
+  readonly wall: boolean;
+  readonly topLabel: boolean;
+}
+
+/** Narrower than this many letters, figures would leave the slice: it stands above the plot then. */
+const SIDE_BY_SIDE_EM = 20;
+
+export function chartLayout(needs: LayoutNeeds): ChartLayout {
+  const { width, height, font } = needs;
+  const beside = needs.slice && standsBeside(width, font);
+  const margin = width < 500 ? font / 3 : font * 0.55;
+  const sliceWidth = width < 500 ? width * 0.43 : Math.min(font * 14.7, width * 0.385);
+  const slice = beside ? { left: margin, right: margin + sliceWidth } : null;
+  const axis = font * (width < 500 ? 2.75 : 3.1);
+  const left = (slice?.right ?? 0) + axis;
+  const wall = needs.wall ? (width < 500 ? font * 0.8 : font * 2.36) : 0;
+  return {
+    width,
+    height,
+    left,
+    right: Math.max(left + 1, width - wall - (needs.wall ? 0 : font * (width < 500 ? 0.3 : 1.4))),
+    top: needs.topLabel ? font * 1.5 : font * 0.6,
+    bottom: Math.max(font * 2, height - font * 2.7),
+    wall,
+    slice,
+  };
+}
+
+export function standsBeside(width: number, font: number): boolean {
+  return width / font >= SIDE_BY_SIDE_EM;
+}
+
+export interface SliceFonts {
+  readonly body: number;
+  readonly lead: number;
+  readonly high: number;
+  readonly low: number;
+  readonly read: number;
+}
+
+export interface SliceNeeds {
+  readonly fonts: SliceFonts;
+  readonly highNote: boolean;
+  readonly lowNote: boolean;
+  readonly middle: boolean;
+}
+
+export interface SliceHeights {
+  readonly high: number;
+  readonly low: number;
+  readonly void: number;
+}
+
+/** Heights that the words in the slice need, whatever the scale says. */
+export function sliceHeights({ fonts, highNote, lowNote, middle }: SliceNeeds): SliceHeights {
+  const pad = fonts.body * 0.7;
+  return {
+    high: fonts.lead * 1.2 + fonts.high * 0.98 + pad,
+    low: fonts.lead * 1.2 + fonts.low * 0.98 + pad + (lowNote ? fonts.body * 1.4 : 0),
+    void: (highNote ? fonts.body * 1.5 : 0) + (middle ? fonts.read * 1.15 : 0) + pad,
+  };
+}
+
+/**
+ * Where the two faces of the slice stand: on the chart's scale wherever the words leave room, else as near to it as they do.
+ * `high_px` and `low_px` are what the scale says.
+ */
+export function sliceFaces(
+  plot: { readonly top: number; readonly bottom: number },
+  scale: { readonly high_px: number; readonly low_px: number },
+  least: SliceHeights,
+): { readonly high: number; readonly low: number } {
+  const lowest = plot.bottom - least.low;
+  const low = clamp(scale.low_px, plot.top + least.high + least.void, lowest);
+  const high = clamp(scale.high_px, plot.top + least.high, low - least.void);
+  return { high, low };
+}
+
+function clamp(value: number, min: number, max: number): number {
+  return Math.max(Math.min(value, max), Math.min(min, max));
+}

@@ -1,0 +1,7 @@
+import 'react';
+
+declare module 'react' {
+  interface CSSProperties {
+    readonly [variable: `--${string}`]: string | number | undefined;
+  }
+}
