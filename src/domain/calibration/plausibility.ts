@@ -1,0 +1,180 @@
+import { gapFor, pressureFor } from '../gap/gap-solve';
+import type { GapInput } from '../gap/gap-input';
+import { selfBreak } from '../gap/self-break';
+import { formatFigure } from '../units/format-quantity';
+import { ok, refused, type Result } from '../units/result';
+
+/** How the voltage of a reading came about: set on the supply, held without breaking, or measured at self-break. */
+export type HowMeasured = 'set' | 'held' | 'self-break';
+
+export interface PlausibilityInput {
+  /** The gap as it was at the reading: its own pressure and temperature, the rig's setting errors. */
+  readonly gap: GapInput;
+  readonly how: HowMeasured;
+  readonly voltage_kV: number;
+  /** Whether the gap broke at all; a dark gap says that it held. */
+  readonly broke: boolean;
+  /** Sigmas of the readings just before, newest first, for the rule of two in three. */
+  readonly before: readonly number[];
+}
+
+/** A cause that would explain the reading, with how far the setting would have to be off. */
+export interface RankedCause {
+  readonly words: string;
+  /** Size of the slip in units of that setting's own error: the smaller, the likelier. */
+  readonly errors: number;
+}
+
+export interface Plausibility {
+  readonly expected_kV: number;
+  readonly low_kV: number;
+  readonly high_kV: number;
+  /** One sigma of law, settings and scatter together, kV. */
+  readonly sigma_kV: number;
+  /** Deviation of a measured self-break in sigmas; null where the voltage was not a self-break. */
+  readonly sigma: number | null;
+  readonly fits: boolean;
+  /** One sentence for the person who has just logged. */
+  readonly words: string;
+  /** Likeliest first; empty when the reading fits. */
+  readonly causes: readonly RankedCause[];
+}
+
+/** Speaks at 3 sigma, or at two of three beyond 2 sigma on the same side. */
+const ALONE_SIGMA = 3;
+const REPEATED_SIGMA = 2;
+/** Physics of the streamer integral, never better than 3 % (physics K3). */
+const LAW_SHARE = 0.03;
+/** Shot-to-shot scatter of a pressurised gap, 2 to 6 % (physics A(e), from memory); the lower end finds more. */
+const SCATTER_SHARE = 0.02;
+
+/**
+ * Says at once how a reading compares with what physics expects of this gap. Valid where `selfBreak` is; refused in
+ * words outside. Without a calibration of the rig's own the sigma is that of the law.
+ */
+export function plausibility(input: PlausibilityInput): Result<Plausibility> {
+  const answer = selfBreak(input.gap);
+  if (!answer.ok) return refused(answer.refusal);
+  const { law_kV, low_kV, high_kV } = answer.value;
+  const sigma_kV = law_kV * relativeSigma(input.gap);
+  const common = { expected_kV: law_kV, low_kV, high_kV, sigma_kV };
+  if (input.how === 'self-break' && input.broke) {
+    const sigma = (input.voltage_kV - law_kV) / sigma_kV;
+    const speaks = Math.abs(sigma) >= ALONE_SIGMA || repeats(sigma, input.before);
+    const causes = speaks ? rankedCauses(input) : [];
+    return ok({
+      ...common,
+      sigma,
+      fits: !speaks,
+      words: selfBreakWords(sigma, input.voltage_kV / law_kV - 1, speaks),
+      causes,
+    });
+  }
+  return ok({ ...common, sigma: null, ...withoutSelfBreak(input, low_kV, high_kV) });
+}
+
+function relativeSigma({
+  gap_mm,
+  u_gap_mm,
+  pressure,
+  u_pressure_bar,
+  temperature_C,
+  u_temperature_C,
+}: GapInput): number {
+  return Math.hypot(
+    LAW_SHARE,
+    SCATTER_SHARE,
+    u_gap_mm / gap_mm,
+    u_pressure_bar / pressure.bar_abs,
+    u_temperature_C / (temperature_C + 273.15),
+  );
+}
+
+function repeats(sigma: number, before: readonly number[]): boolean {
+  if (Math.abs(sigma) < REPEATED_SIGMA) return false;
+  return before
+    .slice(0, 2)
+    .some((earlier) => Math.abs(earlier) >= REPEATED_SIGMA && Math.sign(earlier) === Math.sign(sigma));
+}
+
+function selfBreakWords(sigma: number, share: number, speaks: boolean): string {
+  const side = sigma < 0 ? 'below' : 'above';
+  const size = formatFigure(Math.abs(sigma), { digits: { decimals: 1 }, rounding: 'nearest' });
+  if (!speaks) return `Fits: ${size} σ ${side} the law.`;
+  const percent = formatFigure(Math.abs(share) * 100, { digits: { decimals: 0 }, rounding: 'nearest' });
+  return `Does not fit: ${percent} % ${sigma < 0 ? 'low' : 'high'}, ${size} σ ${side} the law.`;
+}
+
+function withoutSelfBreak(input: PlausibilityInput, low_kV: number, high_kV: number) {
+  const { broke, voltage_kV } = input;
+  if (broke && voltage_kV < low_kV) {
+    const words = `Does not fit: it broke below ${kV(low_kV, 'down')}, where nothing should fire.`;
+    return { fits: false, words, causes: rankedCauses(input) };
+  }
+  if (!broke && voltage_kV > high_kV) {
+    const words = `Does not fit: it held above ${kV(high_kV, 'up')}. The gap may sit charged.`;
+    return { fits: false, words, causes: rankedCauses(input) };
+  }
+  const words = broke
+    ? 'Broke within its two sides; only a measured self-break says more.'
+    : `Held; it may hold up to ${kV(high_kV, 'up')}. The gap may sit charged.`;
+  return { fits: true, words, causes: [] };
+}
+
+function kV(value: number, rounding: 'down' | 'up'): string {
+  return `${formatFigure(value, { digits: { decimals: 1 }, rounding })}\u2009kV`;
+}
+
+/** Each cause alone, worked out as the slip that would make the law give the reading, and ranked by its own error. */
+function rankedCauses({ gap, voltage_kV }: PlausibilityInput): readonly RankedCause[] {
+  const target = { purpose: 'law', voltage_kV } as const;
+  const causes: RankedCause[] = [];
+  const asGap = gapFor(gap, target);
+  if (asGap.ok) {
+    const slip_mm = asGap.value.value - gap.gap_mm;
+    causes.push(
+      cause(
+        `gap ${sized(slip_mm, 2, 'mm')} ${slip_mm < 0 ? 'smaller' : 'wider'}`,
+        slip_mm / nonZero(gap.u_gap_mm, 0.05),
+      ),
+    );
+  }
+  const asPressure = pressureFor(gap, target);
+  if (asPressure.ok) {
+    const slip_bar = asPressure.value.value - gap.pressure.bar_abs;
+    const words = `pressure ${sized(slip_bar, 2, 'bar')} ${slip_bar < 0 ? 'lower' : 'higher'}`;
+    causes.push(cause(words, slip_bar / nonZero(gap.u_pressure_bar, 0.02)));
+    // At constant pressure density goes as 1/T, so the pressure that explains it gives the temperature that would.
+    const warmer_K = (gap.temperature_C + 273.15) * (gap.pressure.bar_abs / asPressure.value.value - 1);
+    if (warmer_K > 0) causes.push(cause(`gas ${sized(warmer_K, 0, 'K')} warmer`, warmer_K / WARM_GAS_K));
+  }
+  causes.push(
+    cause(
+      voltage_kV < selfBreakOf(gap) ? 'electrode damaged or dirty' : 'no UV on the gap, or another gas',
+      SURFACE_ERRORS,
+    ),
+  );
+  return causes.toSorted((a, b) => a.errors - b.errors);
+}
+
+/** A fast run warms the gas of a small gap by some tens of kelvin; common practice, no source. */
+const WARM_GAS_K = 15;
+/** Where a damaged electrode stands in the ranking: behind slips of up to three errors; common practice, no source. */
+const SURFACE_ERRORS = 3;
+
+function selfBreakOf(gap: GapInput): number {
+  const answer = selfBreak(gap);
+  return answer.ok ? answer.value.law_kV : 0;
+}
+
+function cause(words: string, errors: number): RankedCause {
+  return { words, errors: Math.abs(errors) };
+}
+
+function nonZero(value: number, otherwise: number): number {
+  return value > 0 ? value : otherwise;
+}
+
+function sized(value: number, decimals: number, unit: string): string {
+  return `${formatFigure(Math.abs(value), { digits: { decimals }, rounding: 'nearest' })}\u2009${unit}`;
+}

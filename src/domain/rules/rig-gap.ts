@@ -1,0 +1,50 @@
+import type { ReadingValues } from '../book/bodies/firing-bodies';
+import type { RigSpec } from '../book/rig-spec';
+import { plausibility, type Plausibility } from '../calibration/plausibility';
+import type { GapInput, GapSetup } from '../gap/gap-input';
+import type { Result } from '../units/result';
+
+/** Errors of settings that the bench reads off a dial; common practice, no source. */
+export const DIAL_ERRORS = { pressure_bar: 0.02, temperature_C: 3 } as const;
+
+/** The rig's spark gap as the physics takes it. */
+export function gapSetupOf(spec: RigSpec, temperature_C: number): GapSetup {
+  const { gas, electrodes, radius_mm, gap_mm, gap_error_mm, irradiated } = spec.gap;
+  return {
+    gas,
+    electrodes: { shape: electrodes, radius_mm },
+    gap_mm,
+    u_gap_mm: gap_error_mm,
+    u_pressure_bar: DIAL_ERRORS.pressure_bar,
+    temperature_C,
+    u_temperature_C: DIAL_ERRORS.temperature_C,
+    irradiated,
+  };
+}
+
+/** The gap at a gauge pressure and an ambient; there is no default for the ambient. */
+export function gapInputOf(
+  spec: RigSpec,
+  at: { readonly pressure_bar_g: number; readonly ambient_bar_abs: number; readonly temperature_C: number },
+): GapInput {
+  return {
+    ...gapSetupOf(spec, at.temperature_C),
+    pressure: { bar_abs: at.pressure_bar_g + at.ambient_bar_abs },
+  };
+}
+
+/** How a reading compares with what physics expects of the revision that it was taken on. */
+export function readingPlausibility(
+  spec: RigSpec,
+  values: ReadingValues,
+  before: readonly number[],
+): Result<Plausibility> {
+  const gap = { ...gapInputOf(spec, values), gas: values.gas };
+  return plausibility({
+    gap,
+    how: values.how,
+    voltage_kV: values.voltage_kV,
+    broke: values.looked !== 'gap-dark',
+    before,
+  });
+}
