@@ -78,7 +78,8 @@ async function aptGet(prefix, args, shown) {
     'DPkg::Lock::Timeout=120',
     ...args,
   ];
-  const answer = await run(command ?? 'env', rest);
+  // Half an installation is worse than one that ends a little later than whoever asked for it.
+  const answer = await run(command ?? 'env', rest, { outlives: true });
   if (answer.ok) return;
   throw new Refusal(
     `"${shown}" failed. Its last words:\n${lastLines(answer.output, 12)}\n` +

@@ -44,18 +44,19 @@ export function tiedToParent(command, args) {
 }
 
 /**
- * Runs a program to its end.
+ * Runs a program to its end, and ends it with this process unless it `outlives` it.
  * @param {string} command
  * @param {readonly string[]} args
- * @param {{cwd?: string, env?: NodeJS.ProcessEnv, input?: string, timeoutMs?: number, show?: boolean}} [options]
- * @returns {Promise<{ok: boolean, output: string}>} `output` holds both streams; empty when shown
+ * @param {{cwd?: string, env?: NodeJS.ProcessEnv, input?: string, timeoutMs?: number, outlives?: boolean}} [options]
+ * @returns {Promise<{ok: boolean, output: string}>} `output` holds both streams
  */
 export function run(command, args, options = {}) {
-  const { cwd, env = process.env, input, timeoutMs, show = false } = options;
-  const child = spawn(command, args, {
+  const { cwd, env = process.env, input, timeoutMs, outlives = false } = options;
+  const tied = outlives ? { command, args } : tiedToParent(command, args);
+  const child = spawn(tied.command, tied.args, {
     ...(cwd === undefined ? {} : { cwd }),
     env,
-    stdio: [input === undefined ? 'ignore' : 'pipe', show ? 'inherit' : 'pipe', show ? 'inherit' : 'pipe'],
+    stdio: [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'],
     ...(timeoutMs === undefined ? {} : { timeout: timeoutMs, killSignal: 'SIGKILL' }),
   });
   if (input !== undefined) child.stdin?.on('error', () => undefined).end(input);
@@ -83,4 +84,22 @@ export function lastLines(text, count) {
 /** @param {number} ms @returns {Promise<void>} */
 export function sleep(ms) {
   return new Promise((resolve) => setTimeout(resolve, ms));
+}
+
+/**
+ * Whether a promise settles in time; leaves no timer behind that would keep the process alive.
+ * @param {Promise<unknown>} promise
+ * @param {number} ms
+ * @returns {Promise<boolean>}
+ */
+export async function settlesWithin(promise, ms) {
+  /** @type {NodeJS.Timeout | undefined} */
+  let timer;
+  /** @type {Promise<false>} */
+  const late = new Promise((resolve) => (timer = setTimeout(() => resolve(false), ms)));
+  try {
+    return await Promise.race([promise.then(() => /** @type {const} */ (true)), late]);
+  } finally {
+    clearTimeout(timer);
+  }
 }

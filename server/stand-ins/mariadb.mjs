@@ -13,7 +13,15 @@ import {
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { allProcesses, commandLine, startedAt } from '../launch/process-table.mjs';
-import { accountName, findProgram, lastLines, run, sleep, tiedToParent } from '../launch/programs.mjs';
+import {
+  accountName,
+  findProgram,
+  lastLines,
+  run,
+  settlesWithin,
+  sleep,
+  tiedToParent,
+} from '../launch/programs.mjs';
 import { Refusal } from '../launch/refusal.mjs';
 
 /** The kernel's limit for the path of a socket, less its end mark. */
@@ -145,9 +153,7 @@ export function createMariaDb({ folder, port, outlastsPowerCut = true }) {
   async function stop() {
     expectedToRun = false;
     child?.kill('SIGTERM');
-    await Promise.race([exited, sleep(stopPatienceMs)]);
-    child?.kill('SIGKILL');
-    await exited;
+    if (!(await settlesWithin(exited, stopPatienceMs))) await kill();
   }
 
   async function kill() {
