@@ -72,12 +72,19 @@ function readSettings() {
   const folder = path.resolve(root, env['HOLDOFF_DATA'] ?? '.holdoff');
   const port = portSetting('HOLDOFF_PORT', 8320);
   const host = env['HOLDOFF_HOST'] ?? '127.0.0.1';
+  const apiPort = forDevelopment ? portSetting('HOLDOFF_API_PORT', port + 1) : port;
+  const databasePort = portSetting('HOLDOFF_DB_PORT', 13_317);
+  if (new Set([port, apiPort, databasePort]).size < (forDevelopment ? 3 : 2)) {
+    throw new Refusal(
+      `Each needs a port of its own: the browser's ${port}, the server's ${apiPort}, MariaDB's ${databasePort}.`,
+    );
+  }
   return {
     folder,
     host,
     port,
-    apiPort: forDevelopment ? portSetting('HOLDOFF_API_PORT', port + 1) : port,
-    databasePort: portSetting('HOLDOFF_DB_PORT', 13_317),
+    apiPort,
+    databasePort,
     /** Whoever names a database of their own gets no stand-in. */
     ownDatabase: env['HOLDOFF_DB_HOST'] === undefined,
     env: {

@@ -186,11 +186,12 @@ function judgeServer(from, to, targetFile) {
     return allow(assembles, 'only maintenance reaches for migrations and seeds');
   }
   if (to.zone !== 'server') return 'of src the server imports only the domain';
-  if (assembles || from === to.folder || to.folder === ':base') return undefined;
+  if (assembles || from === to.folder) return undefined;
   const reach = scriptFolders.get(from);
   if (reach !== undefined)
     return allow(reach.includes(to.folder), 'start scripts know nothing of the server');
   if (scriptFolders.has(to.folder)) return 'the server knows nothing of the scripts that start it';
+  if (to.folder === ':base') return undefined;
   if (from === ':base') return 'server config and logger import nothing of the server';
   if (to.folder === ':root' || to.folder === 'maintenance')
     return 'only the composition root assembles the server';

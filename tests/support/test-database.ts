@@ -36,11 +36,13 @@ export async function createTestDatabase(): Promise<TestDatabase> {
   };
 }
 
-async function withConnection(
+/** As the account of the tests, which may do anything in databases named `holdoff_test_...`. */
+export async function withConnection(
   account: { host: string; port: number; user: string; password: string },
   work: (connection: Connection) => Promise<void>,
 ): Promise<void> {
-  const connection = await createConnection(account);
+  const { host, port, user, password } = account;
+  const connection = await createConnection({ host, port, user, password });
   try {
     await work(connection);
   } finally {
@@ -49,7 +51,7 @@ async function withConnection(
 }
 
 // CREATE TABLE ... LIKE would leave the foreign keys behind.
-async function copyDatabase(connection: Connection, from: string, to: string): Promise<void> {
+export async function copyDatabase(connection: Connection, from: string, to: string): Promise<void> {
   await connection.query('SET FOREIGN_KEY_CHECKS = 0');
   const tables = await tablesOf(connection, from);
   const definitions = await Promise.all(
