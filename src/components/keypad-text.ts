@@ -22,6 +22,17 @@ export function typeKey(text: string, key: KeypadKey): string {
   }
 }
 
+/** More digits than any PIN that a person keeps in mind. */
+const MAX_SECRET_LENGTH = 12;
+
+/** The same for a PIN: digits alone, and a zero in front counts. */
+export function typeSecretKey(text: string, key: KeypadKey): string {
+  if (key === 'clear') return '';
+  if (key === 'erase') return text.slice(0, -1);
+  if (key === '.' || key === '-' || text.length >= MAX_SECRET_LENGTH) return text;
+  return text + key;
+}
+
 /** The key that a hardware keyboard means; null for keys that are not the keypad's. */
 export function keyOfKeyboard(key: string): KeypadKey | null {
   if (/^[0-9]$/.test(key)) return key as KeypadKey;

@@ -1,7 +1,7 @@
 import { useEffect, useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
 import { Choice } from './choice';
 import { ElectrodeBody } from './electrode-body';
-import { keyOfKeyboard, shownText, typeKey, type KeypadKey } from './keypad-text';
+import { keyOfKeyboard, shownText, typeKey, typeSecretKey, type KeypadKey } from './keypad-text';
 import { Reading } from './reading';
 
 export interface KeypadUnit {
@@ -29,6 +29,10 @@ export interface KeypadProps {
   readonly words: KeypadWords;
   readonly decimal?: '.' | ',';
   readonly allowMinus?: boolean;
+  /** A PIN: digits alone, zeros in front kept, shown as dots. */
+  readonly secret?: boolean;
+  /** What had been typed before the page went away; typing goes on behind it. */
+  readonly typed?: string;
   readonly refusal?: string;
   readonly onUnit?: (unit: string) => void;
   /** Told at every key, so that a draft can be kept. */
@@ -41,8 +45,8 @@ const FIGURES: readonly KeypadKey[] = ['7', '8', '9', '4', '5', '6', '1', '2', '
 
 /** The app's own number keys: never the system's, which would cover the figure and knows no unit. */
 export function Keypad(props: KeypadProps) {
-  const { label, initial, units, unit, words, decimal = '.', allowMinus = false, refusal } = props;
-  const [typed, setTyped] = useState<string | null>(null);
+  const { label, initial, units, unit, words, decimal = '.', allowMinus = false, secret = false, refusal } = props;
+  const [typed, setTyped] = useState<string | null>(props.typed ?? null);
   const root = useRef<HTMLDivElement>(null);
   const text = typed ?? initial;
   const unitLabel = units.find((each) => each.key === unit)?.label ?? '';
@@ -58,7 +62,7 @@ export function Keypad(props: KeypadProps) {
   const press = (key: KeypadKey): void => {
     if (key === '-' && !allowMinus) return;
     const edits = key === 'erase' || key === '-';
-    const next = typeKey(typed ?? (edits ? initial : ''), key);
+    const next = (secret ? typeSecretKey : typeKey)(typed ?? (edits ? initial : ''), key);
     setTyped(next);
     props.onText?.(next);
   };
@@ -98,7 +102,12 @@ export function Keypad(props: KeypadProps) {
       <div className="keypad-head">
         <span className="muted">{label}</span>
         <output className={`keypad-shown${typed === null ? ' carried' : ''}`} aria-live="polite">
-          <Reading value={text === '' ? '\u2013' : shownText(text, decimal)} unit={unitLabel} size="pin" carried={typed === null} />
+          <Reading
+            value={text === '' ? '\u2013' : secret ? <Dots count={text.length} /> : shownText(text, decimal)}
+            unit={unitLabel}
+            size="pin"
+            carried={typed === null}
+          />
         </output>
       </div>
       {refusal ? (
@@ -118,7 +127,7 @@ export function Keypad(props: KeypadProps) {
         <div className="keys-figures">
           {FIGURES.map((figure) => key(figure, figure))}
           {key('0', '0')}
-          {key('.', decimal, words.point)}
+          {secret ? <span /> : key('.', decimal, words.point)}
           {allowMinus ? key('-', '\u2212', words.minus) : <span />}
         </div>
         <div className="keys-acts">
@@ -136,5 +145,14 @@ export function Keypad(props: KeypadProps) {
         </div>
       </div>
     </div>
+  );
+}
+
+function Dots({ count }: { readonly count: number }) {
+  return (
+    <>
+      <span aria-hidden="true">{'\u2022'.repeat(count)}</span>
+      <span className="heard-only">{String(count)}</span>
+    </>
   );
 }
