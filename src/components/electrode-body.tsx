@@ -1,5 +1,5 @@
 import { useId, useRef } from 'react';
-import { electrodeFace, electrodePath, electrodeRim, type Facing } from './electrode';
+import { electrodeFace, electrodePath, electrodeRim, type ElectrodeShape, type Facing } from './electrode';
 import { useSize } from './use-size';
 
 export interface ElectrodeBodyProps {
@@ -15,6 +15,9 @@ export interface ElectrodeBodyProps {
 
 const PIECE = 100;
 const CUT = { 1: 0, 5: 10, 10: 16 } as const;
+
+/** The line of the face lies inside the body, so that nothing stands over the profile. px */
+const FACE_INSET = 2;
 
 /** An electrode that fills its positioned parent, drawn at the size it has, so that its profile is never stretched. */
 export function ElectrodeBody({
@@ -34,7 +37,7 @@ export function ElectrodeBody({
   return (
     <svg ref={ref} className={`electrode-body tone-${tone}`} aria-hidden="true">
       <path className="electrode-fill" d={electrodePath(shape)} />
-      {rim === 'face' ? <path className="electrode-face" d={electrodeFace(shape)} /> : null}
+      {rim === 'face' ? <path className="electrode-face" d={electrodeFace(inset(shape))} /> : null}
       {rim === 'brass' || rim === 'quiet' ? (
         <>
           <clipPath id={clip}>
@@ -51,4 +54,17 @@ export function ElectrodeBody({
       ) : null}
     </svg>
   );
+}
+
+function inset(shape: ElectrodeShape): ElectrodeShape {
+  switch (shape.facing) {
+    case 'up':
+      return { ...shape, y: shape.y + FACE_INSET };
+    case 'down':
+      return { ...shape, y: shape.y - FACE_INSET };
+    case 'left':
+      return { ...shape, x: shape.x + FACE_INSET };
+    case 'right':
+      return { ...shape, x: shape.x - FACE_INSET };
+  }
 }

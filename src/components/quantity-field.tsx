@@ -31,12 +31,12 @@ export function QuantityField(props: QuantityFieldProps) {
     event.preventDefault();
     onStep(direction);
   };
-  const known = [source, stepWords].filter(Boolean).join(', ');
   return (
     <div className="quantity-field" role="group" aria-labelledby={`${id}l`} onKeyDown={step}>
       <div className="quantity-head">
         <span id={`${id}l`}>{label}</span>
-        {known === '' ? null : <span className="muted">{known}</span>}
+        {source ? <span className="muted quantity-source">{stepWords ? `${source},` : source}</span> : null}
+        {stepWords ? <span className="muted">{stepWords}</span> : null}
       </div>
       <div className="quantity-line">
         <button type="button" className="step less" aria-label={props.lessLabel} onClick={() => onStep(-1)}>

@@ -28,7 +28,7 @@ export function StateStrip(props: StateStripProps) {
   const { title, state, shortState = state, detail, person, count, notice } = props;
   const heard = [title, state, detail, person, count, notice, props.pressLabel].filter(Boolean).join(', ');
   return (
-    <header className={`state-strip ${props.ground}${props.hatched === true ? ' hatch' : ''}`}>
+    <header className={`state-strip ground-${props.ground}${props.hatched === true ? ' hatched' : ''}`}>
       <button
         type="button"
         className="state-strip-press"

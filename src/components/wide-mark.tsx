@@ -6,29 +6,30 @@ import { useSize } from './use-size';
 export interface WideMarkProps {
   readonly state: GapState;
   readonly hatched?: boolean;
-  /** Depth of each body in px at the reference tablet; wider for the face that is read from across the room. */
+  /** The words that have to be read first, above the wire. */
+  readonly title: ReactNode;
+  readonly children?: ReactNode;
+  /** Depth of each body; at most an eighth of the screen. */
   readonly depth_mm?: number;
   readonly solid?: boolean;
-  /** How far down the wire is clipped to the faces, 0 to 1: the words stand above it. */
-  readonly wireAt?: number;
-  readonly children: ReactNode;
 }
 
+/** A dashed outline loses its flat back off the screen: only the faces are said to be there. px */
+const BLEED_PX = 20;
+
 /** The gap mark as wide as its place: what it says in words stands between the faces. */
-export function WideMark(props: WideMarkProps) {
-  const { state, hatched = false, depth_mm = 19.2, solid = false, wireAt = 0.5, children } = props;
-  const ref = useRef<HTMLDivElement>(null);
-  const { width, height } = useSize(ref);
+export function WideMark({ state, hatched = false, title, children, depth_mm = 19.2, solid = false }: WideMarkProps) {
+  const outer = useRef<HTMLDivElement>(null);
+  const inner = useRef<HTMLDivElement>(null);
+  const { width, height } = useSize(outer);
+  const depth = (width - useSize(inner).width) / 2;
   const id = useId();
-  const depth = Math.min(width / 5, (depth_mm * height) / 34);
-  const body = { y: 0, width: depth, height, edge: height / 11, sagitta: height / 19 };
-  const left = electrodePath({ ...body, x: 0, facing: 'right' });
+  const back = state === 'dashed' ? BLEED_PX : 0;
+  const body = { y: 0, width: depth + back, height, edge: height / 11, sagitta: height / 19 };
+  const left = electrodePath({ ...body, x: -back, facing: 'right' });
   const right = electrodePath({ ...body, x: width - depth, facing: 'left' });
-  const y = height * wireAt;
-  const drop = y + height * 0.085;
-  const inset = depth + height * 0.07;
   return (
-    <div ref={ref} className={`wide-mark ${state}${solid ? ' solid' : ''}`} style={{ paddingInline: depth }}>
+    <div ref={outer} className={`wide-mark ${state}${solid ? ' solid' : ''}`} style={{ paddingInline: `min(${depth_mm} * var(--mm), 12vw)` }}>
       <svg aria-hidden="true">
         {hatched ? (
           <>
@@ -39,36 +40,54 @@ export function WideMark(props: WideMarkProps) {
           </>
         ) : null}
         <path className={state === 'dashed' ? 'wide-mark-dash' : 'wide-mark-body'} d={left + right} fillOpacity={hatched ? 0.45 : 1} />
+      </svg>
+      <div ref={inner} className="wide-mark-words">
+        <div>{title}</div>
+        <Between state={state} />
+        {children}
+      </div>
+    </div>
+  );
+}
+
+/** What goes from face to face, in a place of its own below the words, so that neither ever crosses the other. */
+function Between({ state }: { readonly state: GapState }) {
+  const ref = useRef<HTMLDivElement>(null);
+  const { width, height } = useSize(ref);
+  const y = height * 0.3;
+  const step = Math.min(12, width / 20);
+  return (
+    <div ref={ref} className={`wide-mark-between ${state}`}>
+      <svg aria-hidden="true">
         {state === 'bridged' ? (
           <g className="wide-mark-wire">
-            <path
-              d={`M${depth} ${y}H${inset}V${drop}H${width - inset}V${y}H${width - depth}`}
-            />
-            <circle cx={depth - 3} cy={y} r={8} />
-            <circle cx={width - depth + 3} cy={y} r={8} />
+            <path d={`M-2 ${y}H${step}V${height * 0.8}H${width - step}V${y}H${width + 2}`} />
+            <circle cx="-3" cy={y} r="8" />
+            <circle cx={width + 3} cy={y} r="8" />
           </g>
         ) : null}
-        {state === 'jagged' ? <path className="wide-mark-jag" d={jag(width, height, depth)} /> : null}
+        {state === 'jagged' ? <path className="wide-mark-jag" d={jag(width, height)} /> : null}
       </svg>
-      <div className="wide-mark-words">{children}</div>
     </div>
   );
 }
 
 /** Still, never animated: a line from face to face below the words. Parts of the way across and of the height. */
 const JAG: readonly (readonly [number, number])[] = [
-  [0, 0.745],
-  [0.19, 0.635],
-  [0.265, 0.925],
-  [0.4, 0.525],
-  [0.5, 0.995],
-  [0.625, 0.5],
-  [0.726, 0.93],
-  [0.804, 0.655],
-  [1, 0.745],
+  [0, 0.5],
+  [0.19, 0.3],
+  [0.265, 0.86],
+  [0.4, 0.08],
+  [0.5, 0.98],
+  [0.625, 0.04],
+  [0.726, 0.88],
+  [0.804, 0.34],
+  [1, 0.5],
 ];
 
-function jag(width: number, height: number, depth: number): string {
-  const across = width - 2 * (depth - 4);
-  return JAG.map(([x, y], i) => `${i === 0 ? 'M' : 'L'}${depth - 4 + x * across} ${y * height}`).join('');
+const UNDER_FACE_PX = 8;
+
+function jag(width: number, height: number): string {
+  const across = width + 2 * UNDER_FACE_PX;
+  return JAG.map(([x, y], i) => `${i === 0 ? 'M' : 'L'}${x * across - UNDER_FACE_PX} ${y * height}`).join('');
 }

@@ -63,6 +63,8 @@ export interface SliceNeeds {
   readonly highNote: boolean;
   readonly lowNote: boolean;
   readonly middle: boolean;
+  /** Px across: a note in a narrow slice takes two lines. */
+  readonly width: number;
 }
 
 export interface SliceHeights {
@@ -72,12 +74,13 @@ export interface SliceHeights {
 }
 
 /** Heights that the words in the slice need, whatever the scale says. */
-export function sliceHeights({ fonts, highNote, lowNote, middle }: SliceNeeds): SliceHeights {
+export function sliceHeights({ fonts, highNote, lowNote, middle, width }: SliceNeeds): SliceHeights {
   const pad = fonts.body * 0.7;
+  const noteLines = width < fonts.body * 13 ? 2 : 1;
   return {
     high: fonts.lead * 1.2 + fonts.high * 0.98 + pad,
-    low: fonts.lead * 1.2 + fonts.low * 0.98 + pad + (lowNote ? fonts.body * 1.4 : 0),
-    void: (highNote ? fonts.body * 1.5 : 0) + (middle ? fonts.read * 1.15 : 0) + pad,
+    low: fonts.lead * 1.2 + fonts.low * 0.98 + pad + (lowNote ? fonts.body * 1.3 * noteLines : 0),
+    void: (highNote ? fonts.body * 1.3 * noteLines : 0) + (middle ? fonts.read * 1.15 : 0) + pad,
   };
 }
 

@@ -18,6 +18,13 @@ export interface BandPoint {
   readonly high: number;
 }
 
+export interface WorkingPoint extends BandPoint {
+  /** A reading between the two limits. */
+  readonly y?: number;
+  /** Without the lines that carry it to the axes. */
+  readonly bare?: boolean;
+}
+
 export interface SliceFace {
   /** Formatted, rounded away from the danger by the caller. */
   readonly value: string;
@@ -69,10 +76,11 @@ export interface ChartData {
   /** Heavy, over the range in which it was measured. */
   readonly own?: { readonly points: readonly Point[]; readonly label?: string };
   readonly curves?: readonly { readonly points: readonly Point[]; readonly weight: 'thin' | 'curve'; readonly label?: string }[];
-  readonly limit?: { readonly y: number; readonly label: string };
+  /** The short label stands where the plot is narrow. */
+  readonly limit?: { readonly y: number; readonly label: string; readonly short?: string };
   /** Nothing is drawn beyond it. */
   readonly wall?: { readonly from: number; readonly label: string };
-  readonly point?: BandPoint;
+  readonly point?: WorkingPoint;
   readonly readings?: readonly ChartReading[];
   /** What is allowed along x, as a void in a bar under the axis. */
   readonly window?: { readonly min: number; readonly max: number };

@@ -1,0 +1,62 @@
+import { formatFigure, type Rounding } from '../../domain/units/format-quantity';
+import { Table, type Column } from '../table';
+import { cursorStops, valuesAt } from './chart-paths';
+import type { ChartData, ChartReading, ChartWords, CursorValues } from './types';
+
+export interface ChartTableProps {
+  readonly title: string;
+  readonly data: ChartData;
+  readonly words: ChartWords;
+}
+
+/** A curve has many points; a table that is read aloud has to end. */
+const MOST_ROWS = 40;
+
+/** The chart's figures. The low side is rounded down and the high side up, as everywhere. */
+export function ChartTable({ title, data, words }: ChartTableProps) {
+  const stops = cursorStops(data);
+  const every = Math.max(1, Math.ceil(stops.length / MOST_ROWS));
+  const rows = stops.filter((_, i) => i % every === 0 || i === stops.length - 1).map((x) => valuesAt(data, x));
+  const xDecimals = data.x.decimals ?? 2;
+  const yDecimals = data.y.decimals ?? 1;
+  const column = (key: 'low' | 'high' | 'law' | 'own', head: string, rounding: Rounding): Column<CursorValues> => ({
+    key,
+    head: `${head}, ${data.y.unit}`,
+    cell: (row) => {
+      const value = row[key];
+      return value === undefined ? '\u2013' : formatFigure(value, { digits: { decimals: yDecimals }, rounding });
+    },
+  });
+  const columns: Column<CursorValues>[] = [
+    {
+      key: 'x',
+      head: data.x.unit,
+      cell: (row) => formatFigure(row.x, { digits: { decimals: xDecimals }, rounding: 'nearest' }),
+    },
+    ...(data.band === undefined ? [] : [column('low', words.low, 'down'), column('high', words.high, 'up')]),
+    ...(data.law === undefined ? [] : [column('law', words.law, 'nearest')]),
+    ...(data.own === undefined ? [] : [column('own', words.own, 'nearest')]),
+  ];
+  return (
+    <>
+      <Table caption={title} columns={columns} rows={rows} rowKey={(row) => String(row.x)} />
+      {data.readings === undefined || data.readings.length === 0 ? null : (
+        <Table
+          caption={title}
+          columns={readingColumns(data, words)}
+          rows={data.readings.map((reading, i) => ({ ...reading, key: String(i) }))}
+          rowKey={(row) => row.key}
+        />
+      )}
+    </>
+  );
+}
+
+function readingColumns(data: ChartData, words: ChartWords): Column<ChartReading & { readonly key: string }>[] {
+  const write = (value: number, decimals: number): string => formatFigure(value, { digits: { decimals }, rounding: 'nearest' });
+  return [
+    { key: 'number', head: words.number, cell: (row) => row.number ?? '' },
+    { key: 'x', head: data.x.unit, cell: (row) => write(row.x, data.x.decimals ?? 2) },
+    { key: 'y', head: data.y.unit, cell: (row) => write(row.y, data.y.decimals ?? 1) },
+  ];
+}

@@ -1,0 +1,112 @@
+import { useRef, useState } from 'react';
+import { useSize } from '../use-size';
+import { ChartAxes } from './chart-axes';
+import { ChartCursor, plainWords } from './chart-cursor';
+import { chartLayout, sliceFaces, sliceHeights, standsBeside } from './chart-layout';
+import { cursorStops, type Plot } from './chart-paths';
+import { ChartPlot } from './chart-plot';
+import { ChartSlice } from './chart-slice';
+import { ChartTable } from './chart-table';
+import { scaleOf } from './scale';
+import type { ChartData, ChartWords, CursorValues, Slice } from './types';
+import { useFonts } from './use-fonts';
+
+export interface ChartProps {
+  readonly title: string;
+  readonly data: ChartData;
+  readonly words: ChartWords;
+  readonly slice?: Slice;
+  /** Height of the drawing; it fills its parent when left out. */
+  readonly height_mm?: number;
+  /** Words for what the cursor reads off; a plain sentence of figures when left out. */
+  readonly describe?: (values: CursorValues) => string;
+}
+
+/** The one chart of the app: what matters is the void between two solid bodies. */
+export function Chart({ title, data, words, slice, height_mm, describe }: ChartProps) {
+  const box = useRef<HTMLDivElement>(null);
+  const probes = useRef<HTMLSpanElement>(null);
+  const size = useSize(box);
+  const fonts = useFonts(probes, size);
+  const [at, setAt] = useState<number | null>(null);
+  const [asTable, setAsTable] = useState(false);
+
+  const font = fonts.body;
+  const drawn = size.width > 0 && size.height > 0 && font > 0;
+  const beside = slice !== undefined && drawn && standsBeside(size.width, font);
+  const layout = chartLayout({
+    ...size,
+    font,
+    slice: slice !== undefined,
+    wall: data.wall !== undefined,
+    topLabel: data.wall !== undefined || data.spans !== undefined,
+  });
+  // Nothing is drawn beyond a wall, so the axis ends there.
+  const x = data.wall === undefined ? data.x : { ...data.x, max: Math.min(data.x.max, data.wall.from) };
+  const walled: ChartData = { ...data, x };
+  const plot: Plot = {
+    ...layout,
+    x: scaleOf(x, layout.left, layout.right),
+    y: scaleOf(data.y, layout.bottom, layout.top),
+  };
+  const least =
+    beside && layout.slice !== null
+      ? sliceHeights({
+          fonts: slice.lean === 'high' ? fonts : { ...fonts, high: fonts.low, low: fonts.high },
+          highNote: slice.high.note !== undefined,
+          lowNote: slice.low.note !== undefined,
+          middle: slice.middle.length > 0,
+          width: layout.slice.right - layout.slice.left,
+        })
+      : null;
+  const faces =
+    least !== null && data.point !== undefined
+      ? sliceFaces(layout, { high_px: plot.y.at(data.point.high), low_px: plot.y.at(data.point.low) }, least)
+      : null;
+  const minHeight = least === null ? {} : { minHeight: least.high + least.low + least.void + layout.top + font * 2.7 };
+  const height = height_mm === undefined ? {} : { height: `calc(${height_mm} * var(--mm))` };
+
+  return (
+    <figure className="chart" aria-label={title}>
+      <span ref={probes} className="chart-probes" aria-hidden="true">
+        <i className="size-body" />
+        <i className="size-lead" />
+        <i className="size-lean" />
+        <i className="size-answer" />
+        <i className="size-read" />
+      </span>
+      {slice !== undefined && drawn && !beside ? <ChartSlice slice={slice} place={null} /> : null}
+      <div ref={box} className="chart-box" style={{ ...height, ...minHeight }} hidden={asTable}>
+        {drawn ? (
+          <>
+            <svg className="chart-drawing" aria-hidden="true">
+              <ChartPlot data={walled} {...{ layout, plot, font }} readOff={faces} />
+              <ChartAxes data={walled} {...{ layout, plot, font }} />
+            </svg>
+            {slice !== undefined && faces !== null ? <ChartSlice slice={slice} place={{ layout, ...faces }} /> : null}
+            <ChartCursor
+              label={title}
+              data={walled}
+              {...{ layout, plot, at }}
+              stops={cursorStops(walled)}
+              onMove={setAt}
+              describe={describe ?? ((values) => plainWords(walled, values))}
+            />
+          </>
+        ) : null}
+      </div>
+      <div className={asTable ? 'chart-table' : 'heard-only'}>
+        <ChartTable title={title} data={walled} words={words} />
+      </div>
+      <button
+        type="button"
+        className="chart-switch"
+        aria-pressed={asTable}
+        style={asTable || !drawn ? {} : { left: 0, width: layout.left - font * 1.5, height: font * 1.8 }}
+        onClick={() => setAsTable(!asTable)}
+      >
+        {asTable ? words.showChart : words.showTable}
+      </button>
+    </figure>
+  );
+}
