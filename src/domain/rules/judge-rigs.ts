@@ -5,14 +5,22 @@ import {
   revisionById,
   unliftedStandDowns,
   type RigDoc,
+  type StandDown,
 } from '../book/documents/rig';
 import type { EntryOf } from '../book/read-body';
-import { elapsedMs } from '../book/stamp';
+import { elapsedMs, type StampPoint } from '../book/stamp';
 import { anotherReviewerExists, type JudgeContext } from './judge-context';
 import { objection, type Objection } from './objection';
 
 /** How long an accidental stand-down may be taken back by its author, in the same page life (protocol 1.4). */
 export const RETRACT_WITHIN_MS = 120_000;
+
+/** Whether `person` may still take this stand-down back: their own, in this page life, within two minutes. */
+export function isRetractable(down: StandDown, person: string | null, now: StampPoint): boolean {
+  if (person === null || down.lifted !== null || down.by !== person || down.stamp.page_life !== now.page_life) return false;
+  const age = elapsedMs(down.stamp, now);
+  return age !== null && age <= RETRACT_WITHIN_MS;
+}
 
 type RigEntry = EntryOf<
   | 'rig.created'

@@ -3,6 +3,7 @@ import { bleedWait, inversionNodes, type BleedWait, type ChargedNode } from '../
 import { plyThickness_m, sheetCapacitance } from '../capacitor/capacitance';
 import { storedEnergy } from '../capacitor/energy';
 import { hazardBand, type HazardBand } from '../capacitor/hazard';
+import type { Charging } from '../charging/supply-reach';
 import { ok, type Result } from '../units/result';
 
 /** Figures of a rig that screens and checks lean on, all from the supply's limit. */
@@ -93,4 +94,15 @@ function chargedNodes(spec: RigSpec): Result<readonly ChargedNode[]> {
     return ok(inversionNodes(first, second));
   }
   return ok(nodes);
+}
+
+/** Supply, ballast and the bleeds that load it while the gap stays shut. An unknown bleed counts as none. */
+export function chargingOf(spec: RigSpec): Charging {
+  const loading =
+    spec.topology === 'lc-inversion' ? spec.nodes : spec.nodes.filter((node) => node.holds === 'first');
+  const conductance = loading.reduce(
+    (sum, node) => sum + (node.bleed_Mohm === null ? 0 : 1 / node.bleed_Mohm),
+    0,
+  );
+  return { ...spec.charging, bleed_Mohm: conductance === 0 ? null : 1 / conductance };
 }

@@ -1,0 +1,43 @@
+import { useLocation } from 'react-router-dom';
+import { PlacesBar, type Place } from '../components/places-bar';
+import { paths } from '../config/paths';
+import { useRigInHand } from './rig-in-hand';
+import { useGo } from './use-go';
+
+/** Places in order of use from the thumb outward. */
+export function FramePlaces() {
+  const { pathname } = useLocation();
+  const rig = useRigInHand();
+  const go = useGo();
+  return (
+    <PlacesBar
+      label="Places"
+      places={placesOf(rig?.id)}
+      current={currentPlace(pathname)}
+      switchLabel="open the places"
+      onGo={(place) => go(place.href)}
+    />
+  );
+}
+
+function placesOf(rig: string | undefined): readonly Place[] {
+  if (rig === undefined) {
+    return [
+      { key: 'bench', label: 'Bench', href: paths.bench() },
+      { key: 'handover', label: 'Handover', href: paths.handover() },
+    ];
+  }
+  return [
+    { key: 'bench', label: 'Bench', href: paths.benchOf(rig) },
+    { key: 'firings', label: 'Firings', href: paths.firings(rig) },
+    { key: 'lookups', label: 'Lookups', href: paths.gapLookup(rig) },
+    { key: 'checks', label: 'Checks', href: paths.checks(rig) },
+    { key: 'rigs', label: 'Rigs', href: paths.rigs() },
+    { key: 'desk', label: 'Desk', href: paths.desk() },
+    { key: 'handover', label: 'Handover', href: paths.handover() },
+  ];
+}
+
+function currentPlace(pathname: string): string {
+  return pathname.split('/')[1] ?? '';
+}

@@ -1,0 +1,84 @@
+import { lazy } from 'react';
+import { patterns } from '../config/paths';
+import { BenchRoute } from '../features/bench/bench-route';
+
+const SignInRoute = lazy(() =>
+  import('../features/account/sign-in-route').then((m) => ({ default: m.SignInRoute })),
+);
+const SettingsRoute = lazy(() =>
+  import('../features/account/settings-route').then((m) => ({ default: m.SettingsRoute })),
+);
+const BenchFaceRoute = lazy(() =>
+  import('../features/bench/bench-face-route').then((m) => ({ default: m.BenchFaceRoute })),
+);
+const GapRoute = lazy(() => import('../features/lookups/gap-route').then((m) => ({ default: m.GapRoute })));
+const ChecksRoute = lazy(() =>
+  import('../features/checks/checks-route').then((m) => ({ default: m.ChecksRoute })),
+);
+const CheckRoute = lazy(() =>
+  import('../features/checks/check-route').then((m) => ({ default: m.CheckRoute })),
+);
+const FiringsRoute = lazy(() =>
+  import('../features/firings/firings-route').then((m) => ({ default: m.FiringsRoute })),
+);
+const OpenFiringRoute = lazy(() =>
+  import('../features/firings/open-firing-route').then((m) => ({ default: m.OpenFiringRoute })),
+);
+const FiringRoute = lazy(() =>
+  import('../features/firings/firing-route').then((m) => ({ default: m.FiringRoute })),
+);
+const RigsRoute = lazy(() => import('../features/rigs/rigs-route').then((m) => ({ default: m.RigsRoute })));
+const RigRoute = lazy(() => import('../features/rigs/rig-route').then((m) => ({ default: m.RigRoute })));
+const ReviseRigRoute = lazy(() =>
+  import('../features/rigs/revise-rig-route').then((m) => ({ default: m.ReviseRigRoute })),
+);
+const HandoverRoute = lazy(() =>
+  import('../features/handover/handover-route').then((m) => ({ default: m.HandoverRoute })),
+);
+const CrewRoute = lazy(() => import('../features/crew/crew-route').then((m) => ({ default: m.CrewRoute })));
+const DeskRoute = lazy(() => import('../features/desk/desk-route').then((m) => ({ default: m.DeskRoute })));
+const DeskFiringRoute = lazy(() =>
+  import('../features/desk/desk-firing-route').then((m) => ({ default: m.DeskFiringRoute })),
+);
+const DeskRigRoute = lazy(() =>
+  import('../features/desk/desk-rig-route').then((m) => ({ default: m.DeskRigRoute })),
+);
+const DeskHeldRoute = lazy(() =>
+  import('../features/desk/desk-held-route').then((m) => ({ default: m.DeskHeldRoute })),
+);
+const EmergencyRoute = lazy(() =>
+  import('../features/emergency/emergency-route').then((m) => ({ default: m.EmergencyRoute })),
+);
+
+export interface AppRoute {
+  readonly path: string;
+  readonly screen: React.ComponentType;
+  /** Named when the area fails. */
+  readonly area: string;
+  /** Opens while the tablet is locked. */
+  readonly open?: true;
+}
+
+export const ROUTES: readonly AppRoute[] = [
+  { path: patterns.benchOf, screen: BenchRoute, area: 'Bench' },
+  { path: patterns.face, screen: BenchFaceRoute, area: 'Bench' },
+  { path: patterns.gapLookup, screen: GapRoute, area: 'Lookups' },
+  { path: patterns.checks, screen: ChecksRoute, area: 'Checks' },
+  // Making safe may be walked before any PIN; the screen itself refuses the others.
+  { path: patterns.check, screen: CheckRoute, area: 'Checks', open: true },
+  { path: patterns.openFiring, screen: OpenFiringRoute, area: 'Firings' },
+  { path: patterns.firings, screen: FiringsRoute, area: 'Firings' },
+  { path: patterns.firing, screen: FiringRoute, area: 'Firings' },
+  { path: patterns.rigs, screen: RigsRoute, area: 'Rigs' },
+  { path: patterns.reviseRig, screen: ReviseRigRoute, area: 'Rigs' },
+  { path: patterns.rig, screen: RigRoute, area: 'Rigs' },
+  { path: patterns.desk, screen: DeskRoute, area: 'Desk' },
+  { path: patterns.deskFiring, screen: DeskFiringRoute, area: 'Desk' },
+  { path: patterns.deskRig, screen: DeskRigRoute, area: 'Desk' },
+  { path: patterns.deskHeld, screen: DeskHeldRoute, area: 'Desk' },
+  { path: patterns.crew, screen: CrewRoute, area: 'Crew' },
+  { path: patterns.handover, screen: HandoverRoute, area: 'Handover' },
+  { path: patterns.settings, screen: SettingsRoute, area: 'Settings' },
+  { path: patterns.emergency, screen: EmergencyRoute, area: 'Emergency', open: true },
+  { path: patterns.signIn, screen: SignInRoute, area: 'Sign-in', open: true },
+];

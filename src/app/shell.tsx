@@ -1,0 +1,92 @@
+import { Suspense } from 'react';
+import { Navigate, Route, Routes, useLocation } from 'react-router-dom';
+import { Screen, FrameProvider } from '../components/frame';
+import { EmergencyTooth } from '../components/emergency-tooth';
+import { SaysBlock } from '../components/says-block';
+import { paths, patterns } from '../config/paths';
+import { DisplayProvider } from '../data/use-display';
+import { useSession } from '../data/use-session';
+import { UnlockScreen } from '../features/account/unlock-screen';
+import { AreaBoundary } from './area-boundary';
+import { FramePlaces } from './frame-places';
+import { FrameStrip } from './frame-strip';
+import { NoiseProvider } from './noise-watch';
+import { PlaceKeeper } from './place-keeper';
+import { useRigInHand } from './rig-in-hand';
+import { ROUTES, type AppRoute } from './routes';
+import { useGo } from './use-go';
+import './shell.css';
+
+/** The frame round every screen, and who may see which while the tablet is locked. */
+export function Shell() {
+  const { pathname } = useLocation();
+  const go = useGo();
+  const atDesk = pathname.startsWith(paths.desk());
+  return (
+    <DisplayProvider place={atDesk ? 'desk' : 'bench'}>
+      <NoiseProvider>
+        <PlaceKeeper />
+        <FrameProvider
+          strip={<FrameStrip />}
+          tooth={
+            <EmergencyTooth
+              label="Emergency"
+              href={paths.emergency()}
+              onPress={() => go(paths.emergency())}
+            />
+          }
+          places={<FramePlaces />}
+        >
+          <Routes>
+            {ROUTES.map((route) => (
+              <Route key={route.path} path={route.path} element={<Guarded route={route} />} />
+            ))}
+            <Route path={patterns.bench} element={<ToRig to={paths.benchOf} />} />
+            <Route path={patterns.lookups} element={<ToRig to={paths.gapLookup} />} />
+            <Route path="/" element={<Navigate to={paths.bench()} replace />} />
+            <Route path="*" element={<Nowhere />} />
+          </Routes>
+        </FrameProvider>
+      </NoiseProvider>
+    </DisplayProvider>
+  );
+}
+
+function Guarded({ route }: { readonly route: AppRoute }) {
+  const session = useSession();
+  if (session.state === 'no-lab' && route.path !== patterns.signIn)
+    return <Navigate to={paths.signIn()} replace />;
+  const { screen: RouteScreen, area } = route;
+  if (session.state === 'locked' && route.open !== true) return <UnlockScreen people={session.people} />;
+  return (
+    <AreaBoundary key={route.path} area={area}>
+      <Suspense fallback={<Screen>{null}</Screen>}>
+        <RouteScreen />
+      </Suspense>
+    </AreaBoundary>
+  );
+}
+
+/** A place without a rig in its path goes to the rig in hand. */
+function ToRig({ to }: { readonly to: (rig: string) => string }) {
+  const session = useSession();
+  const rig = useRigInHand();
+  if (session.state === 'no-lab') return <Navigate to={paths.signIn()} replace />;
+  if (session.state === 'locked') return <UnlockScreen people={session.people} />;
+  if (rig !== undefined) return <Navigate to={to(rig.id)} replace />;
+  return (
+    <Screen>
+      <SaysBlock lead="The Book of this tablet is still empty.">
+        It fills as soon as the server answers. Until then no rig can be shown.
+      </SaysBlock>
+    </Screen>
+  );
+}
+
+function Nowhere() {
+  return (
+    <Screen>
+      <SaysBlock lead="There is no such page.">Choose a place below.</SaysBlock>
+    </Screen>
+  );
+}

@@ -1,0 +1,69 @@
+import { AgeScale } from '../../components/age-scale';
+import { Reading } from '../../components/reading';
+import { WideMark } from '../../components/wide-mark';
+import { usePerson } from '../../data/use-book';
+import type { RigDoc } from '../../domain/book/documents/rig';
+import { DECLARED_WORDS } from '../../domain/report/words';
+import { ageWords, clockWords } from '../../domain/report/time-words';
+import type { DeclaredView } from '../../domain/rules/declared-view';
+import { stripState } from './strip-state';
+
+interface Props {
+  readonly rig: RigDoc;
+  readonly view: DeclaredView;
+  readonly zone: string;
+}
+
+const HOUR_MS = 3_600_000;
+
+/** The gap mark as wide as the screen: what was declared lies between its faces. */
+export function BenchMark({ rig, view, zone }: Props) {
+  const drawn = stripState(view);
+  const age = view.age_ms;
+  const known = view.state !== 'not-known';
+  return (
+    <WideMark state={drawn.mark} hatched={drawn.hatched}>
+      <div className="bench-mark" role="status">
+        <p className="bench-mark-words">
+          <b>{DECLARED_WORDS[view.state]}</b>
+          {known && age !== null ? <AgeFigure age_ms={age} /> : null}
+        </p>
+        <AgeScale age_h={known && age !== null ? age / HOUR_MS : null} />
+        <p className="bench-mark-detail">
+          <span>
+            <Declarer view={view} zone={zone} /> {tagWords(rig)}
+          </span>
+          <span className="muted">{known ? 'at 12 h: not known, treat as charged' : view.why}</span>
+        </p>
+      </div>
+    </WideMark>
+  );
+}
+
+function AgeFigure({ age_ms }: { readonly age_ms: number }) {
+  const [value = '', unit = ''] = ageWords(age_ms).split(' ');
+  return <Reading value={value} unit={unit} size="answer" />;
+}
+
+function Declarer({ view, zone }: { readonly view: DeclaredView; readonly zone: string }) {
+  const by = usePerson(view.trace?.by ?? null);
+  const down = usePerson(view.stood_down[0]?.by ?? null);
+  const stoodDown =
+    view.stood_down.length === 0
+      ? ''
+      : ` Stood down${down === undefined ? '' : ` by ${down.name}`}: ${view.stood_down[0]?.why ?? ''}.`;
+  if (view.trace === null) return <>Nothing declared yet.{stoodDown}</>;
+  const when = clockWords(view.trace.stamp.wall_ms, zone);
+  const last = view.state === 'not-known' ? 'Last declared by ' : '';
+  return (
+    <>
+      {last}
+      {by?.name ?? 'author open'}, {when}. Declared, not measured.{stoodDown}
+    </>
+  );
+}
+
+function tagWords(rig: RigDoc): string {
+  if (rig.hands.length === 0) return 'No tags in.';
+  return rig.hands.length === 1 ? 'Hands are in.' : `${rig.hands.length} tags in.`;
+}

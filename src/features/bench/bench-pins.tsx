@@ -1,0 +1,134 @@
+import { Link } from 'react-router-dom';
+import { Reading } from '../../components/reading';
+import { TwoFaces } from '../../components/two-faces';
+import { paths } from '../../config/paths';
+import type { LabSettings } from '../../domain/book/rig-spec';
+import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
+import { selfBreak } from '../../domain/gap/self-break';
+import { gapInputOf } from '../../domain/rules/rig-gap';
+import { rigFigures, storedAt_J, type RigFigures } from '../../domain/rules/rig-figures';
+import { formatFigure, formatQuantity } from '../../domain/units/format-quantity';
+
+interface Props {
+  readonly rig: RigDoc;
+  readonly revision: RigRevision;
+  readonly settings: LabSettings;
+}
+
+/** The three figures that matter before a hand goes near the rig, all from the supply's limit. */
+export function BenchPins({ rig, revision, settings }: Props) {
+  const { spec } = revision;
+  const figures = rigFigures(spec, settings);
+  return (
+    <section className="bench-pins" aria-label="Pinned lookups">
+      <GapPin rig={rig} revision={revision} settings={settings} />
+      {figures.ok ? (
+        <>
+          <StoredPin revision={revision} settings={settings} figures={figures.value} />
+          <WaitPin revision={revision} settings={settings} figures={figures.value} />
+        </>
+      ) : (
+        <p className="bench-pin">{figures.refusal.words}</p>
+      )}
+    </section>
+  );
+}
+
+function GapPin({ rig, revision, settings }: Props) {
+  const { lowest_bar_g, highest_bar_g } = revision.spec.gap;
+  const pressure_bar_g = (lowest_bar_g + highest_bar_g) / 2;
+  const answer = selfBreak(
+    gapInputOf(revision.spec, {
+      pressure_bar_g,
+      ambient_bar_abs: settings.ambient_bar_abs,
+      temperature_C: settings.ambient_C,
+    }),
+  );
+  const at = `${formatFigure(pressure_bar_g, { digits: { decimals: 2 }, rounding: 'nearest' })} bar(g)`;
+  return (
+    <Link className="bench-pin" to={paths.gapLookup(rig.id)}>
+      <span className="muted">Gap at {at}: breaks between</span>
+      {answer.ok ? (
+        <TwoFaces
+          label={`Gap at ${at}`}
+          low={one(answer.value.low_kV, 'down')}
+          middle={one(answer.value.law_kV, 'nearest')}
+          high={one(answer.value.high_kV, 'up')}
+          unit="kV"
+        />
+      ) : (
+        <span>{answer.refusal.words}</span>
+      )}
+    </Link>
+  );
+}
+
+function StoredPin({ revision, settings, figures }: Omit<Props, 'rig'> & { readonly figures: RigFigures }) {
+  const { supply_kV, supply_mA } = revision.spec.charging;
+  const working = workingPoint_kV(revision, settings);
+  const stored = working === null ? null : storedAt_J(revision.spec, working);
+  return (
+    <div className="bench-pin">
+      <span className="muted">
+        Stored at the supply’s limit, {supply_kV} kV and {supply_mA} mA
+      </span>
+      <span className="bench-pin-row">
+        <Reading value={energy(figures.stored_J)} unit="J" size="pin" />
+        {stored?.ok === true && working !== null ? (
+          <span className="muted nowrap">
+            {energy(stored.value)} J at {one(working, 'nearest')} kV
+          </span>
+        ) : null}
+      </span>
+      {figures.hazard.type === 'below-reflex' ? null : (
+        <span className="bench-pin-caution">{figures.hazard.words}</span>
+      )}
+    </div>
+  );
+}
+
+function WaitPin({ revision, settings, figures }: Omit<Props, 'rig'> & { readonly figures: RigFigures }) {
+  const { wait } = figures;
+  const title = `Bleed from ${revision.spec.charging.supply_kV} kV, every node to ${settings.discharged_below_V} V`;
+  if (wait.type === 'unknown') {
+    return (
+      <div className="bench-pin">
+        <span className="muted">{title}</span>
+        <b>{wait.words}</b>
+      </div>
+    );
+  }
+  return (
+    <div className="bench-pin">
+      <span className="muted">{title}</span>
+      <span className="bench-pin-row">
+        <Reading value={String(wait.wait_s)} unit="s" size="pin" />
+        <span className="muted">
+          at least; computed{' '}
+          {formatQuantity(wait.computed_s, 's', { digits: { decimals: 1 }, rounding: 'up' })}
+        </span>
+      </span>
+    </div>
+  );
+}
+
+function workingPoint_kV(revision: RigRevision, settings: LabSettings): number | null {
+  const { lowest_bar_g, highest_bar_g } = revision.spec.gap;
+  const answer = selfBreak(
+    gapInputOf(revision.spec, {
+      pressure_bar_g: (lowest_bar_g + highest_bar_g) / 2,
+      ambient_bar_abs: settings.ambient_bar_abs,
+      temperature_C: settings.ambient_C,
+    }),
+  );
+  return answer.ok ? answer.value.law_kV : null;
+}
+
+function one(value: number, rounding: 'up' | 'down' | 'nearest'): string {
+  return formatFigure(value, { digits: { decimals: 1 }, rounding });
+}
+
+/** Energies round up: two decimals, three below a tenth of a joule. */
+function energy(value_J: number): string {
+  return formatFigure(value_J, { digits: { decimals: value_J < 0.1 ? 3 : 2 }, rounding: 'up' });
+}

@@ -1,0 +1,4 @@
+import './components/theme/theme.css';
+import { start } from './app/start';
+
+start(document);
