@@ -1,5 +1,6 @@
 import { useParams } from 'react-router-dom';
-import { BenchFace, type FaceReading } from '../../components/bench-face';
+import { Reading } from '../../components/reading';
+import { WideMark } from '../../components/wide-mark';
 import { useFirings, useLab, usePerson, useReadings, useRig } from '../../data/use-book';
 import { useDeclared } from '../../data/use-now';
 import { standingReading } from '../../domain/book/documents/reading';
@@ -12,6 +13,12 @@ import { formatFigure } from '../../domain/units/format-quantity';
 import { Screen } from '../../components/frame';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import { stripState } from './strip-state';
+
+interface FaceReading {
+  readonly label: string;
+  readonly value: string;
+  readonly unit: string;
+}
 
 /** The state word legible at three metres, with the four numbers that matter now. */
 export function BenchFaceRoute() {
@@ -48,14 +55,27 @@ function Face({
     view.state === 'not-known' ? (view.why ?? '') : `${age}${by === undefined ? '' : `, ${by.name}`}`;
   return (
     <Screen>
-      <BenchFace
-        title={rig.name}
-        detail={detail}
-        mark={drawn.mark}
-        hatched={drawn.hatched}
-        state={drawn.hatched ? `${DECLARED_WORDS[view.state]}. Stood down` : DECLARED_WORDS[view.state]}
-        readings={figures}
-      />
+      <div className="bench-face">
+        <p className="bench-face-head">
+          <b>{rig.name}</b>
+          <span className="muted">{detail}</span>
+        </p>
+        <WideMark state={drawn.mark} hatched={drawn.hatched} solid={firing}>
+          <p className="bench-face-words" role="status">
+            {drawn.hatched ? `${DECLARED_WORDS[view.state]}. Stood down` : DECLARED_WORDS[view.state]}
+          </p>
+        </WideMark>
+        <dl className="bench-face-readings">
+          {figures.map((one) => (
+            <div key={one.label}>
+              <dt className="muted">{one.label}</dt>
+              <dd>
+                <Reading value={one.value} unit={one.unit} size="pin" />
+              </dd>
+            </div>
+          ))}
+        </dl>
+      </div>
     </Screen>
   );
 
