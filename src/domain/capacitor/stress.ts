@@ -83,7 +83,7 @@ export function airFilmField(film: {
   if (bad !== undefined) return refused(bad);
   return ok(
     answer({
-      value: film.voltage_V / (film.air_um + film.thickness_um / film.eps_r) / 1000,
+      value: film.voltage_V / (film.air_um + film.thickness_um / film.eps_r),
       unit: 'kV/mm',
       relative: 0.05,
       model: 'Air film in series with the sheet',

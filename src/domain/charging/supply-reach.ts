@@ -98,7 +98,7 @@ export function supplyReach(
   }
   if (reachable_kV <= gap.law_kV) {
     const words =
-      'Ballast and bleed leave less than the self-break voltage: the gap never fires and the rig sits charged.';
+      'Ballast and bleed leave less than the self-break voltage: by the law the gap never fires and the rig sits charged.';
     return ok({ type: 'never-fires', reachable_kV, needed_kV, words });
   }
   const words =

@@ -1,7 +1,7 @@
 import { answer, type Answer } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { ok, refused, type Refusal, type Result } from '../units/result';
-import { axialProfile, fieldFactorOf, type AxialProfile, type FieldGeometry } from './field-geometry';
+import { cylinderProfile, fieldFactorOf, sphereProfiles, type FieldGeometry } from './field-geometry';
 import { checkedSimilarity, type GapPoint } from './gas-density';
 import { AIR_CRITERION } from './streamer-criterion';
 import { streamerVoltage_kV } from './streamer';
@@ -51,14 +51,10 @@ export function sphereBreakdown(
   const ready = readyGap(spheres, spheres.diameter_cm / 2, 'diameter_cm');
   if (!ready.ok) return ready;
   const { x, shape } = ready.value;
-  const by = (geometry: 'spheres_sym' | 'spheres_ground') =>
-    streamerVoltage_kV(AIR_CRITERION, x, axialProfile(geometry, shape));
-  const value =
-    connection === 'symmetric'
-      ? by('spheres_sym')
-      : connection === 'one-earthed'
-        ? by('spheres_ground')
-        : 0.5 * (by('spheres_sym') + by('spheres_ground'));
+  const profiles = sphereProfiles(shape);
+  const symmetric = streamerVoltage_kV(AIR_CRITERION, x, profiles.symmetric);
+  const oneEarthed = streamerVoltage_kV(AIR_CRITERION, x, profiles.oneEarthed);
+  const value = { symmetric, 'one-earthed': oneEarthed, mean: 0.5 * (symmetric + oneEarthed) }[connection];
   return ok(curvedAnswer(value, `Streamer integral, spheres ${connection}`, shape));
 }
 
@@ -67,7 +63,7 @@ export function cylinderBreakdown(cylinders: { readonly radius_cm: number } & Ga
   const ready = readyGap(cylinders, cylinders.radius_cm, 'radius_cm');
   if (!ready.ok) return ready;
   const { x, shape } = ready.value;
-  const profile: AxialProfile = axialProfile('cylinders', shape);
+  const profile = cylinderProfile(shape);
   return ok(
     curvedAnswer(
       streamerVoltage_kV(AIR_CRITERION, x, profile),

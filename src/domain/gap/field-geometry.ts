@@ -32,17 +32,31 @@ export function fieldFactorOf(geometry: FieldGeometry, x: number): number {
   }
 }
 
-/** The axial profile of a pair of equal spheres or cylinders at gap over radius x > 0. */
-export function axialProfile(
-  geometry: 'spheres_sym' | 'spheres_ground' | 'cylinders',
-  x: number,
-): AxialProfile {
-  const field =
-    geometry === 'cylinders' ? cylinderField(x) : x < FLAT_BELOW ? () => 1 : sphereField(geometry, x);
+/** Axial profile of two equal parallel cylinders at gap over radius x > 0. */
+export function cylinderProfile(x: number): AxialProfile {
   return {
-    fieldFactor: fieldFactorOf(geometry, x),
-    fields: Float64Array.from(SHARES, field),
+    fieldFactor: fieldFactorOf('cylinders', x),
+    fields: Float64Array.from(SHARES, cylinderField(x)),
     weights: WEIGHTS,
+  };
+}
+
+/** Axial profiles of two equal spheres at gap over radius x > 0, by how they are connected. */
+export interface SphereProfiles {
+  readonly symmetric: AxialProfile;
+  readonly oneEarthed: AxialProfile;
+}
+
+/** Both connections at once, since the symmetric field is the mean of the other and its mirror image. */
+export function sphereProfiles(x: number): SphereProfiles {
+  const earthed =
+    x < FLAT_BELOW
+      ? new Float64Array(NODES).fill(1)
+      : Float64Array.from(SHARES, sphereField('spheres_ground', x));
+  const symmetric = earthed.map((field, index) => 0.5 * (field + (earthed[NODES - 1 - index] ?? field)));
+  return {
+    symmetric: { fieldFactor: fieldFactorOf('spheres_sym', x), fields: symmetric, weights: WEIGHTS },
+    oneEarthed: { fieldFactor: fieldFactorOf('spheres_ground', x), fields: earthed, weights: WEIGHTS },
   };
 }
 

@@ -77,7 +77,8 @@ const RADIUS_RULE: NumberRule = {
   name: 'Electrode radius',
   unit: 'mm',
   min: 0.1,
-  max: 10_000,
+  max: 1000,
+  maxReason: 'choose plane electrodes',
 };
 
 /** Radius of curved electrodes, or undefined for plane ones; refused by field when anything is out of range. */

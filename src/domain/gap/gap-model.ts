@@ -1,6 +1,6 @@
 import { checkNumber } from '../units/check-number';
 import { ok, refused, type Refusal, type Result } from '../units/result';
-import { axialProfile, type AxialProfile } from './field-geometry';
+import { cylinderProfile, sphereProfiles, type AxialProfile } from './field-geometry';
 import { similarity_bar_cm } from './gas-density';
 import { gasLaw, type GasLaw } from './gas-law';
 import {
@@ -103,9 +103,9 @@ function fieldsOf(
 ): readonly (AxialProfile | undefined)[] {
   if (radius_mm === undefined) return [undefined];
   const x = gap_mm / radius_mm;
-  return setup.electrodes.shape === 'cylinder'
-    ? [axialProfile('cylinders', x)]
-    : [axialProfile('spheres_sym', x), axialProfile('spheres_ground', x)];
+  if (setup.electrodes.shape === 'cylinder') return [cylinderProfile(x)];
+  const { symmetric, oneEarthed } = sphereProfiles(x);
+  return [symmetric, oneEarthed];
 }
 
 // The high-field factor is taken at the law's voltage, before the other factors: that errs towards a lower side.

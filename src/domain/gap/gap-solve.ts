@@ -76,8 +76,10 @@ export function gapFor(
   const bar = pressure.value;
   const modelAt = (gap_mm: number) => buildGapModel({ ...setup, gap_mm });
   const range = gapRange(setup, bar);
-  // A gap in the middle of the range brings out what is wrong with the other fields, by name.
-  const probe = modelAt(range.high > range.low ? 0.5 * (range.low + range.high) : GAP_RULE.min + 2 * setup.u_gap_mm);
+  // A gap that could be in range brings out what is wrong with the other fields, by name.
+  const spare_mm = GAP_RULE.min + 2 * setup.u_gap_mm;
+  const likely_mm = range.high > range.low ? 0.5 * (range.low + range.high) : spare_mm;
+  const probe = modelAt(Number.isFinite(likely_mm) ? likely_mm : 1);
   if (!probe.ok) return probe;
   return solve({
     target,

@@ -13,6 +13,9 @@ type StitchedGas = keyof typeof JOIN_TORR_CM;
 const MONOTONE_UP_TO_BAR_CM = 100;
 const MONOTONE_STEPS = 4000;
 
+// At the pole the form runs off to any number; so close to it, the number means nothing.
+const POLE_MARGIN = 1e-3;
+
 /** Published minimum of a gas's Paschen curve: its voltage, V. */
 export function paschenMinimumVoltage(gas: string): Result<Answer> {
   return fromMinimum(gas, ({ voltage_V }) => ({ value: voltage_V, unit: 'V' }));
@@ -34,7 +37,7 @@ export function universalPaschen(y: number): Result<number> {
   });
   if (!checked.ok) return checked;
   const divisor = 1 + Math.log(y);
-  if (!(divisor > 0)) {
+  if (!(divisor > POLE_MARGIN)) {
     return refused({
       type: 'no-breakdown-by-this-form',
       field: 'pd_Torr_cm',

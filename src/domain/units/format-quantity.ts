@@ -16,6 +16,9 @@ const NO_FIGURE = '\u2013';
 // Arithmetic leaves dust in the 16th digit; without this, 1.1 rounded up to one decimal would read 1.2.
 const DUST_DIGITS = 13;
 
+// No quantity here is smaller, and the engine refuses to write more than 100.
+const MOST_DECIMALS = 20;
+
 /**
  * A figure and its unit as the screens write them: true minus, comma in thousands, thin space before the unit.
  * What is not finite gives a dash instead of a figure.
@@ -63,7 +66,7 @@ function decimalsOf(value: number, digits: Digits): number {
   if ('decimals' in digits) return digits.decimals;
   if (value === 0) return digits.significant - 1;
   const exponent = Number(value.toExponential(DUST_DIGITS - 1).split('e')[1]);
-  return digits.significant - 1 - exponent;
+  return Math.min(MOST_DECIMALS, digits.significant - 1 - exponent);
 }
 
 function halfAwayFromZero(value: number): number {
