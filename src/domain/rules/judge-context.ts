@@ -1,5 +1,6 @@
 import { getDoc, type Effect } from '../book/documents/effect';
 import type { Reason, Verdict } from '../book/entry';
+import type { Stamp } from '../book/stamp';
 import { isRole } from './roles';
 
 export interface Judged {
@@ -15,6 +16,14 @@ export interface JudgeContext {
   readonly hasGrant: (person: string) => boolean;
   /** The server's clock, Unix ms: dates of permits and authorisations are compared with it. */
   readonly now_ms: number;
+}
+
+/**
+ * When an entry was written, for comparing with the dates of permits: days may lie between writing and handing over.
+ * An uncertain clock is not believed, and none may lie ahead of the server's (protocol 1.8).
+ */
+export function momentOf(stamp: Stamp, { now_ms }: Pick<JudgeContext, 'now_ms'>): number {
+  return stamp.time_uncertain ? now_ms : Math.min(stamp.wall_ms, now_ms);
 }
 
 /** True when somebody other than `person` could review, so that nobody needs to judge their own work. */

@@ -2,7 +2,7 @@ import { getDoc, type Effect } from '../book/documents/effect';
 import type { FiringDoc } from '../book/documents/firing';
 import { revisionById, rulingEnvelope, unliftedStandDowns, type RigDoc } from '../book/documents/rig';
 import type { EntryOf } from '../book/read-body';
-import { anotherReviewerExists, type JudgeContext } from './judge-context';
+import { anotherReviewerExists, momentOf, type JudgeContext } from './judge-context';
 import { objection, type Objection } from './objection';
 import { missingToFire, standingPermit } from './readiness';
 
@@ -62,7 +62,7 @@ function* openingObjection(entry: EntryOf<'firing.opened'>, context: JudgeContex
     return objection('superseded-revision', 'The firing names an earlier revision of the rig.');
   if (check !== rigDoc.ready_check?.check)
     return objection('other-check', 'The firing names another check than the one that stands.');
-  if (permit !== standingPermit(rigDoc, context.now_ms)?.entry)
+  if (permit !== standingPermit(rigDoc, momentOf(stamp, context))?.entry)
     return objection('other-permit', 'The firing names another permit than the one that stands.');
   return null;
 }

@@ -17,7 +17,8 @@ export const RETRACT_WITHIN_MS = 120_000;
 
 /** Whether `person` may still take this stand-down back: their own, in this page life, within two minutes. */
 export function isRetractable(down: StandDown, person: string | null, now: StampPoint): boolean {
-  if (person === null || down.lifted !== null || down.by !== person || down.stamp.page_life !== now.page_life) return false;
+  if (person === null || down.lifted !== null || down.by !== person || down.stamp.page_life !== now.page_life)
+    return false;
   const age = elapsedMs(down.stamp, now);
   return age !== null && age <= RETRACT_WITHIN_MS;
 }
