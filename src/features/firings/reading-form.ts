@@ -1,0 +1,191 @@
+import { CARRIABLE, type ReadingValues } from '../../domain/book/bodies/firing-bodies';
+import type { LabSettings, RigSpec } from '../../domain/book/rig-spec';
+import { checkNumber } from '../../domain/units/check-number';
+import { parseQuantity } from '../../domain/units/parse-number';
+import { ok, refused, type Refusal, type Result } from '../../domain/units/result';
+import { isQuantity, QUANTITY_KEYS, QUANTITY_TRAITS, type QuantityKey } from './reading-fields';
+
+export type Carriable = (typeof CARRIABLE)[number];
+export type ChoiceKey = 'how' | 'gas' | 'looked';
+export type FieldKey = QuantityKey | 'how' | 'gas' | 'note' | 'summary';
+
+type Quantities = { readonly [K in QuantityKey]: number | null };
+/** A reading as it stands on the form: what is not known yet is null, never a made-up figure. */
+export interface FormValues extends Quantities {
+  readonly how: ReadingValues['how'];
+  readonly gas: ReadingValues['gas'];
+  readonly looked: ReadingValues['looked'];
+}
+type ValueKey = keyof FormValues;
+
+/** Where the untouched values come from. */
+export interface Base {
+  readonly values: FormValues;
+  readonly source: Readonly<Record<ValueKey, string>>;
+}
+
+/**
+ * What a person has changed since the reading before; everything else shows through from the base. The text in the open
+ * keypad is part of it, so that a kill at any key loses no key.
+ */
+export interface ReadingDraft {
+  readonly entered: Partial<FormValues>;
+  readonly note: string;
+  /** Words for the closing of the firing. */
+  readonly summary: string;
+  readonly field: FieldKey;
+  /** Text in the open keypad; null while it is closed, '' while nothing has been typed yet. */
+  readonly typing: string | null;
+  /** The choice or text of this field is open in the figure's place. */
+  readonly open: boolean;
+}
+
+export const EMPTY_DRAFT: ReadingDraft = {
+  entered: {},
+  note: '',
+  summary: '',
+  field: 'voltage_kV',
+  typing: null,
+  open: false,
+};
+
+/** The first reading of a firing stands on the rig and the lab; a voltage and a count of shots nobody knows beforehand. */
+export function firstBase(spec: RigSpec, revision: string, settings: LabSettings | undefined): Base {
+  const none = 'not entered';
+  const rig = `rig, rev ${revision}`;
+  const lab = settings === undefined ? none : 'lab setting';
+  return {
+    values: {
+      voltage_kV: null,
+      pressure_bar_g: spec.gap.lowest_bar_g,
+      shots: null,
+      output_uJ: null,
+      flow_L_min: null,
+      rate_Hz: null,
+      ambient_bar_abs: settings?.ambient_bar_abs ?? null,
+      temperature_C: settings?.ambient_C ?? null,
+      humidity_pct: null,
+      how: 'self-break',
+      gas: spec.gap.gas,
+      looked: 'even',
+    },
+    source: {
+      voltage_kV: none,
+      pressure_bar_g: rig,
+      shots: none,
+      output_uJ: none,
+      flow_L_min: none,
+      rate_Hz: none,
+      ambient_bar_abs: lab,
+      temperature_C: lab,
+      humidity_pct: none,
+      how: 'not entered',
+      gas: rig,
+      looked: 'not entered',
+    },
+  };
+}
+
+/** Every later reading stands on the one before. */
+export function nextBase(before: ReadingValues): Base {
+  const { note: _note, carried_over: _carried, ...values } = before;
+  const keys = Object.keys(values) as ValueKey[];
+  const source = Object.fromEntries(
+    keys.map((key) => [key, values[key] === null ? 'not entered' : 'carried over']),
+  ) as Record<ValueKey, string>;
+  return { values, source };
+}
+
+export function formValues(base: Base, draft: ReadingDraft): FormValues {
+  return { ...base.values, ...draft.entered };
+}
+
+export function isCarried(draft: ReadingDraft, key: ValueKey): boolean {
+  return !Object.hasOwn(draft.entered, key);
+}
+
+/** How a value is known, in the words beside its label. */
+export function sourceWords(base: Base, draft: ReadingDraft, key: ValueKey): string {
+  if (isCarried(draft, key)) return base.source[key];
+  return draft.entered[key] === null ? 'left out' : 'entered';
+}
+
+/** Takes a value as touched, also when it is the one that stood there before: somebody has looked. */
+export function enter<K extends ValueKey>(draft: ReadingDraft, key: K, value: FormValues[K]): ReadingDraft {
+  return { ...draft, entered: { ...draft.entered, [key]: value }, typing: null, open: false };
+}
+
+/** A typed text becomes a value, or is refused in words and stays on the keypad. An optional field may be emptied. */
+export function enterText(draft: ReadingDraft, key: QuantityKey, text: string): Result<ReadingDraft> {
+  const { optional, rule, label } = QUANTITY_TRAITS[key];
+  if (optional && text.trim() === '') return ok(enter(draft, key, null));
+  const parsed = parseQuantity(text, rule);
+  if (!parsed.ok) return parsed;
+  if (key === 'shots' && !Number.isInteger(parsed.value))
+    return refused({ type: 'not-whole', field: key, words: `${label}: only whole shots can be counted.` });
+  return ok(enter(draft, key, parsed.value));
+}
+
+/** One step up or down on the grid of the field's step; refused at its bounds. */
+export function stepQuantity(
+  draft: ReadingDraft,
+  at: { readonly key: QuantityKey; readonly value: number },
+  direction: -1 | 1,
+): Result<ReadingDraft> {
+  const { step, rule } = QUANTITY_TRAITS[at.key];
+  const steps = at.value / step;
+  // Off the grid, the nearer grid line in that direction; on it, the next one.
+  const onGrid = Math.abs(steps - Math.round(steps)) < 1e-6;
+  const next = onGrid ? Math.round(steps) + direction : direction > 0 ? Math.ceil(steps) : Math.floor(steps);
+  const checked = checkNumber(Number((next * step).toFixed(4)), rule);
+  return checked.ok ? ok(enter(draft, at.key, checked.value)) : checked;
+}
+
+/** The body of the reading, or what is still missing before it can be logged. */
+export function toReading(base: Base, draft: ReadingDraft): Result<ReadingValues> {
+  const values = formValues(base, draft);
+  const missing = firstMissing(values);
+  if (missing !== null) return refused(missing);
+  const { voltage_kV, pressure_bar_g, shots, ambient_bar_abs, temperature_C } = values;
+  return ok({
+    ...values,
+    voltage_kV: voltage_kV ?? 0,
+    pressure_bar_g: pressure_bar_g ?? 0,
+    shots: shots ?? 0,
+    ambient_bar_abs: ambient_bar_abs ?? 0,
+    temperature_C: temperature_C ?? 0,
+    note: draft.note.trim(),
+    carried_over: CARRIABLE.filter((key) => isCarried(draft, key)),
+  });
+}
+
+/** After a reading is durable the next one starts untouched; the field in hand and the words for closing stay. */
+export function afterLogging(draft: ReadingDraft): ReadingDraft {
+  return { ...EMPTY_DRAFT, summary: draft.summary, field: draft.field };
+}
+
+/** A correction starts from the reading as it stands; what was carried over stays so until it is touched. */
+export function toCorrection(before: ReadingValues, draft: ReadingDraft): Result<ReadingValues> {
+  const corrected = toReading(nextBase(before), draft);
+  if (!corrected.ok) return corrected;
+  return ok({
+    ...corrected.value,
+    carried_over: before.carried_over.filter((key) => isCarried(draft, key)),
+  });
+}
+
+/** The field to open for what is missing; null for those that have none. */
+export function fieldOf(refusal: Refusal): QuantityKey | null {
+  return refusal.field !== undefined && isQuantity(refusal.field) ? refusal.field : null;
+}
+
+function firstMissing(values: FormValues): Refusal | null {
+  for (const key of QUANTITY_KEYS) {
+    const { optional, label } = QUANTITY_TRAITS[key];
+    if (optional || values[key] !== null) continue;
+    const words =
+      key === 'shots' ? 'Shots: enter how many this burst had.' : `${label}: enter a number before logging.`;
+    return { type: 'empty', field: key, words };
+  }
+  return null;
+}
