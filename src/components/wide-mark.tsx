@@ -54,14 +54,14 @@ export function WideMark({ state, hatched = false, title, children, depth_mm = 1
 function Between({ state }: { readonly state: GapState }) {
   const ref = useRef<HTMLDivElement>(null);
   const { width, height } = useSize(ref);
-  const y = height * 0.3;
+  const y = height * 0.2;
   const step = Math.min(12, width / 20);
   return (
     <div ref={ref} className={`wide-mark-between ${state}`}>
       <svg aria-hidden="true">
         {state === 'bridged' ? (
           <g className="wide-mark-wire">
-            <path d={`M-2 ${y}H${step}V${height * 0.8}H${width - step}V${y}H${width + 2}`} />
+            <path d={`M-2 ${y}H${step}V${height * 0.7}H${width - step}V${y}H${width + 2}`} />
             <circle cx="-3" cy={y} r="8" />
             <circle cx={width + 3} cy={y} r="8" />
           </g>

@@ -84,7 +84,10 @@ function BandWords({ data, layout, plot, font }: Omit<ChartPlotProps, 'readOff'>
   );
 }
 
-/** Two lines carry the working point across to the axis, or on to the slice; one carries it down. */
+/**
+ * Two lines carry the working point across to the axis, and on to the slice unless its words pushed the face away; one carries
+ * it down.
+ */
 function ReadOff({ point, plot, layout, font, readOff }: Omit<ChartPlotProps, 'data'> & { readonly point: BandPoint }) {
   const x = plot.x.at(point.x);
   const high = plot.y.at(point.high);
@@ -92,7 +95,9 @@ function ReadOff({ point, plot, layout, font, readOff }: Omit<ChartPlotProps, 'd
   const start = layout.left - font * 0.55;
   const slice = layout.slice?.right;
   const across = (y: number, faceY: number): string =>
-    slice === undefined || Math.abs(faceY - y) < 1 ? `M${start} ${y}H${x}` : `M${slice + 3} ${faceY}L${start} ${y}H${x}`;
+    slice === undefined || Math.abs(faceY - y) > font * 0.7
+      ? `M${start} ${y}H${x}`
+      : `M${slice + 3} ${faceY}L${start} ${y}H${x}`;
   return (
     <path
       className="chart-readoff"

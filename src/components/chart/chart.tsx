@@ -63,7 +63,8 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
     least !== null && data.point !== undefined
       ? sliceFaces(layout, { high_px: plot.y.at(data.point.high), low_px: plot.y.at(data.point.low) }, least)
       : null;
-  const minHeight = least === null ? {} : { minHeight: least.high + least.low + least.void + layout.top + font * 2.7 };
+  // Stacked above the plot, the slice leaves it a height of its own.
+  const minHeight = least === null ? (slice === undefined ? {} : { minHeight: font * 12 }) : { minHeight: least.high + least.low + least.void + layout.top + font * 2.7 };
   const height = height_mm === undefined ? {} : { height: `calc(${height_mm} * var(--mm))` };
 
   return (
