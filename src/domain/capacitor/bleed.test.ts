@@ -18,7 +18,7 @@ describe('bleedTime', () => {
     ['Heron, both on one bleed', 500e6, 7.05e-9, 16_000, 20.3],
     ['Kettle', 400e6, 5e-9, 25_000, 12.43],
     ['Wren', 1e9, 0.88e-9, 10_000, 4.66],
-  ])('%s: %d ohm, %d F from %d V take %d s', (_rig, R, C, V0, s) => {
+  ])('%s: %d ohm, %d F from %d V take %d s', (...[_rig, R, C, V0, s]) => {
     const result = bleedTime({ resistance_ohm: R, capacitance_F: C }, V0, 50);
     expect(Math.abs((result.ok ? result.value.value : Number.NaN) / s - 1)).toBeLessThan(0.003);
   });
@@ -34,7 +34,7 @@ describe('bleedTime', () => {
     [{ resistance_ohm: 1e6, capacitance_F: Number.NaN }, 1000, 50, 'capacitance_F'],
     [{ resistance_ohm: 1e6, capacitance_F: 1e-9 }, Infinity, 50, 'voltage_V'],
     [{ resistance_ohm: 1e6, capacitance_F: 1e-9 }, 1000, 0, 'discharged_below_V'],
-  ])('refuses %j from %d to %d beside %s', (node, from, to, field) => {
+  ])('refuses %j from %d to %d beside %s', (...[node, from, to, field]) => {
     expect(bleedTime(node, from, to)).toMatchObject({ refusal: { field } });
   });
 });

@@ -18,7 +18,7 @@ describe('storedEnergy', () => {
     ['Kettle at its limit', 5e-9, 25_000, 1.5625],
     ['Wren', 0.88e-9, 6370, 0.0179],
     ['Wren at its limit', 0.88e-9, 10_000, 0.044],
-  ])('%s: %d F at %d V hold %d J', (_rig, C, V, J) => {
+  ])('%s: %d F at %d V hold %d J', (...[_rig, C, V, J]) => {
     expect(Math.abs(value(storedEnergy(C, V)) / J - 1)).toBeLessThan(0.003);
   });
 
@@ -154,7 +154,7 @@ describe('shotCharge', () => {
 it('gives finite numbers or refusals for any input', () => {
   const any = fc.double();
   fc.assert(
-    fc.property(any, any, any, any, (a, b, c, d) => {
+    fc.property(any, any, any, any, (...[a, b, c, d]) => {
       const results = [
         storedEnergy(a, b),
         shotCharge(a, b, c),

@@ -36,7 +36,7 @@ describe('repetitionRate', () => {
   it('gives a finite rate or a refusal for any input', () => {
     const any = fc.double();
     fc.assert(
-      fc.property(any, any, any, any, (ballast_ohm, capacitance_F, supply_V, break_V) => {
+      fc.property(any, any, any, any, (...[ballast_ohm, capacitance_F, supply_V, break_V]) => {
         const result = repetitionRate({ ballast_ohm, capacitance_F, supply_V, break_V });
         return !result.ok || (Number.isFinite(result.value.value) && result.value.value > 0);
       }),
@@ -115,7 +115,7 @@ describe('highestRate', () => {
     ['Heron', HERON, 7.05e-9, 12.184, 4.7],
     ['Kettle', KETTLE, 5e-9, 18.78, 5.31],
     ['Wren', WREN, 0.88e-9, 6.37, 10.4],
-  ])('%s', (_rig, charging, capacitance_F, break_kV, Hz) => {
+  ])('%s', (...[_rig, charging, capacitance_F, break_kV, Hz]) => {
     const result = highestRate(charging, { capacitance_F, break_kV });
     expect(Math.abs((result.ok ? result.value.value : Number.NaN) - Hz)).toBeLessThan(0.05);
   });

@@ -10,7 +10,7 @@ describe('fieldFactorOf', () => {
     [1, 1.358996, 1.51698, 1.770281, 1.161686, 1.315191],
     [2, 1.770281, 2.338442, 2.677705, 1.315191, 1.604556],
     [4, 2.677705, 4.200923, 4.604439, 1.604556, 2.137023],
-  ])('at gap over radius %d', (x, symmetric, earthed, spherePlane, cylinders, cylinderPlane) => {
+  ])('at gap over radius %d', (...[x, symmetric, earthed, spherePlane, cylinders, cylinderPlane]) => {
     expect(fieldFactorOf('spheres_sym', x)).toBeCloseTo(symmetric, 5);
     expect(fieldFactorOf('spheres_ground', x)).toBeCloseTo(earthed, 5);
     expect(fieldFactorOf('sphere_plane', x)).toBeCloseTo(spherePlane, 5);

@@ -85,12 +85,11 @@ const AIR: GasLaw = {
   usable: true,
 };
 
-function shareOfAir(gas: GasName, share: number, relative: number, usable = true): GasLaw {
+function shareOfAir(gas: GasName, share: number, relative: number): GasLaw {
   return {
     ...AIR,
     gas,
     relative,
-    usable,
     factor: () => share,
     lowMargin: 1 - relative,
     highest_kV: (x) => share * (1 + relative) * airUniform_kV(x),
@@ -126,9 +125,9 @@ const LAWS: Readonly<Partial<Record<GasName, GasLaw>>> = {
   },
   CO2: shareOfAir('CO2', 0.88, 0.08),
   H2: shareOfAir('H2', 0.52, 0.12),
-  Ar: shareOfAir('Ar', 0.25, 0.4, false),
-  Ne: shareOfAir('Ne', 0.15, 0.4, false),
-  He: shareOfAir('He', 0.15, 0.4, false),
+  Ar: { ...shareOfAir('Ar', 0.25, 0.4), usable: false },
+  Ne: { ...shareOfAir('Ne', 0.15, 0.4), usable: false },
+  He: { ...shareOfAir('He', 0.15, 0.4), usable: false },
 };
 
 const NO_LAW_WORDS: Readonly<Partial<Record<GasName, string>>> = {

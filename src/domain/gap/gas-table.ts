@@ -52,26 +52,27 @@ const VON_ENGEL = 'von Engel, from memory';
 /** Oxygen and SF6 attach electrons, so they have no honest pair of constants and no row. */
 export const TOWNSEND_CONSTANTS: Readonly<Record<string, TownsendConstants>> = {
   air: row(
-    15,
-    365,
+    [15, 365],
     [100, 800],
     'Bazelyan, as read in a public note; E/p range from memory (von Engel, Raizer)',
   ),
-  N2: row(12, 342, [100, 600], NASSER),
-  H2: row(5, 130, [20, 600], NASSER),
-  He: row(3, 34, [20, 150], `${NASSER}; another published pair differs by a factor of two`),
-  Ne: row(4, 100, [100, 400], NASSER),
-  Ar: row(12, 180, [100, 600], NASSER),
-  CO2: row(20, 466, [500, 1000], VON_ENGEL),
-  H2O: row(13, 290, [150, 1000], VON_ENGEL),
-  Kr: row(17, 240, [100, 1000], NASSER),
-  Xe: row(26, 350, [200, 800], NASSER),
+  N2: row([12, 342], [100, 600], NASSER),
+  H2: row([5, 130], [20, 600], NASSER),
+  He: row([3, 34], [20, 150], `${NASSER}; another published pair differs by a factor of two`),
+  Ne: row([4, 100], [100, 400], NASSER),
+  Ar: row([12, 180], [100, 600], NASSER),
+  CO2: row([20, 466], [500, 1000], VON_ENGEL),
+  H2O: row([13, 290], [150, 1000], VON_ENGEL),
+  Kr: row([17, 240], [100, 1000], NASSER),
+  Xe: row([26, 350], [200, 800], NASSER),
 };
 
-function row(A: number, B: number, range: readonly [number, number], source: string): TownsendConstants {
+type Pair = readonly [number, number];
+
+function row(constants: Pair, range: Pair, source: string): TownsendConstants {
   return {
-    A_per_cm_Torr: A,
-    B_V_per_cm_Torr: B,
+    A_per_cm_Torr: constants[0],
+    B_V_per_cm_Torr: constants[1],
     lowest_E_over_p: range[0],
     highest_E_over_p: range[1],
     source,

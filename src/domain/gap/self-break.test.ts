@@ -47,7 +47,7 @@ describe('the demo lab', () => {
     ['Wren', 'air', 1.6, 5, 0.85, 5.76],
   ] as const)(
     '%s, %s, %d mm, R %d mm at %d bar(abs) breaks at %d kV',
-    (_rig, gas, gap_mm, radius_mm, bar_abs, kV) => {
+    (...[_rig, gas, gap_mm, radius_mm, bar_abs, kV]) => {
       const law = must({
         ...KETTLE,
         gas,
@@ -226,7 +226,7 @@ describe('bad input', () => {
   it('never turns any number into NaN, Infinity or a side on the wrong side', () => {
     const any = fc.double();
     fc.assert(
-      fc.property(any, any, any, any, any, any, (gap, u_gap, bar, u_bar, T, radius) => {
+      fc.property(any, any, any, any, any, any, (...[gap, u_gap, bar, u_bar, T, radius]) => {
         const result = selfBreak({
           ...KETTLE,
           gap_mm: gap,

@@ -38,7 +38,7 @@ describe('townsendVoltage', () => {
 
   it('gives a positive finite number or a refusal for any input', () => {
     fc.assert(
-      fc.property(fc.double(), fc.double(), fc.double(), fc.double(), (A, B, gamma, pd) => {
+      fc.property(fc.double(), fc.double(), fc.double(), fc.double(), (...[A, B, gamma, pd]) => {
         const result = townsendVoltage({ A_per_cm_Torr: A, B_V_per_cm_Torr: B, gamma }, pd);
         return !result.ok || (Number.isFinite(result.value.value) && result.value.value > 0);
       }),

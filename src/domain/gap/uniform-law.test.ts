@@ -225,7 +225,7 @@ describe('every uniform law', () => {
       ),
     );
     fc.assert(
-      fc.property(gas, fc.double(), fc.double(), fc.double(), (g, p, d, T) => {
+      fc.property(gas, fc.double(), fc.double(), fc.double(), (...[g, p, d, T]) => {
         const result = uniformBreakdown(g, point(p, d, T));
         return !result.ok || (Number.isFinite(result.value.value) && result.value.value > 0);
       }),

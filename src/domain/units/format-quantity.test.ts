@@ -26,7 +26,7 @@ describe('formatQuantity', () => {
     [99.99, 'kV', { digits: { significant: 3 }, rounding: 'nearest' }, '100\u2009kV'],
     [0, 'kV', { digits: { significant: 3 }, rounding: 'up' }, '0.00\u2009kV'],
     [-0.01, 'kV', one, '0.0\u2009kV'],
-  ])('writes %d %s', (value, unit, format, text) => {
+  ])('writes %d %s', (...[value, unit, format, text]) => {
     expect(formatQuantity(value, unit, format)).toBe(text);
   });
 

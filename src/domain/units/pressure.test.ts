@@ -26,9 +26,9 @@ const must = <T>(result: Result<T>): T => {
 
 describe('gauge and absolute', () => {
   it('are different types, and neither is a bare number', () => {
-    expectTypeOf<PressureAbsBar>().not.toMatchTypeOf<PressureGaugeBar>();
-    expectTypeOf<PressureGaugeBar>().not.toMatchTypeOf<PressureAbsBar>();
-    expectTypeOf<number>().not.toMatchTypeOf<PressureAbsBar>();
+    expectTypeOf<PressureAbsBar>().not.toExtend<PressureGaugeBar>();
+    expectTypeOf<PressureGaugeBar>().not.toExtend<PressureAbsBar>();
+    expectTypeOf<number>().not.toExtend<PressureAbsBar>();
   });
 
   it('convert with the ambient pressure, which has no default', () => {
