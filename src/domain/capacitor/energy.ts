@@ -6,8 +6,7 @@ export const CAPACITANCE_RULE = {
   field: 'capacitance_F',
   name: 'Capacitance',
   unit: 'F',
-  min: 0,
-  minExcluded: true,
+  min: 1e-15,
   max: 1,
 } as const;
 export const VOLTAGE_RULE = { field: 'voltage_V', name: 'Voltage', unit: 'V', min: 0, max: 1e6 } as const;

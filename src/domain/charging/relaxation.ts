@@ -25,12 +25,12 @@ export function repetitionRate({
   const bad = firstRefusal([
     checkNumber(ballast_ohm, { ...RESISTANCE_RULE, field: 'ballast_ohm', name: 'Ballast' }),
     checkNumber(capacitance_F, CAPACITANCE_RULE),
-    checkNumber(supply_V, { ...VOLTAGE_RULE, field: 'supply_V', name: 'Supply voltage', minExcluded: true }),
+    checkNumber(supply_V, { ...VOLTAGE_RULE, field: 'supply_V', name: 'Supply voltage', min: 1 }),
     checkNumber(break_V, {
       ...VOLTAGE_RULE,
       field: 'break_V',
       name: 'Self-break voltage',
-      minExcluded: true,
+      min: 1,
     }),
   ]);
   if (bad !== undefined) return refused(bad);
