@@ -11,7 +11,7 @@ const HIGHEST_X_BAR_CM = 50;
 
 /** Gap over radius up to which the sphere-gap standard was met, and up to which the model is given at all. */
 export const CHECKED_GAP_OVER_RADIUS = 2;
-export const LARGEST_GAP_OVER_RADIUS = 10;
+export const LARGEST_GAP_OVER_RADIUS = 5;
 
 /** How two spheres are connected: equal and opposite, one earthed, or the mean of both answers. */
 export type SphereConnection = 'symmetric' | 'one-earthed' | 'mean';
@@ -98,7 +98,7 @@ function outsideRange(x: number, shape: number): Refusal | undefined {
   return shape > LARGEST_GAP_OVER_RADIUS ? tooSharp() : undefined;
 }
 
-/** Beyond ten radii corona comes first, and the model speaks of its onset and not of breakdown. */
+/** Beyond five radii corona comes first: the model speaks of its onset, and the low side may even fall with gap. */
 export function tooSharp(): Refusal {
   return {
     type: 'gap-too-wide-for-radius',
