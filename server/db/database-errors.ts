@@ -1,0 +1,27 @@
+/** Deadlock, lock wait timeout, and "record has changed since last read": the whole transaction may be tried again. */
+const retryable: ReadonlySet<number> = new Set([1213, 1205, 1020]);
+
+const lostConnection: ReadonlySet<string> = new Set([
+  'ECONNREFUSED',
+  'ECONNRESET',
+  'EPIPE',
+  'ETIMEDOUT',
+  'PROTOCOL_CONNECTION_LOST',
+  'PROTOCOL_SEQUENCE_TIMEOUT',
+]);
+
+export function isRetryable(error: unknown): boolean {
+  return error instanceof Error && 'errno' in error && retryable.has(Number(error.errno));
+}
+
+/** True for anything that the database, its driver or the pool threw: the request may be tried again later. */
+export function isDatabaseError(error: unknown): boolean {
+  if (!(error instanceof Error)) return false;
+  if (error.name === 'KnexTimeoutError') return true;
+  if ('sqlState' in error || 'sqlMessage' in error) return true;
+  return 'code' in error && typeof error.code === 'string' && lostConnection.has(error.code);
+}
+
+export function isDuplicateKey(error: unknown): boolean {
+  return error instanceof Error && 'errno' in error && error.errno === 1062;
+}
