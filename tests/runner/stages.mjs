@@ -23,8 +23,8 @@ export const stages = [
   },
   {
     name: 'lint',
-    says: 'import table, cycles, types in use, hooks',
-    run: command(['node_modules/eslint/bin/eslint.js', '--max-warnings', '0', '.']),
+    says: 'the import table, cycles, types in use, hooks',
+    run: command(['node_modules/eslint/bin/eslint.js', '--max-warnings', '0', '--concurrency', '2', '.']),
   },
   {
     name: 'types',

@@ -1,4 +1,6 @@
+import { existsSync } from 'node:fs';
 import path from 'node:path';
+import { findImportCycles, resolveImport } from './import-cycles.mjs';
 import { judgeImport } from './import-zones.mjs';
 
 const kebabFile = /^\.?[a-z0-9]+(-[a-z0-9]+)*(\.[a-z0-9]+(-[a-z0-9]+)*)*$/;
@@ -46,5 +48,39 @@ const kebabCaseFile = {
   },
 };
 
+const sourceFolders = ['src', 'server', 'migrations', 'seeds', 'tests'];
+
+/** Read once for a whole run: an editor that keeps lint running sees a new cycle after a restart. */
+function createCycleFinder() {
+  /** @type {ReturnType<typeof findImportCycles> | undefined} */
+  let cycles;
+  return (/** @type {string} */ root) => {
+    cycles ??= findImportCycles(
+      sourceFolders.map((folder) => path.join(root, folder)).filter((place) => existsSync(place)),
+    );
+    return cycles;
+  };
+}
+
+const cyclesOf = createCycleFinder();
+
+/** @type {import('eslint').Rule.RuleModule} */
+const noImportCycle = {
+  meta: { type: 'problem', schema: [], docs: { description: 'No file imports itself over others' } },
+  create(context) {
+    const circular = cyclesOf(context.cwd).get(context.filename);
+    if (circular === undefined || circular.size === 0) return {};
+    /** @param {any} node */
+    const judge = (node) => {
+      const target = resolveImport(context.filename, String(node.source?.value ?? ''), circular);
+      if (target === undefined || (node.importKind ?? node.exportKind) === 'type') return;
+      context.report({ node, message: `${path.relative(context.cwd, target)} imports this file back` });
+    };
+    return { ImportDeclaration: judge, ExportNamedDeclaration: judge, ExportAllDeclaration: judge };
+  },
+};
+
 /** Rules that no package offers in the shape that this project needs. */
-export const holdoffRules = { rules: { 'import-zones': importZones, 'kebab-case-file': kebabCaseFile } };
+export const holdoffRules = {
+  rules: { 'import-zones': importZones, 'kebab-case-file': kebabCaseFile, 'no-import-cycle': noImportCycle },
+};
