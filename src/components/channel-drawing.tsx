@@ -36,7 +36,12 @@ export function ChannelDrawing({ label, parts, arcs, even, length_mm, onToggle }
     <div ref={ref} className="channel" role="group" aria-label={label}>
       <svg aria-hidden="true">
         <path className="channel-body" d={upper + lower} />
-        {even ? <path className="channel-even" d={evenLines(end + 6, end + long - 6, [bar + 3, height - bar - 3])} /> : null}
+        {even ? (
+          <path
+            className="channel-even"
+            d={evenLines(end + 6, end + long - 6, [bar + 3, height - bar - 3])}
+          />
+        ) : null}
         {parts.map((part, i) =>
           arcs.includes(part.key) ? (
             <path key={part.key} className="channel-arc" d={arcLine(middle(i), bar - 1, height - bar + 1)} />
@@ -46,7 +51,10 @@ export function ChannelDrawing({ label, parts, arcs, even, length_mm, onToggle }
           className="channel-cut"
           d={parts
             .slice(1)
-            .map((_, i) => `M${end + (i + 1) * partWidth} 0V${bar + 4}M${end + (i + 1) * partWidth} ${height - bar - 4}V${height}`)
+            .map(
+              (_, i) =>
+                `M${end + (i + 1) * partWidth} 0V${bar + 4}M${end + (i + 1) * partWidth} ${height - bar - 4}V${height}`,
+            )
             .join('')}
         />
         <path className="channel-ends" d={`M${end * 0.1} 0V${height}M${width - end * 0.1} 0V${height}`} />
@@ -64,7 +72,12 @@ export function ChannelDrawing({ label, parts, arcs, even, length_mm, onToggle }
       </svg>
       <div className="channel-parts" style={{ paddingInline: end }}>
         {parts.map((part) => (
-          <button key={part.key} type="button" aria-pressed={arcs.includes(part.key)} onClick={() => onToggle(part.key)}>
+          <button
+            key={part.key}
+            type="button"
+            aria-pressed={arcs.includes(part.key)}
+            onClick={() => onToggle(part.key)}
+          >
             <span style={{ height: bar }}>{part.label}</span>
           </button>
         ))}
@@ -75,12 +88,17 @@ export function ChannelDrawing({ label, parts, arcs, even, length_mm, onToggle }
 
 function evenLines(from: number, to: number, [top, bottom]: readonly [number, number]): string {
   const count = Math.max(1, Math.round((to - from) / 10.3));
-  return Array.from({ length: count + 1 }, (_, i) => `M${from + ((to - from) * i) / count} ${top}V${bottom}`).join('');
+  return Array.from(
+    { length: count + 1 },
+    (_, i) => `M${from + ((to - from) * i) / count} ${top}V${bottom}`,
+  ).join('');
 }
 
 /** Sideways offsets of an arc on its way down; drawn, not random, so that a screen looks the same each time. */
 const ARC = [0, 7, -5, 9, -8, 4, 0] as const;
 
 function arcLine(x: number, top: number, bottom: number): string {
-  return ARC.map((dx, i) => `${i === 0 ? 'M' : 'L'}${x + dx} ${top + ((bottom - top) * i) / (ARC.length - 1)}`).join('');
+  return ARC.map(
+    (dx, i) => `${i === 0 ? 'M' : 'L'}${x + dx} ${top + ((bottom - top) * i) / (ARC.length - 1)}`,
+  ).join('');
 }

@@ -68,6 +68,8 @@ export function Dialog({ title, onClose, closeLabel, children, actions, critical
 }
 
 function focusStops(root: HTMLElement | null): HTMLElement[] {
-  const found = root?.querySelectorAll<HTMLElement>('a[href], button:not(:disabled), input, textarea, select, [tabindex="0"]');
+  const found = root?.querySelectorAll<HTMLElement>(
+    'a[href], button:not(:disabled), input, textarea, select, [tabindex="0"]',
+  );
   return found === undefined ? [] : [...found].filter((element) => element.tabIndex >= 0);
 }

@@ -14,7 +14,12 @@ export interface FacingPairProps {
 export function FacingPair({ title, children, foot, footEnd, chosen = false, onPress }: FacingPairProps) {
   const tone = chosen ? 'text' : 'metal';
   return (
-    <button type="button" className={`facing-pair${chosen ? ' chosen' : ''}`} aria-pressed={chosen} onClick={onPress}>
+    <button
+      type="button"
+      className={`facing-pair${chosen ? ' chosen' : ''}`}
+      aria-pressed={chosen}
+      onClick={onPress}
+    >
       <span className="pair-body upper">
         <ElectrodeBody facing="down" tone={tone} edge={0.036} sagitta={0.026} />
         <b>{title}</b>

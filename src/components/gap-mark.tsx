@@ -46,9 +46,7 @@ export function GapMark({ state, hatched = false, title, className }: GapMarkPro
         {state === 'bridged' ? <WireKeepOut /> : null}
         {state === 'jagged' ? <path d={JAG} fill="none" stroke="#000" strokeWidth="9" /> : null}
       </mask>
-      {hatched ? (
-        <path d={HATCH} stroke="currentColor" strokeWidth="2.6" mask={`url(#${id}h)`} />
-      ) : null}
+      {hatched ? <path d={HATCH} stroke="currentColor" strokeWidth="2.6" mask={`url(#${id}h)`} /> : null}
       {state === 'dashed' ? (
         <path d={OUTLINES} fill="none" stroke="currentColor" strokeWidth="3.2" strokeDasharray="5.4 4" />
       ) : (

@@ -1,12 +1,12 @@
 import { ElectrodeBody } from './electrode-body';
-import { HOLD_PIECES, type HoldKind, type HoldResult } from './hold';
+import { HOLD_PIECES, type HoldKind, type HoldWork } from './hold';
 import { useHold } from './use-hold';
 
 export interface HoldButtonProps {
   readonly label: string;
   readonly hold?: HoldKind;
   readonly holdLabel?: string;
-  readonly onComplete: () => HoldResult;
+  readonly onComplete: HoldWork;
   readonly failedWords?: string;
   readonly disabled?: boolean;
   readonly reason?: string;

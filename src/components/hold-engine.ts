@@ -1,9 +1,9 @@
-import { HOLD_MS, IDLE_HOLD, type HoldKind, type HoldResult, type HoldView } from './hold';
+import { HOLD_MS, IDLE_HOLD, type HoldKind, type HoldOutcome, type HoldView, type HoldWork } from './hold';
 
 export interface HoldRequest {
   readonly kind: HoldKind;
   readonly label: string;
-  readonly onComplete: () => HoldResult;
+  readonly onComplete: HoldWork;
   /** Words for a rejection that brings none of its own. */
   readonly failedWords: string;
 }
@@ -42,7 +42,8 @@ export function createHoldEngine(publish: (view: HoldView) => void): HoldEngine 
 
   const complete = async (request: HoldRequest): Promise<void> => {
     stopClock();
-    navigator.vibrate?.(HAPTIC_MS);
+    // Not every browser has the motor.
+    if ('vibrate' in navigator) navigator.vibrate(HAPTIC_MS);
     const { label } = request;
     show({ phase: 'writing', progress: 1, left_ms: 0, label, words: '' });
     const words = await outcomeWords(request);
@@ -94,10 +95,14 @@ export function createHoldEngine(publish: (view: HoldView) => void): HoldEngine 
 /** Null when all is well. A rejection is shown like a failure: the person must not read it as done. */
 async function outcomeWords(request: HoldRequest): Promise<string | null> {
   try {
-    const outcome = await request.onComplete();
-    return outcome?.type === 'failed' ? outcome.words : null;
+    const outcome: unknown = await request.onComplete();
+    return isFailure(outcome) ? outcome.words : null;
   } catch (error) {
     reportError(error);
     return request.failedWords;
   }
+}
+
+function isFailure(outcome: unknown): outcome is Extract<HoldOutcome, { type: 'failed' }> {
+  return typeof outcome === 'object' && outcome !== null && 'type' in outcome && outcome.type === 'failed';
 }

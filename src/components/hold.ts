@@ -10,7 +10,8 @@ export const HOLD_TRAVEL_PX = 12;
 /** What a completed hold came to. A failure is words for the person: what happened, what was kept, what to do. */
 export type HoldOutcome = { readonly type: 'settled' } | { readonly type: 'failed'; readonly words: string };
 
-export type HoldResult = void | HoldOutcome | Promise<void | HoldOutcome>;
+/** What a completed hold does. Without an outcome of its own it is settled when it returns, or when its promise resolves. */
+export type HoldWork = (() => void) | (() => Promise<void>) | (() => HoldOutcome | Promise<HoldOutcome>);
 
 export interface HoldView {
   /** 'writing': the time is over and the faces stand a hair apart until the work behind it is done. */

@@ -1,4 +1,5 @@
-export type KeypadKey = '0' | '1' | '2' | '3' | '4' | '5' | '6' | '7' | '8' | '9' | '.' | '-' | 'erase' | 'clear';
+export type KeypadKey =
+  '0' | '1' | '2' | '3' | '4' | '5' | '6' | '7' | '8' | '9' | '.' | '-' | 'erase' | 'clear';
 
 /** More figures than any gauge shows; it also keeps the text inside the display. */
 const MAX_LENGTH = 9;

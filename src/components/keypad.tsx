@@ -45,7 +45,17 @@ const FIGURES: readonly KeypadKey[] = ['7', '8', '9', '4', '5', '6', '1', '2', '
 
 /** The app's own number keys: never the system's, which would cover the figure and knows no unit. */
 export function Keypad(props: KeypadProps) {
-  const { label, initial, units, unit, words, decimal = '.', allowMinus = false, secret = false, refusal } = props;
+  const {
+    label,
+    initial,
+    units,
+    unit,
+    words,
+    decimal = '.',
+    allowMinus = false,
+    secret = false,
+    refusal,
+  } = props;
   const [typed, setTyped] = useState<string | null>(props.typed ?? null);
   const root = useRef<HTMLDivElement>(null);
   const text = typed ?? initial;

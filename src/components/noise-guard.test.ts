@@ -19,7 +19,11 @@ function run(events: readonly GuardEvent[], from: GuardState = initialGuard) {
   return { state, passed, cancelled, revived, noise };
 }
 
-const at = (type: 'down' | 'move' | 'up' | 'cancel', id: number, [t_ms, x_mm = 50, y_mm = 50]: readonly number[]): GuardEvent => ({
+const at = (
+  type: 'down' | 'move' | 'up' | 'cancel',
+  id: number,
+  [t_ms, x_mm = 50, y_mm = 50]: readonly number[],
+): GuardEvent => ({
   type,
   id,
   t_ms: t_ms ?? 0,
@@ -51,13 +55,23 @@ function shot(random: () => number, t_ms: number, count: number): GuardEvent[] {
 
 describe('what a person does', () => {
   it('lets a press and a slow double press through', () => {
-    const { passed, noise } = run([at('down', 1, [0]), at('up', 1, [90]), at('down', 2, [260]), at('up', 2, [350])]);
+    const { passed, noise } = run([
+      at('down', 1, [0]),
+      at('up', 1, [90]),
+      at('down', 2, [260]),
+      at('up', 2, [350]),
+    ]);
     expect(passed).toHaveLength(4);
     expect(noise).toBe(0);
   });
 
   it('lets two near fingers through', () => {
-    const { noise } = run([at('down', 1, [0, 10, 10]), at('down', 2, [30, 40, 10]), at('up', 1, [200]), at('up', 2, [220])]);
+    const { noise } = run([
+      at('down', 1, [0, 10, 10]),
+      at('down', 2, [30, 40, 10]),
+      at('up', 1, [200]),
+      at('up', 2, [220]),
+    ]);
     expect(noise).toBe(0);
   });
 });
@@ -122,7 +136,10 @@ describe('a steady press in the noise', () => {
   it('counts from when it is alone and 150 ms old', () => {
     const { revived, cancelled } = run([
       at('down', 1, [0]),
-      ...[20, 30, 40].flatMap((t, i) => [at('down', 10 + i, [t, 150, 90]), at('up', 10 + i, [t + 15, 150, 90])]),
+      ...[20, 30, 40].flatMap((t, i) => [
+        at('down', 10 + i, [t, 150, 90]),
+        at('up', 10 + i, [t + 15, 150, 90]),
+      ]),
       tick(100),
       tick(160),
     ]);
@@ -142,7 +159,12 @@ describe('a steady press in the noise', () => {
   });
 
   it('does not count while another contact is down', () => {
-    const { revived } = run([at('down', 1, [0]), at('down', 2, [10, 150, 90]), tick(300), at('up', 2, [400, 150, 90])]);
+    const { revived } = run([
+      at('down', 1, [0]),
+      at('down', 2, [10, 150, 90]),
+      tick(300),
+      at('up', 2, [400, 150, 90]),
+    ]);
     expect(revived).toEqual([{ id: 1, t_ms: 400 }]);
   });
 
@@ -150,7 +172,12 @@ describe('a steady press in the noise', () => {
     const random = dice(seed);
     const shots = Array.from({ length: 30 }, (_, i) => shot(random, 50 + i * 200, 4)).flat();
     const ticks = Array.from({ length: 600 }, (_, i) => tick(i * 10));
-    const { cancelled, revived, noise } = run([at('down', 1, [45, 60, 60]), ...shots, ...ticks, at('up', 1, [6100, 60, 60])]);
+    const { cancelled, revived, noise } = run([
+      at('down', 1, [45, 60, 60]),
+      ...shots,
+      ...ticks,
+      at('up', 1, [6100, 60, 60]),
+    ]);
     const counts_ms = revived.find((each) => each.id === 1)?.t_ms ?? 45;
     const taken = cancelled.lastIndexOf(1) >= 0 && !revived.some((each) => each.id === 1);
     expect(taken).toBe(false);

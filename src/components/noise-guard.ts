@@ -20,7 +20,13 @@ export const STORM_CANCELS = 3;
 export const STORM_MS = 1000;
 
 export type GuardEvent =
-  | { readonly type: 'down' | 'move' | 'up' | 'cancel'; readonly id: number; readonly t_ms: number; readonly x_mm: number; readonly y_mm: number }
+  | {
+      readonly type: 'down' | 'move' | 'up' | 'cancel';
+      readonly id: number;
+      readonly t_ms: number;
+      readonly x_mm: number;
+      readonly y_mm: number;
+    }
   | { readonly type: 'tick'; readonly t_ms: number };
 
 interface Contact {
@@ -36,7 +42,12 @@ interface Contact {
 export interface GuardState {
   readonly contacts: readonly Contact[];
   /** Contacts of the last 150 ms, whether they are still down or not. */
-  readonly recent: readonly { readonly id: number; readonly t_ms: number; readonly x_mm: number; readonly y_mm: number }[];
+  readonly recent: readonly {
+    readonly id: number;
+    readonly t_ms: number;
+    readonly x_mm: number;
+    readonly y_mm: number;
+  }[];
   readonly cancels_ms: readonly number[];
 }
 
@@ -84,11 +95,20 @@ function contactDown(state: GuardState, event: ContactEvent): GuardStep {
   const crowd = others.length + 1 > MOST_AT_ONCE;
   const apart = recent.some(
     (each) =>
-      each.id !== id && t_ms - each.t_ms <= FAR_APART_MS && Math.hypot(each.x_mm - x_mm, each.y_mm - y_mm) > FAR_APART_MM,
+      each.id !== id &&
+      t_ms - each.t_ms <= FAR_APART_MS &&
+      Math.hypot(each.x_mm - x_mm, each.y_mm - y_mm) > FAR_APART_MM,
   );
   const storm = inStorm(state.cancels_ms, t_ms);
   const noisy = burst || crowd || apart || storm;
-  const contact: Contact = { id, down_ms: t_ms, x_mm, y_mm, status: noisy ? 'suspect' : 'passed', moved: false };
+  const contact: Contact = {
+    id,
+    down_ms: t_ms,
+    x_mm,
+    y_mm,
+    status: noisy ? 'suspect' : 'passed',
+    moved: false,
+  };
   if (!noisy) return { state: { ...state, recent, contacts: [...others, contact] }, verdict: PASS };
 
   const young = (each: Contact): boolean => each.status === 'passed' && t_ms - each.down_ms <= BURST_MS;
@@ -99,7 +119,11 @@ function contactDown(state: GuardState, event: ContactEvent): GuardStep {
       recent,
       contacts: [
         ...others.map((each): Contact =>
-          young(each) ? { ...each, status: 'suspect' } : each.status === 'passed' ? { ...each, status: 'steady' } : each,
+          young(each)
+            ? { ...each, status: 'suspect' }
+            : each.status === 'passed'
+              ? { ...each, status: 'steady' }
+              : each,
         ),
         contact,
       ],
@@ -124,7 +148,8 @@ function contactEnd(state: GuardState, event: ContactEvent): GuardStep {
     event.type === 'cancel'
       ? [...state.cancels_ms.filter((at) => event.t_ms - at <= STORM_MS), event.t_ms]
       : state.cancels_ms;
-  const tooShort = event.type === 'up' && known.status === 'passed' && event.t_ms - known.down_ms < SHORTEST_CONTACT_MS;
+  const tooShort =
+    event.type === 'up' && known.status === 'passed' && event.t_ms - known.down_ms < SHORTEST_CONTACT_MS;
   const verdict: GuardVerdict =
     known.status === 'suspect'
       ? { ...PASS, pass: false }
@@ -137,7 +162,8 @@ function contactEnd(state: GuardState, event: ContactEvent): GuardStep {
 /** A suspect that is old enough, has not moved and is down alone is a finger that was there while the burst went by. */
 function reviveSteady(state: GuardState, t_ms: number, verdict: GuardVerdict): GuardStep {
   const [only, second] = state.contacts;
-  if (only === undefined || second !== undefined || only.status !== 'suspect' || only.moved) return { state, verdict };
+  if (only === undefined || second !== undefined || only.status !== 'suspect' || only.moved)
+    return { state, verdict };
   if (t_ms - only.down_ms < BURST_MS) return { state, verdict };
   return {
     state: { ...state, contacts: [{ ...only, status: 'steady' }] },

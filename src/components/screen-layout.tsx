@@ -19,7 +19,9 @@ export interface ScreenLayoutProps {
 export function ScreenLayout(props: ScreenLayoutProps) {
   const { strip, tooth, children, fields, thumbs, places, banner } = props;
   return (
-    <div className={`screen-layout${banner === undefined ? '' : ' with-banner'}${fields === undefined && thumbs === undefined ? ' wide' : ''}`}>
+    <div
+      className={`screen-layout${banner === undefined ? '' : ' with-banner'}${fields === undefined && thumbs === undefined ? ' wide' : ''}`}
+    >
       {strip}
       {tooth}
       <div className="screen-scroll">

@@ -23,7 +23,12 @@ export function SigmaScale({ sigma, span = 3, label, compact = false }: SigmaSca
     electrodePath({ ...FACE, x: 0, facing: 'right' }) +
     electrodePath({ ...FACE, x: WIDTH - FACE.width, facing: 'left' });
   return (
-    <svg className={`sigma-scale${compact ? ' compact' : ''}`} viewBox={`-6 0 ${WIDTH + 12} 50`} role="img" aria-label={label}>
+    <svg
+      className={`sigma-scale${compact ? ' compact' : ''}`}
+      viewBox={`-6 0 ${WIDTH + 12} 50`}
+      role="img"
+      aria-label={label}
+    >
       <path className="sigma-faces" d={faces} />
       {compact ? null : (
         <>

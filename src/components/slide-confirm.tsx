@@ -33,7 +33,11 @@ export function SlideConfirm({ label, to, onComplete, onCancel, cancelLabel }: S
     const box = track.current?.getBoundingClientRect();
     const own = event.currentTarget.getBoundingClientRect();
     if (box === undefined || grip.current !== null) return;
-    grip.current = { pointer: event.pointerId, x: event.clientX, room: Math.max(1, box.width - 2 * own.width) };
+    grip.current = {
+      pointer: event.pointerId,
+      x: event.clientX,
+      room: Math.max(1, box.width - 2 * own.width),
+    };
     event.currentTarget.setPointerCapture(event.pointerId);
   };
   const move = (event: PointerEvent): void => {

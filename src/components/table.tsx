@@ -19,7 +19,15 @@ export interface TableProps<Row> {
 }
 
 /** Figures in rows; the header stays while they scroll. */
-export function Table<Row>({ caption, hideCaption = true, columns, rows, rowKey, picked, foot }: TableProps<Row>) {
+export function Table<Row>({
+  caption,
+  hideCaption = true,
+  columns,
+  rows,
+  rowKey,
+  picked,
+  foot,
+}: TableProps<Row>) {
   return (
     <table className="figures">
       <caption className={hideCaption ? 'heard-only' : ''}>{caption}</caption>

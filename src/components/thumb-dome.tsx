@@ -1,5 +1,5 @@
 import { ElectrodeBody } from './electrode-body';
-import { HOLD_PIECES, type HoldKind, type HoldResult } from './hold';
+import { HOLD_PIECES, type HoldKind, type HoldWork } from './hold';
 import { useHold } from './use-hold';
 
 export interface ThumbDomeProps {
@@ -9,7 +9,7 @@ export interface ThumbDomeProps {
   readonly hold?: HoldKind;
   /** Stands in the strip while held; the label on one line when left out. */
   readonly holdLabel?: string;
-  readonly onComplete: () => HoldResult;
+  readonly onComplete: HoldWork;
   readonly failedWords?: string;
   readonly disabled?: boolean;
   /** Why it cannot be pressed, for whoever hears the screen. */

@@ -1,5 +1,5 @@
 import { useEffect, useRef, useState, type KeyboardEvent, type MouseEvent, type PointerEvent } from 'react';
-import { HOLD_TRAVEL_PX, type HoldKind, type HoldResult, type HoldView } from './hold';
+import { HOLD_TRAVEL_PX, type HoldKind, type HoldWork, type HoldView } from './hold';
 import { createHoldEngine, type HoldEngine } from './hold-engine';
 import { useHoldStage } from './hold-stage';
 
@@ -7,7 +7,7 @@ export interface HoldOptions {
   readonly kind: HoldKind;
   /** Stands in the strip while it is held. */
   readonly label: string;
-  readonly onComplete: () => HoldResult;
+  readonly onComplete: HoldWork;
   readonly failedWords?: string;
   readonly disabled?: boolean;
   /** Told at every frame, for a fill other than the strip's. */
@@ -127,7 +127,8 @@ function watchPointer(down: globalThis.PointerEvent, release: () => void): () =>
   on('pointerup', end);
   on('pointercancel', end);
   on('pointerdown', (event) => {
-    if (event.pointerId !== down.pointerId) others.set(event.pointerId, setTimeout(release, SECOND_POINTER_MS));
+    if (event.pointerId !== down.pointerId)
+      others.set(event.pointerId, setTimeout(release, SECOND_POINTER_MS));
   });
   on('blur', release);
   return stop;

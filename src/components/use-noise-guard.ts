@@ -12,7 +12,10 @@ export interface NoiseGuardOptions {
 /** Watches every contact before anything else sees it. Mouse and keyboard pass: a spark does not fake those. */
 export function useNoiseGuard({ onNoise, mm_px, enabled = true }: NoiseGuardOptions): void {
   const tell = useEffectEvent(onNoise);
-  useEffect(() => (enabled ? installNoiseGuard(window, { mm_px, onNoise: (count) => tell(count) }) : undefined), [enabled, mm_px]);
+  useEffect(
+    () => (enabled ? installNoiseGuard(window, { mm_px, onNoise: (count) => tell(count) }) : undefined),
+    [enabled, mm_px],
+  );
 }
 
 const KINDS = { pointerdown: 'down', pointermove: 'move', pointerup: 'up', pointercancel: 'cancel' } as const;

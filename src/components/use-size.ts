@@ -14,9 +14,7 @@ export function useSize(ref: RefObject<Element | null>): Size {
     const measure = (): void => {
       const box = element.getBoundingClientRect();
       setSize((was) =>
-        was.width === box.width && was.height === box.height
-          ? was
-          : { width: box.width, height: box.height },
+        was.width === box.width && was.height === box.height ? was : { width: box.width, height: box.height },
       );
     };
     measure();

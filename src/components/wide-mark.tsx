@@ -18,7 +18,14 @@ export interface WideMarkProps {
 const BLEED_PX = 20;
 
 /** The gap mark as wide as its place: what it says in words stands between the faces. */
-export function WideMark({ state, hatched = false, title, children, depth_mm = 19.2, solid = false }: WideMarkProps) {
+export function WideMark({
+  state,
+  hatched = false,
+  title,
+  children,
+  depth_mm = 19.2,
+  solid = false,
+}: WideMarkProps) {
   const outer = useRef<HTMLDivElement>(null);
   const inner = useRef<HTMLDivElement>(null);
   const { width, height } = useSize(outer);
@@ -29,17 +36,31 @@ export function WideMark({ state, hatched = false, title, children, depth_mm = 1
   const left = electrodePath({ ...body, x: -back, facing: 'right' });
   const right = electrodePath({ ...body, x: width - depth, facing: 'left' });
   return (
-    <div ref={outer} className={`wide-mark ${state}${solid ? ' solid' : ''}`} style={{ paddingInline: `min(${depth_mm} * var(--mm), 12vw)` }}>
+    <div
+      ref={outer}
+      className={`wide-mark ${state}${solid ? ' solid' : ''}`}
+      style={{ paddingInline: `min(${depth_mm} * var(--mm), 12vw)` }}
+    >
       <svg aria-hidden="true">
         {hatched ? (
           <>
-            <pattern id={id} width="19" height="19" patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
+            <pattern
+              id={id}
+              width="19"
+              height="19"
+              patternUnits="userSpaceOnUse"
+              patternTransform="rotate(45)"
+            >
               <path d="M3.5 0V19" stroke="var(--edge)" strokeWidth="7" />
             </pattern>
             <path d={left + right} fill={`url(#${id})`} className="wide-mark-hatch" />
           </>
         ) : null}
-        <path className={state === 'dashed' ? 'wide-mark-dash' : 'wide-mark-body'} d={left + right} fillOpacity={hatched ? 0.45 : 1} />
+        <path
+          className={state === 'dashed' ? 'wide-mark-dash' : 'wide-mark-body'}
+          d={left + right}
+          fillOpacity={hatched ? 0.45 : 1}
+        />
       </svg>
       <div ref={inner} className="wide-mark-words">
         <div>{title}</div>

@@ -12,7 +12,13 @@ export function BenchPage() {
       <div className="grid grid-cols-[590fr_260fr] max-sm:grid-cols-1 h-full">
         <div>
           <Pin label="Gap at 1.00 bar(g): breaks between">
-            <TwoFaces label="Between 16.7 and 24.3 kV, law 18.8" low="16.7" middle="18.8" high="24.3" unit="kV" />
+            <TwoFaces
+              label="Between 16.7 and 24.3 kV, law 18.8"
+              low="16.7"
+              middle="18.8"
+              high="24.3"
+              unit="kV"
+            />
           </Pin>
           <Pin label="Stored at the supply's limit, 25 kV and 1.5 mA" aside="0.88 J at 18.8 kV">
             <Reading value="1.56" unit="J" size="pin" />
@@ -89,8 +95,22 @@ function Thumbs() {
       label="Actions"
       main={<ThumbDome size="big" label={'Open\ncheck'} onComplete={() => undefined} />}
       others={[
-        <ThumbDome key="hands" critical label="Hands in" hold="second" holdLabel="Hold: hands in" onComplete={() => later(800)} />,
-        <ThumbDome key="down" critical label="Stand rig down" hold="second" holdLabel="Hold: stand Kettle down" onComplete={() => later(800)} />,
+        <ThumbDome
+          key="hands"
+          critical
+          label="Hands in"
+          hold="second"
+          holdLabel="Hold: hands in"
+          onComplete={() => later(800)}
+        />,
+        <ThumbDome
+          key="down"
+          critical
+          label="Stand rig down"
+          hold="second"
+          holdLabel="Hold: stand Kettle down"
+          onComplete={() => later(800)}
+        />,
       ]}
     />
   );

@@ -28,7 +28,14 @@ export function DeskPage() {
   return (
     <Frame
       place="firings"
-      strip={{ mark: 'dashed', ground: 'dash', title: 'Kettle, Heron, Wren', state: 'Not known from here: treat as charged', detail: 'last declared: Kettle shorted 16:12, Heron short off 16:20, Wren shorted yesterday', person: 'Milo Venn' }}
+      strip={{
+        mark: 'dashed',
+        ground: 'dash',
+        title: 'Kettle, Heron, Wren',
+        state: 'Not known from here: treat as charged',
+        detail: 'last declared: Kettle shorted 16:12, Heron short off 16:20, Wren shorted yesterday',
+        person: 'Milo Venn',
+      }}
     >
       <div className="pr-6 pt-6 pl-8 flex flex-col gap-6">
         <div className="grid grid-cols-6 gap-3">
@@ -80,7 +87,11 @@ export function DeskPage() {
             { key: 'n', head: 'No.', cell: (row) => row.number },
             { key: 'kv', head: 'kV', cell: (row) => row.kv },
             { key: 's', head: 'σ', cell: (row) => row.sigma.toFixed(1).replace('-', '−') },
-            { key: 'd', head: '', cell: (row) => <SigmaScale compact sigma={row.sigma} label={`${row.sigma.toFixed(1)} σ`} /> },
+            {
+              key: 'd',
+              head: '',
+              cell: (row) => <SigmaScale compact sigma={row.sigma} label={`${row.sigma.toFixed(1)} σ`} />,
+            },
             { key: 'l', head: 'looked', cell: (row) => row.looked, align: 'start' },
           ]}
           foot="Readings 19 to 27 of 31"

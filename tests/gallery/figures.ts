@@ -25,11 +25,17 @@ export const calibrationChart: ChartData = {
   x: { min: 0.75, max: 1.25, unit: 'bar(g)', decimals: 2 },
   y: { min: 15, max: 22, unit: 'kV', decimals: 1 },
   band: {
-    points: XS.filter((x) => x >= 0.74 && x <= 1.26).map((x) => ({ x, low: law(x) - 0.9, high: law(x) + 0.9 })),
+    points: XS.filter((x) => x >= 0.74 && x <= 1.26).map((x) => ({
+      x,
+      low: law(x) - 0.9,
+      high: law(x) + 0.9,
+    })),
     above: '',
     below: '',
   },
-  curves: [{ points: XS.filter((x) => x >= 0.74 && x <= 1.26).map((x) => ({ x, y: law(x) })), weight: 'thin' }],
+  curves: [
+    { points: XS.filter((x) => x >= 0.74 && x <= 1.26).map((x) => ({ x, y: law(x) })), weight: 'thin' },
+  ],
   point: { x: 1.02, low: law(1.02) - 0.9, high: law(1.02) + 0.9, y: 18.9, bare: true },
   readings: Array.from({ length: 46 }, (_, i) => {
     const x = [0.8, 0.85, 0.9, 0.95, 1, 1.02, 1.05, 1.1, 1.2][i % 9] ?? 1;
@@ -55,8 +61,10 @@ export const chartWords: ChartWords = {
   number: 'No.',
 };
 
-export const places: Place[] = ['Bench', 'Firings', 'Lookups', 'Checks', 'Rigs', 'Kit', 'Notes'].map((label) => ({
-  key: label.toLowerCase(),
-  label,
-  href: `#${label.toLowerCase()}`,
-}));
+export const places: Place[] = ['Bench', 'Firings', 'Lookups', 'Checks', 'Rigs', 'Kit', 'Notes'].map(
+  (label) => ({
+    key: label.toLowerCase(),
+    label,
+    href: `#${label.toLowerCase()}`,
+  }),
+);

@@ -23,18 +23,46 @@ const ROWS = [
 ] as const;
 
 export function FiringPage() {
-  const [arcs, setArcs] = useState<readonly string[]>(new URLSearchParams(window.location.search).has('arc') ? ['a'] : []);
+  const [arcs, setArcs] = useState<readonly string[]>(
+    new URLSearchParams(window.location.search).has('arc') ? ['a'] : [],
+  );
   const [looked, setLooked] = useState<'even' | 'surface' | 'none'>('even');
   return (
     <Frame
       place="firings"
-      strip={{ mark: 'jagged', ground: 'solid', title: 'Kettle', state: 'Firing', detail: 'open 38 min', person: 'Ada Brook', count: '61 to hand over', age_h: 38 / 60 }}
+      strip={{
+        mark: 'jagged',
+        ground: 'solid',
+        title: 'Kettle',
+        state: 'Firing',
+        detail: 'open 38 min',
+        person: 'Ada Brook',
+        count: '61 to hand over',
+        age_h: 38 / 60,
+      }}
       fields={<Fields />}
       thumbs={
         <ThumbZone
           label="Actions"
-          main={<ThumbDome size="big" label={'Hold\nto log'} hold="half-second" holdLabel="Hold: log reading" onComplete={() => later(700)} />}
-          others={[<ThumbDome key="close" critical label="Close firing" hold="second" holdLabel="Hold: close firing" onComplete={() => later(900)} />]}
+          main={
+            <ThumbDome
+              size="big"
+              label={'Hold\nto log'}
+              hold="half-second"
+              holdLabel="Hold: log reading"
+              onComplete={() => later(700)}
+            />
+          }
+          others={[
+            <ThumbDome
+              key="close"
+              critical
+              label="Close firing"
+              hold="second"
+              holdLabel="Hold: close firing"
+              onComplete={() => later(900)}
+            />,
+          ]}
         />
       }
     >
@@ -57,7 +85,9 @@ export function FiringPage() {
           arcs={arcs}
           even={looked === 'even'}
           length_mm={280}
-          onToggle={(key) => setArcs(arcs.includes(key) ? arcs.filter((each) => each !== key) : [...arcs, key])}
+          onToggle={(key) =>
+            setArcs(arcs.includes(key) ? arcs.filter((each) => each !== key) : [...arcs, key])
+          }
         />
         <Choice
           label="Looked"
@@ -88,7 +118,7 @@ export function FiringPage() {
                 cell: (row: readonly string[]) => row[i],
               }))}
               rows={ROWS}
-              rowKey={(row) => row[0] ?? ''}
+              rowKey={(row) => row[0]}
             />
           </div>
           <div className="flex-1 max-sm:h-60">
@@ -104,7 +134,17 @@ function Fields() {
   const nothing = (): void => undefined;
   return (
     <FieldColumn label="Reading">
-      <QuantityField label="Voltage" source="self-break" stepWords="by 0.1" value="18.9" unit="kV" onStep={nothing} onOpen={nothing} lessLabel="Less" moreLabel="More" />
+      <QuantityField
+        label="Voltage"
+        source="self-break"
+        stepWords="by 0.1"
+        value="18.9"
+        unit="kV"
+        onStep={nothing}
+        onOpen={nothing}
+        lessLabel="Less"
+        moreLabel="More"
+      />
       <FieldRow label="Pressure" source="gauge" value="1.02" unit="bar(g)" onPress={nothing} />
       <FieldRow label="Flow" source="carried over" value="3.0" unit="L/min" carried onPress={nothing} />
       <FieldRow label="Output" source="meter" value="150" unit="µJ" onPress={nothing} />

@@ -21,7 +21,12 @@ export function GapPage() {
           words={chartWords}
           slice={{
             high: { value: '24.3', unit: 'kV', words: 'may hold up to', note: 'with UV on the gap' },
-            low: { value: '16.7', unit: 'kV', words: 'nothing fires below', note: 'to hold off: stay below this' },
+            low: {
+              value: '16.7',
+              unit: 'kV',
+              words: 'nothing fires below',
+              note: 'to hold off: stay below this',
+            },
             middle: [
               { label: 'law', value: '18.8' },
               { label: 'own', value: '18.9' },
@@ -31,12 +36,12 @@ export function GapPage() {
         />
         <div className="gallery-says">
           <SaysBlock muted>
-            Law: near-uniform field in nitrogen, −11 to +29 % with UV, valid to 12 bar mm. Own: 46 self-breaks, ±0.3 kV.
-            Ambient 0.966 bar(abs).
+            Law: near-uniform field in nitrogen, −11 to +29 % with UV, valid to 12 bar mm. Own: 46
+            self-breaks, ±0.3 kV. Ambient 0.966 bar(abs).
           </SaysBlock>
           <Caution>
-            From 0.92 bar(g) the law’s high side is beyond the supply. This rig’s own curve says it fires. If it does not,
-            it sits charged.
+            From 0.92 bar(g) the law’s high side is beyond the supply. This rig’s own curve says it fires. If
+            it does not, it sits charged.
           </Caution>
         </div>
       </div>
@@ -48,7 +53,16 @@ function Fields() {
   const refusal = asked.get('refusal');
   return (
     <FieldColumn label="Inputs">
-      <FieldRow label="Gas" source="rig, rev 7" value={<>N<sub>2</sub></>} onPress={() => undefined} />
+      <FieldRow
+        label="Gas"
+        source="rig, rev 7"
+        value={
+          <>
+            N<sub>2</sub>
+          </>
+        }
+        onPress={() => undefined}
+      />
       <FieldRow label="Gap" source="rig, rev 7" value="3.0" unit="mm" onPress={() => undefined} />
       <QuantityField
         label="Pressure"

@@ -33,10 +33,29 @@ export function KeypadPage() {
             lessLabel="Less"
             moreLabel="More"
           />
-          <FieldRow label="Ambient" value={null} unit="bar(abs)" refusal="Enter the room's pressure." onPress={nothing} />
+          <FieldRow
+            label="Ambient"
+            value={null}
+            unit="bar(abs)"
+            refusal="Enter the room's pressure."
+            onPress={nothing}
+          />
         </FieldColumn>
       }
-      thumbs={<ThumbZone label="Actions" main={<ThumbDome size="big" label={'Hold\nto keep'} disabled reason="Enter the pressure first." onComplete={nothing} />} />}
+      thumbs={
+        <ThumbZone
+          label="Actions"
+          main={
+            <ThumbDome
+              size="big"
+              label={'Hold\nto keep'}
+              disabled
+              reason="Enter the pressure first."
+              onComplete={nothing}
+            />
+          }
+        />
+      }
     >
       <Keypad
         label="Pressure"
@@ -48,15 +67,34 @@ export function KeypadPage() {
         unit={unit}
         onUnit={setUnit}
         allowMinus
-        words={{ erase: 'Erase', clear: 'Clear', enter: 'Enter', cancel: 'Leave as it was', minus: 'minus', point: 'point', unit: 'Unit' }}
+        words={{
+          erase: 'Erase',
+          clear: 'Clear',
+          enter: 'Enter',
+          cancel: 'Leave as it was',
+          minus: 'minus',
+          point: 'point',
+          unit: 'Unit',
+        }}
         onEnter={nothing}
         onCancel={nothing}
       />
       <div className="px-5 py-3">
-        <SlideConfirm label="Slide to retire the part" to="Retire" cancelLabel="Keep it" onComplete={nothing} onCancel={nothing} />
+        <SlideConfirm
+          label="Slide to retire the part"
+          to="Retire"
+          cancelLabel="Keep it"
+          onComplete={nothing}
+          onCancel={nothing}
+        />
       </div>
       {open ? (
-        <Dialog title="A new version is ready" closeLabel="Later" onClose={() => setOpen(false)} actions={<ThumbDome label="Load it now" onComplete={nothing} />}>
+        <Dialog
+          title="A new version is ready"
+          closeLabel="Later"
+          onClose={() => setOpen(false)}
+          actions={<ThumbDome label="Load it now" onComplete={nothing} />}
+        >
           <p>No firing and no check is open. Loading takes a second; drafts are kept.</p>
         </Dialog>
       ) : null}

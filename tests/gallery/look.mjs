@@ -6,7 +6,10 @@ import { createServer } from 'vite';
 const [out = '/tmp/holdoff-gallery', ...shots] = process.argv.slice(2);
 mkdirSync(out, { recursive: true });
 
-const server = await createServer({ configFile: new URL('./vite.config.ts', import.meta.url).pathname, logLevel: 'error' });
+const server = await createServer({
+  configFile: new URL('./vite.config.ts', import.meta.url).pathname,
+  logLevel: 'error',
+});
 await server.listen();
 const browser = await chromium.launch({
   executablePath: '/usr/bin/chromium',

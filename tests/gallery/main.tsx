@@ -26,7 +26,10 @@ for (const setting of ['theme', 'hand', 'eyewear']) {
   if (value !== null) root.setAttribute(`data-${setting}`, value);
 }
 const scale = asked.get('scale');
-if (scale !== null) root.style.setProperty('--scale', scale);
+if (scale !== null) {
+  root.style.setProperty('--scale', scale);
+  if (Number(scale) > 1.3) root.setAttribute('data-large-text', '');
+}
 
 const name = asked.get('page') ?? 'gap';
 const Page = name in PAGES ? PAGES[name as keyof typeof PAGES] : GapPage;

@@ -26,11 +26,23 @@ export function ChartAxes({ data, layout, plot, font }: ChartAxesProps) {
   const xEnd = Math.min(layout.width, right + layout.wall + (layout.wall > 0 ? 0 : font * 0.3));
   return (
     <g className="chart-axes">
-      <path className="chart-ticks" d={marks(yTicks, (at, long) => `M${yEdge} ${plot.y.at(at)}h${-(long ? LONG_PX : SHORT_PX)}`)} />
-      <path className="chart-ticks" d={marks(xTicks, (at, long) => `M${plot.x.at(at)} ${xEdge}v${long ? LONG_PX + 2 : SHORT_PX}`)} />
+      <path
+        className="chart-ticks"
+        d={marks(yTicks, (at, long) => `M${yEdge} ${plot.y.at(at)}h${-(long ? LONG_PX : SHORT_PX)}`)}
+      />
+      <path
+        className="chart-ticks"
+        d={marks(xTicks, (at, long) => `M${plot.x.at(at)} ${xEdge}v${long ? LONG_PX + 2 : SHORT_PX}`)}
+      />
       {yTicks.map((tick) =>
         tick.label !== null && plot.y.at(tick.value) > top + font * 1.25 ? (
-          <text key={tick.value} className="muted-text" textAnchor="end" x={yEdge - labelGap} y={plot.y.at(tick.value) + font * 0.35}>
+          <text
+            key={tick.value}
+            className="muted-text"
+            textAnchor="end"
+            x={yEdge - labelGap}
+            y={plot.y.at(tick.value) + font * 0.35}
+          >
             {tick.label}
           </text>
         ) : null,
@@ -39,8 +51,15 @@ export function ChartAxes({ data, layout, plot, font }: ChartAxesProps) {
         {data.y.unit}
       </text>
       {xTicks.map((tick) =>
-        tick.label !== null && plot.x.at(tick.value) + tick.label.length * font * 0.3 < xEnd - unitWidth - font * 0.4 ? (
-          <text key={tick.value} className="muted-text" textAnchor="middle" x={plot.x.at(tick.value)} y={xEdge + font * 1.75}>
+        tick.label !== null &&
+        plot.x.at(tick.value) + tick.label.length * font * 0.3 < xEnd - unitWidth - font * 0.4 ? (
+          <text
+            key={tick.value}
+            className="muted-text"
+            textAnchor="middle"
+            x={plot.x.at(tick.value)}
+            y={xEdge + font * 1.75}
+          >
             {tick.label}
           </text>
         ) : null,
@@ -60,7 +79,11 @@ function marks(all: readonly Tick[], draw: (value: number, long: boolean) => str
 }
 
 /** What is allowed is the void between two bars. */
-function windowBars(plot: Plot, { min, max }: { readonly min: number; readonly max: number }, y: number): string {
+function windowBars(
+  plot: Plot,
+  { min, max }: { readonly min: number; readonly max: number },
+  y: number,
+): string {
   const from = Math.max(plot.left, Math.min(plot.right, plot.x.at(min)));
   const to = Math.max(from, Math.min(plot.right, plot.x.at(max)));
   return `M${plot.left} ${y}H${from}v8H${plot.left}ZM${plot.right} ${y}H${to}v8H${plot.right}Z`;

@@ -73,7 +73,8 @@ function stopAfterKey(key: string, stops: readonly number[], at: number | null):
   if (key === 'Escape') return null;
   if (key === 'Home') return stops[0];
   if (key === 'End') return stops.at(-1);
-  const step = key === 'ArrowRight' || key === 'ArrowUp' ? 1 : key === 'ArrowLeft' || key === 'ArrowDown' ? -1 : 0;
+  const step =
+    key === 'ArrowRight' || key === 'ArrowUp' ? 1 : key === 'ArrowLeft' || key === 'ArrowDown' ? -1 : 0;
   if (step === 0) return undefined;
   const here = at === null ? (step > 0 ? -1 : stops.length) : stops.indexOf(at);
   return stops[Math.max(0, Math.min(stops.length - 1, here + step))];
@@ -81,7 +82,8 @@ function stopAfterKey(key: string, stops: readonly number[], at: number | null):
 
 /** What is read off, when the screen has no words of its own for it. */
 export function plainWords(data: ChartData, values: CursorValues): string {
-  const write = (value: number, decimals = 1): string => formatFigure(value, { digits: { decimals }, rounding: 'nearest' });
+  const write = (value: number, decimals = 1): string =>
+    formatFigure(value, { digits: { decimals }, rounding: 'nearest' });
   const x = `${write(values.x, data.x.decimals ?? 2)}\u2009${data.x.unit}`;
   const { low, high } = values;
   const decimals = data.y.decimals ?? 1;
@@ -91,6 +93,8 @@ export function plainWords(data: ChartData, values: CursorValues): string {
       : [
           `${formatFigure(low, { digits: { decimals }, rounding: 'down' })} to ${formatFigure(high, { digits: { decimals }, rounding: 'up' })}`,
         ];
-  const single = [values.law, values.own].flatMap((value) => (value === undefined ? [] : [write(value, decimals)]));
+  const single = [values.law, values.own].flatMap((value) =>
+    value === undefined ? [] : [write(value, decimals)],
+  );
   return `${x}: ${[...interval, ...single].join(', ')}\u2009${data.y.unit}`;
 }

@@ -54,7 +54,15 @@ describe('bodies', () => {
   });
 
   it('leave out what is not finite', () => {
-    expect(linePath([{ x: 0, y: Number.NaN }, { x: 10, y: 100 }], plot)).toBe('M200 200');
+    expect(
+      linePath(
+        [
+          { x: 0, y: Number.NaN },
+          { x: 10, y: 100 },
+        ],
+        plot,
+      ),
+    ).toBe('M200 200');
   });
 });
 
@@ -99,7 +107,10 @@ describe('layout', () => {
   });
 
   it('puts the faces on the scale where the words leave room', () => {
-    expect(sliceFaces({ top: 32, bottom: 532 }, { high_px: 190, low_px: 330 }, least)).toEqual({ high: 190, low: 330 });
+    expect(sliceFaces({ top: 32, bottom: 532 }, { high_px: 190, low_px: 330 }, least)).toEqual({
+      high: 190,
+      low: 330,
+    });
   });
 
   it('keeps room for the words when the interval is narrow or at an end', () => {

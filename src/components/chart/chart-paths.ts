@@ -22,8 +22,14 @@ export function bandPaths(
   points: readonly BandPoint[],
   plot: Plot,
 ): { readonly above: string; readonly below: string; readonly highLine: string; readonly lowLine: string } {
-  const highLine = linePath(points.map(({ x, high }) => ({ x, y: high })), plot);
-  const lowLine = linePath(points.map(({ x, low }) => ({ x, y: low })), plot);
+  const highLine = linePath(
+    points.map(({ x, high }) => ({ x, y: high })),
+    plot,
+  );
+  const lowLine = linePath(
+    points.map(({ x, low }) => ({ x, y: low })),
+    plot,
+  );
   const first = points[0];
   const last = points.at(-1);
   if (first === undefined || last === undefined) return { above: '', below: '', highLine: '', lowLine: '' };
@@ -59,8 +65,14 @@ export function nearest(stops: readonly number[], x: number): number | undefined
 
 /** What the curves say at x, between their points by a straight line, and nothing outside their range. */
 export function valuesAt(data: ChartData, x: number): CursorValues {
-  const low = between((data.band?.points ?? []).map((p) => ({ x: p.x, y: p.low })), x);
-  const high = between((data.band?.points ?? []).map((p) => ({ x: p.x, y: p.high })), x);
+  const low = between(
+    (data.band?.points ?? []).map((p) => ({ x: p.x, y: p.low })),
+    x,
+  );
+  const high = between(
+    (data.band?.points ?? []).map((p) => ({ x: p.x, y: p.high })),
+    x,
+  );
   const law = between(data.law ?? [], x);
   const own = between(data.own?.points ?? [], x);
   return {

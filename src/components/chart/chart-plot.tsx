@@ -26,29 +26,49 @@ export function ChartPlot({ data, layout, plot, font, readOff }: ChartPlotProps)
         {band === null ? null : <path className="chart-body" d={band.above + band.below} />}
         {data.law === undefined ? null : <path className="chart-law" d={linePath(data.law, plot)} />}
       </g>
-      {data.point === undefined || data.point.bare === true ? null : <ReadOff {...{ plot, layout, font, readOff }} point={data.point} />}
+      {data.point === undefined || data.point.bare === true ? null : (
+        <ReadOff {...{ plot, layout, font, readOff }} point={data.point} />
+      )}
       <g clipPath={`url(#${id}p)`}>
         {data.limit === undefined ? null : (
           <path className="chart-limit" d={`M${left} ${plot.y.at(data.limit.y)}H${right}`} />
         )}
         {band === null ? null : <path className="chart-curve" d={band.highLine + band.lowLine} />}
         {(data.curves ?? []).map((curve, i) => (
-          <path key={i} className={curve.weight === 'thin' ? 'chart-thin' : 'chart-curve'} d={linePath(curve.points, plot)} />
+          <path
+            key={i}
+            className={curve.weight === 'thin' ? 'chart-thin' : 'chart-curve'}
+            d={linePath(curve.points, plot)}
+          />
         ))}
         {data.own === undefined ? null : <path className="chart-own" d={linePath(data.own.points, plot)} />}
       </g>
       <BandWords {...{ data, layout, plot, font }} />
       {data.limit === undefined ? null : (
-        <text className="chart-halo" textAnchor="end" x={right - font * 0.36} y={plot.y.at(data.limit.y) - font * 0.36}>
+        <text
+          className="chart-halo"
+          textAnchor="end"
+          x={right - font * 0.36}
+          y={plot.y.at(data.limit.y) - font * 0.36}
+        >
           {right - left < font * 10 ? (data.limit.short ?? data.limit.label) : data.limit.label}
         </text>
       )}
-      {data.own?.label === undefined ? null : <EndLabel points={data.own.points} label={data.own.label} {...{ plot, font }} />}
+      {data.own?.label === undefined ? null : (
+        <EndLabel points={data.own.points} label={data.own.label} {...{ plot, font }} />
+      )}
       {(data.curves ?? []).map((curve, i) =>
-        curve.label === undefined ? null : <EndLabel key={i} points={curve.points} label={curve.label} {...{ plot, font }} />,
+        curve.label === undefined ? null : (
+          <EndLabel key={i} points={curve.points} label={curve.label} {...{ plot, font }} />
+        ),
       )}
       {data.notValid === undefined ? null : (
-        <text className="muted-text" textAnchor="middle" x={(plot.x.at(data.notValid.from) + right) / 2} y={bottom - font * 0.6}>
+        <text
+          className="muted-text"
+          textAnchor="middle"
+          x={(plot.x.at(data.notValid.from) + right) / 2}
+          y={bottom - font * 0.6}
+        >
           {data.notValid.label}
         </text>
       )}
@@ -88,7 +108,13 @@ function BandWords({ data, layout, plot, font }: Omit<ChartPlotProps, 'readOff'>
  * Two lines carry the working point across to the axis, and on to the slice unless its words pushed the face away; one carries
  * it down.
  */
-function ReadOff({ point, plot, layout, font, readOff }: Omit<ChartPlotProps, 'data'> & { readonly point: BandPoint }) {
+function ReadOff({
+  point,
+  plot,
+  layout,
+  font,
+  readOff,
+}: Omit<ChartPlotProps, 'data'> & { readonly point: BandPoint }) {
   const x = plot.x.at(point.x);
   const high = plot.y.at(point.high);
   const low = plot.y.at(point.low);
@@ -119,18 +145,42 @@ function PointMark({ point, plot }: { readonly point: WorkingPoint; readonly plo
           electrodePath({ ...box, y: low, facing: 'up' })
         }
       />
-      {point.y === undefined ? null : <circle className="chart-dot" cx={box.x + 11} cy={plot.y.at(point.y)} r="6" />}
+      {point.y === undefined ? null : (
+        <circle className="chart-dot" cx={box.x + 11} cy={plot.y.at(point.y)} r="6" />
+      )}
     </>
   );
 }
 
-function Wall({ layout, font, label, id }: { readonly layout: ChartLayout; readonly font: number; readonly label: string; readonly id: string }) {
+function Wall({
+  layout,
+  font,
+  label,
+  id,
+}: {
+  readonly layout: ChartLayout;
+  readonly font: number;
+  readonly label: string;
+  readonly id: string;
+}) {
   return (
     <>
-      <pattern id={`${id}w`} width="12" height="12" patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
+      <pattern
+        id={`${id}w`}
+        width="12"
+        height="12"
+        patternUnits="userSpaceOnUse"
+        patternTransform="rotate(45)"
+      >
         <path className="chart-hatch" d="M0 0V12" />
       </pattern>
-      <rect x={layout.right} y={layout.top} width={layout.wall} height={layout.bottom - layout.top} fill={`url(#${id}w)`} />
+      <rect
+        x={layout.right}
+        y={layout.top}
+        width={layout.wall}
+        height={layout.bottom - layout.top}
+        fill={`url(#${id}w)`}
+      />
       <text textAnchor="end" x={layout.right + layout.wall} y={layout.top - font * 0.4}>
         {label}
       </text>
@@ -138,17 +188,41 @@ function Wall({ layout, font, label, id }: { readonly layout: ChartLayout; reado
   );
 }
 
-function EndLabel({ points, label, plot, font }: { readonly points: readonly { x: number; y: number }[]; readonly label: string; readonly plot: Plot; readonly font: number }) {
+function EndLabel({
+  points,
+  label,
+  plot,
+  font,
+}: {
+  readonly points: readonly { x: number; y: number }[];
+  readonly label: string;
+  readonly plot: Plot;
+  readonly font: number;
+}) {
   const last = points.at(-1);
   if (last === undefined) return null;
   return (
-    <text className="chart-halo" x={Math.min(plot.x.at(last.x) + 6, plot.right - label.length * font * 0.5)} y={plot.y.at(last.y) - font * 0.4}>
+    <text
+      className="chart-halo"
+      x={Math.min(plot.x.at(last.x) + 6, plot.right - label.length * font * 0.5)}
+      y={plot.y.at(last.y) - font * 0.4}
+    >
       {label}
     </text>
   );
 }
 
-function Span({ span, plot, font, top }: { readonly span: { readonly from: number; readonly to: number; readonly label: string }; readonly plot: Plot; readonly font: number; readonly top: number }) {
+function Span({
+  span,
+  plot,
+  font,
+  top,
+}: {
+  readonly span: { readonly from: number; readonly to: number; readonly label: string };
+  readonly plot: Plot;
+  readonly font: number;
+  readonly top: number;
+}) {
   const from = plot.x.at(span.from);
   const to = plot.x.at(span.to);
   const body = { y: top, height: font * 1.2, width: font * 1.6, edge: 3, sagitta: 1.5 };
@@ -156,7 +230,10 @@ function Span({ span, plot, font, top }: { readonly span: { readonly from: numbe
     <>
       <path
         className="chart-body"
-        d={electrodePath({ ...body, x: from - body.width, facing: 'right' }) + electrodePath({ ...body, x: to, facing: 'left' })}
+        d={
+          electrodePath({ ...body, x: from - body.width, facing: 'right' }) +
+          electrodePath({ ...body, x: to, facing: 'left' })
+        }
       />
       <text textAnchor="middle" x={(from + to) / 2} y={top + font * 0.95}>
         {span.label}
@@ -165,7 +242,15 @@ function Span({ span, plot, font, top }: { readonly span: { readonly from: numbe
   );
 }
 
-function Readings({ data, plot, font }: { readonly data: ChartData; readonly plot: Plot; readonly font: number }) {
+function Readings({
+  data,
+  plot,
+  font,
+}: {
+  readonly data: ChartData;
+  readonly plot: Plot;
+  readonly font: number;
+}) {
   return (
     <>
       {(data.readings ?? []).map((reading, i) => {

@@ -15,13 +15,23 @@ export function ChartSlice({ slice, place }: ChartSliceProps) {
   const box =
     place === null || beside === null
       ? {}
-      : { left: beside.left, width: beside.right - beside.left, top: place.layout.top, height: place.layout.bottom - place.layout.top };
+      : {
+          left: beside.left,
+          width: beside.right - beside.left,
+          top: place.layout.top,
+          height: place.layout.bottom - place.layout.top,
+        };
   const upper = place === null ? {} : { height: place.high - place.layout.top };
   const lower = place === null ? {} : { height: place.layout.bottom - place.low };
   return (
     <div className={`chart-slice${place === null ? ' stacked' : ''}`} style={box}>
       <div className="slice-body upper" style={upper}>
-        <ElectrodeBody facing="down" rim={slice.lean === 'high' ? 'face' : 'none'} edge={0.05} sagitta={0.031} />
+        <ElectrodeBody
+          facing="down"
+          rim={slice.lean === 'high' ? 'face' : 'none'}
+          edge={0.05}
+          sagitta={0.031}
+        />
         <span className="slice-words">{slice.high.words}</span>
         <SliceFigure face={slice.high} lean={slice.lean === 'high'} />
       </div>

@@ -16,15 +16,23 @@ const MOST_ROWS = 40;
 export function ChartTable({ title, data, words }: ChartTableProps) {
   const stops = cursorStops(data);
   const every = Math.max(1, Math.ceil(stops.length / MOST_ROWS));
-  const rows = stops.filter((_, i) => i % every === 0 || i === stops.length - 1).map((x) => valuesAt(data, x));
+  const rows = stops
+    .filter((_, i) => i % every === 0 || i === stops.length - 1)
+    .map((x) => valuesAt(data, x));
   const xDecimals = data.x.decimals ?? 2;
   const yDecimals = data.y.decimals ?? 1;
-  const column = (key: 'low' | 'high' | 'law' | 'own', head: string, rounding: Rounding): Column<CursorValues> => ({
+  const column = (
+    key: 'low' | 'high' | 'law' | 'own',
+    head: string,
+    rounding: Rounding,
+  ): Column<CursorValues> => ({
     key,
     head: `${head}, ${data.y.unit}`,
     cell: (row) => {
       const value = row[key];
-      return value === undefined ? '\u2013' : formatFigure(value, { digits: { decimals: yDecimals }, rounding });
+      return value === undefined
+        ? '\u2013'
+        : formatFigure(value, { digits: { decimals: yDecimals }, rounding });
     },
   });
   const columns: Column<CursorValues>[] = [
@@ -52,8 +60,12 @@ export function ChartTable({ title, data, words }: ChartTableProps) {
   );
 }
 
-function readingColumns(data: ChartData, words: ChartWords): Column<ChartReading & { readonly key: string }>[] {
-  const write = (value: number, decimals: number): string => formatFigure(value, { digits: { decimals }, rounding: 'nearest' });
+function readingColumns(
+  data: ChartData,
+  words: ChartWords,
+): Column<ChartReading & { readonly key: string }>[] {
+  const write = (value: number, decimals: number): string =>
+    formatFigure(value, { digits: { decimals }, rounding: 'nearest' });
   return [
     { key: 'number', head: words.number, cell: (row) => row.number ?? '' },
     { key: 'x', head: data.x.unit, cell: (row) => write(row.x, data.x.decimals ?? 2) },

@@ -27,7 +27,7 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
   const box = useRef<HTMLDivElement>(null);
   const probes = useRef<HTMLSpanElement>(null);
   const size = useSize(box);
-  const fonts = useFonts(probes, size);
+  const fonts = useFonts(probes);
   const [at, setAt] = useState<number | null>(null);
   const [asTable, setAsTable] = useState(false);
 
@@ -64,7 +64,12 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
       ? sliceFaces(layout, { high_px: plot.y.at(data.point.high), low_px: plot.y.at(data.point.low) }, least)
       : null;
   // Stacked above the plot, the slice leaves it a height of its own.
-  const minHeight = least === null ? (slice === undefined ? {} : { minHeight: font * 12 }) : { minHeight: least.high + least.low + least.void + layout.top + font * 2.7 };
+  const minHeight =
+    least === null
+      ? slice === undefined
+        ? {}
+        : { minHeight: font * 12 }
+      : { minHeight: least.high + least.low + least.void + layout.top + font * 2.7 };
   const height = height_mm === undefined ? {} : { height: `calc(${height_mm} * var(--mm))` };
 
   return (
@@ -84,7 +89,9 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
               <ChartPlot data={walled} {...{ layout, plot, font }} readOff={faces} />
               <ChartAxes data={walled} {...{ layout, plot, font }} />
             </svg>
-            {slice !== undefined && faces !== null ? <ChartSlice slice={slice} place={{ layout, ...faces }} /> : null}
+            {slice !== undefined && faces !== null ? (
+              <ChartSlice slice={slice} place={{ layout, ...faces }} />
+            ) : null}
             <ChartCursor
               label={title}
               data={walled}

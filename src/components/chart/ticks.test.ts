@@ -40,7 +40,15 @@ describe('engineering ticks', () => {
 
   it('marks decades on a log axis and 2 and 5 where there is room', () => {
     expect(labels({ min: 1, max: 100, unit: '', kind: 'log' }, 3)).toEqual(['1', '10', '100']);
-    expect(labels({ min: 0.1, max: 10, unit: '', kind: 'log' }, 8)).toEqual(['0.1', '0.2', '0.5', '1', '2', '5', '10']);
+    expect(labels({ min: 0.1, max: 10, unit: '', kind: 'log' }, 8)).toEqual([
+      '0.1',
+      '0.2',
+      '0.5',
+      '1',
+      '2',
+      '5',
+      '10',
+    ]);
   });
 
   it('gives none for an axis without length', () => {

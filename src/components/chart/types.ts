@@ -75,7 +75,11 @@ export interface ChartData {
   readonly law?: readonly Point[];
   /** Heavy, over the range in which it was measured. */
   readonly own?: { readonly points: readonly Point[]; readonly label?: string };
-  readonly curves?: readonly { readonly points: readonly Point[]; readonly weight: 'thin' | 'curve'; readonly label?: string }[];
+  readonly curves?: readonly {
+    readonly points: readonly Point[];
+    readonly weight: 'thin' | 'curve';
+    readonly label?: string;
+  }[];
   /** The short label stands where the plot is narrow. */
   readonly limit?: { readonly y: number; readonly label: string; readonly short?: string };
   /** Nothing is drawn beyond it. */

@@ -15,23 +15,33 @@ interface Face {
 }
 
 /** The shipped faces: what the style sheet promises for each, and what the file holds. */
-const faces: readonly Face[] = [...readFileSync(path.join(here, 'fonts.css'), 'utf8').matchAll(/@font-face\s*{([^}]*)}/g)].map(
-  ([, body = '']) => {
-    const url = /url\('([^']+)'\)/.exec(body)?.[1] ?? '';
-    const file = url.startsWith('.') ? path.join(here, url) : path.join(modules, url);
-    return { file, range: rangeOf(/unicode-range:([^;]+);/.exec(body)?.[1] ?? ''), holds: characterMap(readFileSync(file)) };
-  },
-);
+const faces: readonly Face[] = [
+  ...readFileSync(path.join(here, 'fonts.css'), 'utf8').matchAll(/@font-face\s*{([^}]*)}/g),
+].map(([, body = '']) => {
+  const url = /url\('([^']+)'\)/.exec(body)?.[1] ?? '';
+  const file = url.startsWith('.') ? path.join(here, url) : path.join(modules, url);
+  return {
+    file,
+    range: rangeOf(/unicode-range:([^;]+);/.exec(body)?.[1] ?? ''),
+    holds: characterMap(readFileSync(file)),
+  };
+});
 
 describe('shipped faces', () => {
-  it.each(faces.map((face) => [path.basename(face.file), face] as const))('%s holds all that its range promises', (_name, face) => {
-    const missing = [...face.range].filter((code) => !face.holds.has(code)).map((code) => `U+${code.toString(16)}`);
-    expect(face.range.size).toBeGreaterThan(10);
-    expect(missing).toEqual([]);
-  });
+  it.each(faces.map((face) => [path.basename(face.file), face] as const))(
+    '%s holds all that its range promises',
+    (_name, face) => {
+      const missing = [...face.range]
+        .filter((code) => !face.holds.has(code))
+        .map((code) => `U+${code.toString(16)}`);
+      expect(face.range.size).toBeGreaterThan(10);
+      expect(missing).toEqual([]);
+    },
+  );
 
   it('cover the signs that the trade writes', () => {
-    for (const sign of 'µμΩΔσταβγηλπρφ√≤≥≈→±×·°²³−\u2009\u202f\u00a0–…’') expect(isCovered(sign), sign).toBe(true);
+    for (const sign of 'µμΩΔσταβγηλπρφ√≤≥≈→±×·°²³−\u2009\u202f\u00a0–…’')
+      expect(isCovered(sign), sign).toBe(true);
   });
 
   it('do not cover what no file holds', () => {
@@ -60,7 +70,8 @@ function isCovered(sign: string): boolean {
 function rangeOf(text: string): ReadonlySet<number> {
   const codes = new Set<number>();
   for (const [, from = '', to] of text.matchAll(/U\+([0-9A-F]+)(?:-([0-9A-F]+))?/gi)) {
-    for (let code = Number.parseInt(from, 16); code <= Number.parseInt(to ?? from, 16); code += 1) codes.add(code);
+    for (let code = Number.parseInt(from, 16); code <= Number.parseInt(to ?? from, 16); code += 1)
+      codes.add(code);
   }
   return codes;
 }
@@ -78,7 +89,12 @@ function sourceFiles(folder: string): string[] {
 function stringsOf(file: string): string[] {
   const found: string[] = [];
   const visit = (node: ts.Node): void => {
-    if (ts.isStringLiteralLike(node) || ts.isTemplateHead(node) || ts.isTemplateMiddleOrTemplateTail(node) || ts.isJsxText(node)) {
+    if (
+      ts.isStringLiteralLike(node) ||
+      ts.isTemplateHead(node) ||
+      ts.isTemplateMiddleOrTemplateTail(node) ||
+      ts.isJsxText(node)
+    ) {
       found.push(node.text);
     }
     ts.forEachChild(node, visit);
@@ -137,7 +153,8 @@ function readCmap(table: Buffer): ReadonlySet<number> {
     if (format === 12) {
       for (let g = 0; g < table.readUInt32BE(at + 12); g += 1) {
         const group = at + 16 + 12 * g;
-        for (let code = table.readUInt32BE(group); code <= table.readUInt32BE(group + 4); code += 1) codes.add(code);
+        for (let code = table.readUInt32BE(group); code <= table.readUInt32BE(group + 4); code += 1)
+          codes.add(code);
       }
     }
   }
