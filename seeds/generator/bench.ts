@@ -1,11 +1,10 @@
 import type { SealedEntry, Verdict } from '../../src/domain/book/entry';
 import type { Kind } from '../../src/domain/book/kinds';
-import { GENESIS_HASH } from '../../src/domain/book/ids';
 import { PUSH_MAX_BYTES, PUSH_MAX_ENTRIES } from '../../src/domain/handover/wire';
 import { DEMO_LAB, DEMO_TABLETS, type DemoTablet } from '../lab';
 import { ADA, INGE, MILO } from '../people';
 import type { Dice } from './dice';
-import { createMemoryBook, type MemoryBook, type Outcome } from './memory-book';
+import { createMemoryBook, type BookStart, type MemoryBook, type Outcome } from './memory-book';
 import { createTablet, type Writing, type WritingTablet } from './tablet';
 
 /** Entries as one tablet sent them under one person's own session. */
@@ -50,10 +49,10 @@ export const GRANTED: readonly string[] = [ADA.id, MILO.id, INGE.id];
 
 const HANDOVER_DELAY_MS = 4000;
 
-export function createBench(epoch: string, dice: Dice): Bench {
-  const book = createMemoryBook(epoch, new Map(DEMO_TABLETS.map(({ id }) => [id, GRANTED])));
-  const base = { epoch, revision: 0, hash: GENESIS_HASH };
-  const setting = { lab: DEMO_LAB.id, zone: DEMO_LAB.zone, dice, base };
+export function createBench(start: Omit<BookStart, 'grants'>, dice: Dice): Bench {
+  const grants = new Map(DEMO_TABLETS.map(({ id }) => [id, GRANTED]));
+  const book = createMemoryBook({ ...start, grants });
+  const setting = { lab: DEMO_LAB.id, zone: DEMO_LAB.zone, dice, base: book.head() };
   const tablets = new Map(DEMO_TABLETS.map((facts) => [facts.id, createTablet(facts, setting)]));
   const batches: Batch[] = [];
   const onPurpose = new Map<string, OnPurpose>();

@@ -20,13 +20,17 @@ import { HERON } from '../rigs/heron';
 import { KETTLE } from '../rigs/kettle';
 import { WREN } from '../rigs/wren';
 import { requireExpected } from './bench';
-import { generateMonth, type DemoMonth } from './generate-month';
+import { DEMO_SEED, foundingTime, generateMonth, type DemoMonth } from './generate-month';
+import { pretendFounding } from './pretend-founding';
 import { selfBreakOf } from './self-break-law';
 
 const DAY_MS = 86_400_000;
 const epoch = uuidFromBytes(new Uint8Array(16));
 const NOW_MS = Date.UTC(2026, 4, 20, 8, 30);
-const month = generateMonth({ now_ms: NOW_MS, epoch });
+const founding = pretendFounding(epoch, foundingTime(NOW_MS));
+const generate = (now_ms: number, seed = DEMO_SEED) =>
+  generateMonth({ now_ms, epoch, founding: pretendFounding(epoch, foundingTime(now_ms)), seed });
+const month = generate(NOW_MS);
 
 const entriesOf = ({ batches }: DemoMonth) => batches.flatMap(({ entries }) => entries);
 const outcomesOf = ({ batches }: DemoMonth) => batches.flatMap(({ outcomes }) => outcomes);
@@ -46,8 +50,8 @@ const freshTablet = {
 
 describe('a month of the demo lab', () => {
   it('comes out the same from the same seed, byte for byte, and otherwise from another', () => {
-    const again = generateMonth({ now_ms: NOW_MS, epoch });
-    const other = generateMonth({ now_ms: NOW_MS, epoch, seed: 7 });
+    const again = generate(NOW_MS);
+    const other = generate(NOW_MS, 7);
     const shas = (one: DemoMonth) => entriesOf(one).map(({ entry_sha }) => entry_sha);
     expect(shas(again)).toEqual(shas(month));
     expect(again.book.head()).toEqual(month.book.head());
@@ -63,7 +67,7 @@ describe('a month of the demo lab', () => {
     ['after clocks went back', Date.UTC(2026, 10, 3, 12)],
     ['at the turn of the year', Date.UTC(2027, 0, 2, 0, 30)],
   ])('is met as planned %s', (_when, now_ms) => {
-    const one = generateMonth({ now_ms, epoch });
+    const one = generate(now_ms);
     expect(outcomesOf(one)).toHaveLength(entriesOf(month).length);
     const last = one.batches.at(-1)!;
     expect(last.received_ms).toBeLessThan(now_ms);
@@ -98,7 +102,7 @@ describe('a month of the demo lab', () => {
 
   it('is made of whole entries, numbered without a gap on each tablet, in batches that a server takes', () => {
     const seqs = new Map<string, number>();
-    let revision = 0;
+    let revision = founding.length;
     for (const { tablet, session, entries, outcomes } of month.batches) {
       expect(entries.length).toBeLessThanOrEqual(PUSH_MAX_ENTRIES);
       expect(JSON.stringify({ entries }).length).toBeLessThanOrEqual(PUSH_MAX_BYTES);
@@ -116,6 +120,8 @@ describe('a month of the demo lab', () => {
 
   it('gives the same documents when its entries are folded again with their verdicts', () => {
     const documents = new Map<string, Document>();
+    for (const { entry, verdict, reason, revision } of founding)
+      runEffect(foldEntry(entry, { verdict, reason, revision }), mapStore(documents));
     for (const { entries, outcomes } of month.batches) {
       for (const [at, entry] of entries.entries())
         runEffect(foldEntry(entry, outcomes[at]!), mapStore(documents));

@@ -19,6 +19,15 @@ export interface Outcome {
   readonly reason: Reason | null;
 }
 
+/** A judged entry with which a Book begins: its server founded it, so the judge never saw the first one. */
+export interface FoundingEntry {
+  readonly entry: SealedEntry;
+  readonly revision: number;
+  readonly verdict: Verdict;
+  readonly reason: Reason | null;
+  readonly chain_hash: string;
+}
+
 /** A Book in memory, judged, folded and chained by the domain alone. */
 export interface MemoryBook {
   readonly head: () => Base;
@@ -27,11 +36,21 @@ export interface MemoryBook {
   readonly take: (entry: SealedEntry, by: { readonly session: string; readonly now_ms: number }) => Outcome;
 }
 
-/** Starts empty. `grants` are the people who have signed in on a tablet, by tablet. */
-export function createMemoryBook(epoch: string, grants: ReadonlyMap<string, readonly string[]>): MemoryBook {
+export interface BookStart {
+  readonly epoch: string;
+  readonly founding: readonly FoundingEntry[];
+  /** The people who have signed in on a tablet, by tablet. */
+  readonly grants: ReadonlyMap<string, readonly string[]>;
+}
+
+export function createMemoryBook({ epoch, founding, grants }: BookStart): MemoryBook {
   const documents = new Map<string, Document>();
   const store = mapStore(documents);
   let head: Base = { epoch, revision: 0, hash: GENESIS_HASH };
+  for (const { entry, revision, verdict, reason, chain_hash } of founding) {
+    runEffect(foldEntry(entry, { verdict, reason, revision }), store);
+    head = { epoch, revision, hash: chain_hash };
+  }
   return {
     head: () => head,
     doc: (kind, id) => runEffect(getDoc(kind, id), store),

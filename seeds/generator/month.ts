@@ -15,7 +15,7 @@ import {
 } from './bench-life';
 import { fireRig, type FiringPlan } from './fire-rig';
 import { answerIncident, reportFlashover, returnRig } from './incident';
-import { createRig, foundLab } from './people-and-sheets';
+import { bringInCrew, createRig } from './people-and-sheets';
 import { reviewFirings } from './review-firings';
 import { grantPermit, reviseRig } from './revisions-and-permits';
 import type { Weather } from './weather';
@@ -45,7 +45,7 @@ export function planMonth(bench: Bench, lastDay: WorkingDay): readonly Appointme
   const review = () => () => reviewFirings(bench, waiting);
 
   return [
-    [0, 830, () => foundLab(bench)],
+    [0, 830, () => bringInCrew(bench)],
     [0, 900, create(KETTLE)],
     [0, 930, create(HERON)],
     [0, 1100, permit(KETTLE)],

@@ -1,18 +1,16 @@
 import type { WorkingDay } from './working-days';
-import { BENCH_TABLET, DEMO_LAB, DEMO_LAB_SETTINGS, DESK_TABLET } from '../lab';
+import { BENCH_TABLET, DESK_TABLET } from '../lab';
 import { ADA, DEMO_PEOPLE, INGE, MILO } from '../people';
 import type { DemoRig } from '../rigs/demo-rig';
 import { DEMO_SHEETS } from '../sheets/demo-sheets';
 import type { Bench } from './bench';
 
-/** The lab begins: its lead founds it and brings the others in, and the check sheets are published. */
-export function foundLab(bench: Bench): void {
-  for (const { id, name, role } of DEMO_PEOPLE) {
+/** Inge, who founded the lab, brings the others in, and Milo publishes the check sheets. */
+export function bringInCrew(bench: Bench): void {
+  for (const { id, name, role } of DEMO_PEOPLE.filter((one) => one !== INGE)) {
     bench.pass(40);
     bench.write(DESK_TABLET, 'person.joined', { author: INGE.id, subject: id, body: { name, role } });
   }
-  bench.pass(300);
-  bench.write(DESK_TABLET, 'lab.set', { author: INGE.id, subject: DEMO_LAB.id, body: DEMO_LAB_SETTINGS });
   for (const { id, spec } of Object.values(DEMO_SHEETS)) {
     bench.pass(120);
     bench.write(DESK_TABLET, 'sheet.published', { author: MILO.id, id, body: { spec, replaces: null } });

@@ -86,23 +86,13 @@ function* authorObjection(entry: ReadableEntry): Effect<Objection | null> {
     return objection('author-open', 'This needs an author.');
   }
   const person = yield* getDoc('person', author);
-  if (person === undefined) {
-    return (yield* foundsLab(entry))
-      ? null
-      : objection('not-a-member', 'The author is not a member of this lab.');
-  }
+  if (person === undefined) return objection('not-a-member', 'The author is not a member of this lab.');
   if (mayAppend(person.role, entry.kind)) return null;
   const words =
     person.role === null
       ? 'The author was removed from this lab.'
       : `The role ${person.role} does not include this.`;
   return objection('role', words, person.role_set.at);
-}
-
-/** A new lab has nobody who could bring anybody in: whoever joins first, by themself and as lead, founds it. */
-function* foundsLab({ kind, meta, body }: ReadableEntry): Effect<boolean> {
-  if (kind !== 'person.joined' || meta.author !== meta.subject || body.role !== 'lead') return false;
-  return (yield* getDoc('crew', meta.lab)) === undefined;
 }
 
 function* kindObjection(entry: ReadableEntry, context: JudgeContext): Effect<Objection | null> {
