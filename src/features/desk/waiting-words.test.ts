@@ -47,6 +47,14 @@ describe('what waits at the Desk', () => {
     });
   });
 
+  it('leads from an irregular entry of no firing to its rig', () => {
+    expect(pair({ type: 'irregular', kind: 'rig.revised', number: null, words: 'role' })).toMatchObject({
+      title: 'Irregular entry',
+      substance: 'Kettle, Rig revised: role',
+      href: '/desk/rigs/kettle',
+    });
+  });
+
   it('leaves an author open who was left open', () => {
     expect(pair({ type: 'incident', by: null, words: 'stayed charged' }).by).toBe('author open');
   });

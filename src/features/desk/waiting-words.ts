@@ -33,7 +33,7 @@ export function waitingPair(
 ): WaitingPair {
   return {
     key: `${item.type}/${item.id}`,
-    title: TITLES[item.type],
+    title: item.type === 'irregular' && item.kind !== null ? 'Irregular entry' : TITLES[item.type],
     substance: shorten(substance(item)),
     by: item.by === null ? 'author open' : (people[item.by] ?? 'somebody'),
     age: ageWords(Math.max(0, now_ms - item.received_ms)),
@@ -55,6 +55,7 @@ function substance(item: WaitingItem): string {
     case 'unready':
       return `${rig}${number}: ${item.words}`;
     case 'irregular':
+      if (item.kind !== null) return `${rig}, ${kindWords(item.kind)}: ${item.words}`;
       return `${rig}${number}, ${item.irregular} of ${counted(item.count, 'reading')}`;
     case 'firing':
       return `${rig}${number}, ${counted(item.count, 'reading')}`;
@@ -71,8 +72,11 @@ function substance(item: WaitingItem): string {
 
 function hrefOf(item: WaitingItem): string {
   switch (item.type) {
-    case 'unready':
     case 'irregular':
+      // An irregular entry of no firing names its kind, and is read where its rig is.
+      if (item.kind !== null) return item.rig === null ? paths.desk() : paths.deskRig(item.rig);
+      return paths.deskFiring(item.id);
+    case 'unready':
     case 'firing':
       return paths.deskFiring(item.id);
     case 'held-back':

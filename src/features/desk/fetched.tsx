@@ -1,0 +1,23 @@
+import { useNow } from '../../data/use-now';
+import { agoWords } from '../../domain/report/time-words';
+import type { DeskAnswer } from './use-desk-query';
+
+/** Silent while answers come in; without a network it says what this is and how old. */
+export function Fetched({ answer }: { readonly answer: DeskAnswer<unknown> }) {
+  const { stamp } = useNow(10_000);
+  if (answer.words === null) {
+    return answer.data === undefined ? <p className="muted">Asking the server.</p> : null;
+  }
+  const age =
+    answer.fetched_ms === 0
+      ? 'Nothing was fetched on this tablet before.'
+      : `What stands here was fetched ${agoWords(Math.max(0, stamp.wall_ms - answer.fetched_ms))}.`;
+  return (
+    <p role="status">
+      {answer.words} <span className="muted">{age}</span>{' '}
+      <button type="button" className="underline" onClick={answer.refetch}>
+        Ask again
+      </button>
+    </p>
+  );
+}

@@ -1,0 +1,40 @@
+import { useQuery } from '@tanstack/react-query';
+import { createContext, use } from 'react';
+import type * as z from 'zod/mini';
+import type { DeskQueries } from '../../data/desk/desk-queries';
+
+export const DeskContext = createContext<DeskQueries | null>(null);
+
+export interface DeskAnswer<T> {
+  readonly data: T | undefined;
+  /** Unix ms of the last good answer; 0 while there is none. */
+  readonly fetched_ms: number;
+  /** Why the newest try brought nothing; null when it did. What was fetched before stays readable. */
+  readonly words: string | null;
+  readonly refetch: () => void;
+}
+
+const OFTEN_MS = 15_000;
+
+/** One answer of the Desk: fetched while there is a network, kept readable with its age when there is none. */
+export function useDeskQuery<T>(path: string, schema: z.ZodMiniType<T>): DeskAnswer<T> {
+  const desk = use(DeskContext);
+  if (desk === null) throw new Error('a Desk query needs the DeskProvider above it');
+  const query = useQuery({
+    queryKey: [path],
+    refetchInterval: OFTEN_MS,
+    // The browser's own idea of being online is a hint at best: always try.
+    networkMode: 'always',
+    queryFn: async (): Promise<T> => {
+      const outcome = await desk.get(path, schema);
+      if (outcome.type === 'ok') return outcome.value;
+      throw new Error(outcome.type === 'problem' ? outcome.problem.detail : outcome.words);
+    },
+  });
+  return {
+    data: query.data,
+    fetched_ms: query.dataUpdatedAt,
+    words: query.error === null ? null : query.error.message,
+    refetch: () => void query.refetch(),
+  };
+}
