@@ -24,7 +24,7 @@ export const stages = [
   {
     name: 'lint',
     says: 'the import table, cycles, types in use, hooks',
-    run: command(['node_modules/eslint/bin/eslint.js', '--max-warnings', '0', '--concurrency', '2', '.']),
+    run: command(['node_modules/eslint/bin/eslint.js', '--max-warnings', '0', '.']),
   },
   {
     name: 'types',
