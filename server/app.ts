@@ -8,7 +8,7 @@ import { openApiOf } from './http/openapi';
 import { pagePolicy } from './http/page-policy';
 import { logRequests } from './http/request-log';
 import { ANYONE, declareRoute, type Route } from './http/route';
-import { translateErrors } from './http/translate-error';
+import { answerProblem } from './http/translate-error';
 
 const apiVersion = '1';
 
@@ -20,17 +20,20 @@ export function createApp(context: Context): Express {
   app.set('query parser', 'simple');
   app.disable('x-powered-by');
   app.disable('etag');
-  app.use(logRequests(log), guardHost(config.http), pagePolicy(config.http));
-  const routes = [...featureRoutes(context), ...statusRoutes(context)];
+  const router = express.Router();
+  router.use(logRequests(log), guardHost(config.http), pagePolicy(config.http));
+  const routes = [...context.routes, ...statusRoutes(context)];
   const described: readonly Route[] = [...routes, openApiRoute(() => openApiOf(described, apiVersion))];
-  mountRoutes(app, described, { http: config.http, authenticate: accounts.authenticate, log });
-  if (config.folders.client !== undefined) serveClient(app, config.folders.client);
-  app.use(translateErrors(log));
+  mountRoutes(router, described, { http: config.http, authenticate: accounts.authenticate, log });
+  if (config.folders.client !== undefined) serveClient(router, config.folders.client);
+  // Whatever any of them throws ends here, so that no other words than ours ever go out.
+  app.use((request, response, next) =>
+    router(request, response, (error?: unknown) => {
+      if (error === undefined) next();
+      else answerProblem(log, { request, response, error });
+    }),
+  );
   return app;
-}
-
-function featureRoutes({ accounts, handover }: Context): readonly Route[] {
-  return [...accounts.routes, ...handover.routes];
 }
 
 const stateSchema = z.object({ state: z.literal('ok') });

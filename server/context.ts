@@ -1,8 +1,11 @@
 import { createAccounts, type Accounts } from './accounts/accounts';
 import type { Config } from './config';
+import { createCrew } from './crew/crew-routes';
 import { createDatabase, type Database } from './db/database';
+import { createDesk } from './desk/desk-routes';
 import { createHandover, type Handover } from './handover/handover';
 import type { Domain } from './handover/judge-batch';
+import type { Route } from './http/route';
 import type { Logger } from './logger';
 
 export interface Context {
@@ -11,6 +14,7 @@ export interface Context {
   readonly database: Database;
   readonly accounts: Accounts;
   readonly handover: Handover;
+  readonly routes: readonly Route[];
   /** Ends what waits, so that a server can stop. The database stays until `close`. */
   readonly release: () => void;
   readonly close: () => Promise<void>;
@@ -35,6 +39,12 @@ export function createContext({ config, log, now = Date.now, domain }: ContextPa
     database,
     accounts,
     handover,
+    routes: [
+      ...accounts.routes,
+      ...handover.routes,
+      ...createDesk({ database, now }),
+      ...createCrew({ database, now, onRevoked: handover.wake }),
+    ],
     release: handover.close,
     close: () => database.destroy(),
   };

@@ -1,6 +1,6 @@
 /** 64-bit columns arrive as digits: a whole number of them, which the schema keeps below 2^53. */
 export function toInt(value: unknown): number {
-  const number = typeof value === 'number' ? value : Number(value as string);
+  const number = typeof value === 'number' ? value : Number(value);
   if (value === null || !Number.isSafeInteger(number))
     throw new RangeError(`not a whole number: ${String(value)}`);
   return number;

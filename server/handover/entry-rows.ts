@@ -184,7 +184,7 @@ function there<T>(value: T | null): T {
   return value;
 }
 
-type RawKnown = Pick<
+export type RawKnown = Pick<
   RawEntry,
   'id' | 'revision' | 'kind' | 'author' | 'body_sha' | 'entry_sha' | 'verdict' | 'reason'
 >;

@@ -104,7 +104,7 @@ function createServerPen({ lab, epoch, device, author, at_ms }: Pen) {
           time_uncertain: false,
         },
       },
-      bodyText(body as Readonly<Record<string, unknown>>, randomBytes(16).toString('hex')),
+      bodyText(body, randomBytes(16).toString('hex')),
     );
   };
 }

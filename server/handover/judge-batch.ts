@@ -113,11 +113,11 @@ class BatchRun {
 
   /** The stored verdict, under whatever number it comes; the number counts as used, or the queue could not go on. */
   #answerKnown(item: PushItem, known: KnownEntry): void {
+    if (item.seq === this.#lastSeq + 1) this.#lastSeq = item.seq;
     if (!isSameText(item, known)) {
       this.#refuse(item, 'altered');
       return;
     }
-    if (item.seq === this.#lastSeq + 1) this.#lastSeq = item.seq;
     const { verdict, revision, reason } = known;
     this.#results.push({ id: item.id, seq: item.seq, outcome: verdict, revision, reason });
   }

@@ -12,7 +12,14 @@ import {
   type TabletState,
   type Whose,
 } from './book-store';
-import { entryColumns, fromEntryRow, fromKnownRow, knownColumns, type RawEntry } from './entry-rows';
+import {
+  entryColumns,
+  fromEntryRow,
+  fromKnownRow,
+  knownColumns,
+  type RawEntry,
+  type RawKnown,
+} from './entry-rows';
 import { createMariaDbWriter } from './mariadb-book-writer';
 import { withSnapshot } from './mariadb-snapshot';
 
@@ -82,7 +89,7 @@ export function createMariaDbBookStore(database: Database): BookStore {
     async knownEntries(lab, ids) {
       if (ids.length === 0) return [];
       const rows = await database('entries')
-        .select(knownColumns)
+        .select<RawKnown[]>(knownColumns)
         .where({ lab })
         .whereIn('id', [...ids]);
       return rows.map(fromKnownRow);
@@ -106,16 +113,16 @@ interface Page {
 }
 
 async function readPage(database: Database, { lab, since, limit }: Page): Promise<StoredEntry[]> {
-  const sizes: { revision: string; body_bytes: number }[] = await database('entries')
-    .select('entries.revision', 'entries.body_bytes')
+  const sizes = await database('entries')
+    .select<{ revision: string; body_bytes: number }[]>('entries.revision', 'entries.body_bytes')
     .where({ lab })
     .andWhere('entries.revision', '>', since)
     .orderBy('entries.revision')
     .limit(limit);
   const last = lastOfPage(sizes);
   if (last === undefined) return [];
-  const rows: RawEntry[] = await database('entries')
-    .select(entryColumns)
+  const rows = await database('entries')
+    .select<RawEntry[]>(entryColumns)
     .where({ lab })
     .andWhere('entries.revision', '>', since)
     .andWhere('entries.revision', '<=', last)

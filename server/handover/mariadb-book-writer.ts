@@ -3,7 +3,7 @@ import { writeAudit } from '../db/audit';
 import type { Transaction } from '../db/database';
 import type { BookChange, BookWriter, ChangedDocument, LabState, TabletState, Whose } from './book-store';
 import { toDocumentRow, toReadingRow } from './document-rows';
-import { fromKnownRow, knownColumns, toEntryRow } from './entry-rows';
+import { fromKnownRow, knownColumns, toEntryRow, type RawKnown } from './entry-rows';
 
 /** Rows of one statement: a whole push fits, and a large one stays below the server's packet limit. */
 const rowsAtOnce = 100;
@@ -19,21 +19,21 @@ export function createMariaDbWriter(transaction: Transaction, whose: Whose, lock
   return {
     ...locked,
     async grantedPeople() {
-      const rows: { person: string }[] = await transaction('grants')
-        .select('grants.person')
+      const rows = await transaction('grants')
+        .select<{ person: string }[]>('grants.person')
         .where({ lab, device });
       return new Set(rows.map((row) => row.person));
     },
     async entriesByIds(ids) {
       const rows = await transaction('entries')
-        .select(knownColumns)
+        .select<RawKnown[]>(knownColumns)
         .where({ lab })
         .whereIn('id', [...ids]);
       return rows.map(fromKnownRow);
     },
     async documentsByIds(ids) {
-      const rows: { doc: string }[] = await transaction('documents')
-        .select('documents.doc')
+      const rows = await transaction('documents')
+        .select<{ doc: string }[]>('documents.doc')
         .where({ lab })
         .whereIn('id', [...ids]);
       // Only the folds write them, and a refold makes them anew from the entries.

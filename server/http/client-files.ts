@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs';
 import path from 'node:path';
-import express, { type Express, type Response } from 'express';
+import express, { type Response, type Router } from 'express';
 
 const yearMs = 365 * 24 * 3_600_000;
 
@@ -8,8 +8,8 @@ const yearMs = 365 * 24 * 3_600_000;
  * Serves the built client. Hashed files never change; everything else is asked for again each time, above all the
  * service worker. A missing asset is missing: a page in its place would be kept as a script for good.
  */
-export function serveClient(app: Express, folder: string): void {
-  app.use(
+export function serveClient(router: Router, folder: string): void {
+  router.use(
     '/assets',
     express.static(path.join(folder, 'assets'), {
       immutable: true,
@@ -19,7 +19,7 @@ export function serveClient(app: Express, folder: string): void {
     }),
     (_request, response) => gone(response),
   );
-  app.use(
+  router.use(
     express.static(folder, {
       index: false,
       redirect: false,
@@ -27,7 +27,7 @@ export function serveClient(app: Express, folder: string): void {
     }),
   );
   const page = path.join(folder, 'index.html');
-  app.get('/{*path}', (request, response) => {
+  router.get('/{*path}', (request, response) => {
     if (path.extname(request.path) !== '' || !existsSync(page)) {
       gone(response);
       return;

@@ -1,4 +1,4 @@
-import express, { type Express, type Request, type Response } from 'express';
+import express, { type Request, type RequestHandler, type Response, type Router } from 'express';
 import type { Config } from '../config';
 import type { Logger } from '../logger';
 import type { Authenticate, Caller } from './caller';
@@ -18,18 +18,18 @@ export interface RouteHost {
 }
 
 /** The one wrapper around every handler: origin, token, role, body, answer. Errors go on to the translator. */
-export function mountRoutes(app: Express, routes: readonly Route[], host: RouteHost): void {
+export function mountRoutes(router: Router, routes: readonly Route[], host: RouteHost): void {
   for (const route of routes) {
     const { method, path } = route.spec;
-    const add = method === 'GET' ? app.get.bind(app) : app.post.bind(app);
+    const add = method === 'GET' ? router.get.bind(router) : router.post.bind(router);
     add(path, (request, response) => serve(route, { request, response }, host));
   }
   for (const path of new Set(routes.map((route) => route.spec.path))) {
-    app.all(path, (request) => {
+    router.all(path, (request) => {
       throw new WrongMethod(`${request.method} is not taken here.`);
     });
   }
-  app.use('/api', (request) => {
+  router.use('/api', (request) => {
     throw new NoSuchRoute(`There is no ${request.method} ${request.baseUrl}${request.path}.`);
   });
 }
@@ -80,7 +80,7 @@ async function callerOf(
 }
 
 function readJson(limit: number, request: Request, response: Response): Promise<unknown> {
-  const read = express.json({ limit, type: 'application/json' });
+  const read: RequestHandler = express.json({ limit, type: 'application/json' });
   return new Promise((resolve, reject) => {
     read(request, response, (error?: unknown) => {
       if (error === undefined) resolve(request.body);

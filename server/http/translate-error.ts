@@ -1,27 +1,31 @@
-import type { ErrorRequestHandler } from 'express';
+import type { Request, Response } from 'express';
 import { PROBLEM_PREFIX, type Problem } from '../../src/domain/handover/problem';
 import { isDatabaseError } from '../db/database-errors';
 import type { Logger } from '../logger';
 import { Fault, HttpProblem, NotJson, TooLarge, Unavailable, Unreadable } from './problems';
 import { requestIdOf } from './request-log';
 
-/** The one place that turns what was thrown into an answer. Registered last, or Express answers in its own words. */
-export function translateErrors(log: Logger): ErrorRequestHandler {
-  return (error: unknown, request, response, _next) => {
-    const requestId = requestIdOf(response);
-    const problem = toProblem(error);
-    if (problem.status >= 500)
-      log.error({ requestId, error, path: request.path }, 'A request failed unexpectedly');
-    if (response.headersSent) {
-      response.destroy();
-      return;
-    }
-    response
-      .status(problem.status)
-      .set({ ...problem.headers, 'cache-control': 'no-store' })
-      .type('application/problem+json')
-      .send(JSON.stringify(asBody(problem, requestId)));
-  };
+export interface Failed {
+  readonly request: Request;
+  readonly response: Response;
+  readonly error: unknown;
+}
+
+/** The one place that turns what was thrown into an answer. */
+export function answerProblem(log: Logger, { request, response, error }: Failed): void {
+  const requestId = requestIdOf(response);
+  const problem = toProblem(error);
+  if (problem.status >= 500)
+    log.error({ requestId, error, path: request.path }, 'A request failed unexpectedly');
+  if (response.headersSent) {
+    response.destroy();
+    return;
+  }
+  response
+    .status(problem.status)
+    .set({ ...problem.headers, 'cache-control': 'no-store' })
+    .type('application/problem+json')
+    .send(JSON.stringify(asBody(problem, requestId)));
 }
 
 export function toProblem(error: unknown): HttpProblem {

@@ -165,7 +165,7 @@ export class TestTablet {
     body: BodyOf<K>,
     options: SealOptions = {},
   ): SealedEntry {
-    return this.sealRaw({ kind, subject, body: body as Record<string, unknown>, options });
+    return this.sealRaw({ kind, subject, body, options });
   }
 
   sealRaw(what: {
@@ -212,7 +212,7 @@ export class TestTablet {
   async write<K extends Kind>(kind: K, subject: string | null, body: BodyOf<K>, options: SealOptions = {}) {
     const entry = this.seal(kind, subject, body, options);
     const answer = await this.push([entry]);
-    const result = answer.body.results?.[0];
+    const result = (answer.body as Partial<PushAnswer>).results?.[0];
     if (result === undefined)
       throw new Error(`the push of ${kind} was refused: ${JSON.stringify(answer.body)}`);
     return { entry, result };
