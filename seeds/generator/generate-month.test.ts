@@ -48,7 +48,8 @@ const freshTablet = {
   },
 };
 
-describe('a month of the demo lab', () => {
+// Each of these writes whole months.
+describe('a month of the demo lab', { timeout: 60_000 }, () => {
   it('comes out the same from the same seed, byte for byte, and otherwise from another', () => {
     const again = generate(NOW_MS);
     const other = generate(NOW_MS, 7);

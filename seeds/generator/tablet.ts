@@ -41,14 +41,15 @@ interface Setting {
 export function createTablet(facts: DemoTablet, setting: Setting): WritingTablet {
   const { lab, zone, dice } = setting;
   let base = setting.base;
-  let pageLife = { id: dice.uuid(), since_ms: 0, last_ms: 0 };
+  let pageLife = { id: dice.uuid(), since_ms: 0, last_ms: 0, offset_min: 0 };
   let seq = 0;
   let firings = 0;
   let pending: SealedEntry[] = [];
   return {
     facts,
     open: (at_ms) => {
-      pageLife = { id: dice.uuid(), since_ms: at_ms, last_ms: at_ms };
+      // No page life of the month spans the hour in which clocks change.
+      pageLife = { id: dice.uuid(), since_ms: at_ms, last_ms: at_ms, offset_min: offsetMinutes(zone, at_ms) };
     },
     pull: (to) => {
       base = to;
@@ -74,7 +75,7 @@ export function createTablet(facts: DemoTablet, setting: Setting): WritingTablet
           base,
           stamp: {
             wall_ms: at_ms,
-            offset_min: offsetMinutes(zone, at_ms),
+            offset_min: pageLife.offset_min,
             zone,
             page_life: pageLife.id,
             monotonic_ms: at_ms - pageLife.since_ms,
