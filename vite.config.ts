@@ -1,4 +1,3 @@
-import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
@@ -20,13 +19,6 @@ function packageVersion(): string {
   throw new Error('package.json names no version');
 }
 
-function fileRevision(path: string): string {
-  return createHash('sha256')
-    .update(readFileSync(new URL(path, import.meta.url)))
-    .digest('hex')
-    .slice(0, 16);
-}
-
 const timeZoneIndependent = { TZ: 'Etc/UTC' };
 
 export default defineConfig({
@@ -42,7 +34,6 @@ export default defineConfig({
       registerType: 'prompt',
       injectRegister: false,
       strategies: 'generateSW',
-      includeAssets: [],
       manifest: {
         id: '/',
         name: 'Holdoff',
@@ -61,11 +52,8 @@ export default defineConfig({
         ],
       },
       workbox: {
+        // The icons come in by the manifest; naming them here too would list them twice, which no worker installs.
         globPatterns: ['**/*.{js,css,html,woff2}'],
-        additionalManifestEntries: [
-          { url: '/icon.svg', revision: fileRevision('./public/icon.svg') },
-          { url: '/icon-maskable.svg', revision: fileRevision('./public/icon-maskable.svg') },
-        ],
         navigateFallback: '/index.html',
         navigateFallbackDenylist: [/^\/api/],
         cleanupOutdatedCaches: true,

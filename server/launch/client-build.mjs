@@ -29,7 +29,10 @@ export async function ensureClient(root, { say, force = false }) {
   // A build that is broken off must not look like a finished one.
   rmSync(stampFile, { force: true });
   const vite = path.join(root, 'node_modules', 'vite', 'bin', 'vite.js');
-  const answer = await run(process.execPath, [vite, 'build'], { cwd: root, env: withoutNpm(process.env) });
+  const answer = await run(process.execPath, [vite, 'build'], {
+    cwd: root,
+    env: { ...withoutNpm(process.env), NO_COLOR: '1' },
+  });
   if (!answer.ok)
     throw new Refusal(`The client could not be built. Vite's last words:\n${lastLines(answer.output, 25)}`);
   writeFileSync(stampFile, stamp);
