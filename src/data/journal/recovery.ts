@@ -58,6 +58,7 @@ async function restoreKeys(store: BookStore, { header }: Gathered): Promise<void
     name: device_name,
     lab: { id: lab, name: lab_name },
     keys: null,
+    forked: true,
   });
   await putKey(database, 'epoch', header.epoch);
   await putKey(database, 'firing_count', header.firing_count);

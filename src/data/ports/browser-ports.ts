@@ -1,6 +1,7 @@
 import { appVersion, buildTime } from '../../config/build';
 import { workerJournalFiles } from '../journal/worker-files';
 import { browserLocks } from './browser-locks';
+import { browserServiceWorker } from './browser-service-worker';
 import type { Bus, BusMessage, PageEvent, PagePort, Ports, SmallStore } from './ports';
 
 /** The real world. Needs a secure context (https, or loopback), as locks, OPFS and WebCrypto do. */
@@ -41,6 +42,7 @@ export function browserPorts(): Ports {
         redirect: 'error',
         cache: 'no-store',
       }),
+    serviceWorker: import.meta.env.PROD ? browserServiceWorker() : null,
     subtle: crypto.subtle,
     build_ms: Date.parse(buildTime),
     app_version: appVersion,

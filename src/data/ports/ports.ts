@@ -98,6 +98,13 @@ export interface StoragePort {
   readonly estimate: () => Promise<{ readonly usage?: number; readonly quota?: number }>;
 }
 
+export interface ServiceWorkerPort {
+  readonly register: (events: { readonly onWaiting: () => void; readonly onReplaced: () => void }) => void;
+  /** Tells the waiting version to take over. */
+  readonly activate: () => void;
+  readonly reload: () => void;
+}
+
 export interface HttpRequest {
   readonly method: string;
   readonly headers: Readonly<Record<string, string>>;
@@ -119,6 +126,8 @@ export interface Ports {
   readonly journal: JournalFiles;
   readonly storage: StoragePort;
   readonly http: Http;
+  /** Null where there is none, as while developing. */
+  readonly serviceWorker: ServiceWorkerPort | null;
   readonly subtle: SubtleCrypto;
   readonly build_ms: number;
   readonly app_version: string;

@@ -63,6 +63,7 @@ async function exchange<T>(
   };
   const callOff = timers.after(timeout_ms, passOn);
   signal?.addEventListener('abort', passOn);
+  if (signal?.aborted === true) passOn();
   try {
     return await work(stop.signal);
   } catch (error) {

@@ -1,31 +1,8 @@
 import type { Clock, RandomBytes } from '../ports/ports';
 import type { PersonRow } from '../store/book-database';
 import type { BookStore } from '../store/book-store';
+import type { PersonHere, PinOutcome, SetPinOutcome } from './session-types';
 import { hashPin, isRightPin, PIN_TRIES, pinDelayMs, pinObjection } from './pin';
-
-export interface PersonHere {
-  readonly id: string;
-  readonly name: string;
-  readonly has_pin: boolean;
-  /** Wrong PINs in a row. */
-  readonly failures: number;
-  /** How long to wait before the next try, ms; 0 = now. As of when this was read. */
-  readonly wait_ms: number;
-  /** Only signing in online opens: no PIN yet, or ten wrong ones. */
-  readonly needs_sign_in: boolean;
-}
-
-export type PinOutcome =
-  | { readonly type: 'right'; readonly person: PersonHere }
-  | { readonly type: 'wrong'; readonly words: string; readonly wait_ms: number; readonly failures: number }
-  | { readonly type: 'wait'; readonly words: string; readonly wait_ms: number }
-  | { readonly type: 'sign-in-needed'; readonly words: string }
-  | { readonly type: 'not-saved'; readonly words: string };
-
-export type SetPinOutcome =
-  | { readonly type: 'set' }
-  | { readonly type: 'refused'; readonly words: string }
-  | { readonly type: 'not-saved'; readonly words: string };
 
 export interface PeoplePorts {
   readonly store: BookStore;

@@ -37,19 +37,20 @@ export async function acknowledgeInside(
   }
 }
 
-/** The first text stands under the id; this one goes on under `fresh`, and both are shown (protocol 3.4). */
+/**
+ * The first text stands under the id; this one goes on under `fresh`, in the same place of the sequence, since the
+ * server has not taken that (protocol 3.4).
+ */
 export async function continueAltered(
   database: BookDatabase,
   id: string,
   fresh: string,
 ): Promise<EntryRow | null> {
   const row = await database.entries.where('id').equals(id).first();
-  if (row === undefined || row.state === 'altered') return null;
-  const seq = (await lastSeq(database, row.device)) + 1;
-  const again = waitingRow(resealed(row.entry, { id: fresh, device: row.device, seq }));
-  await database.entries.put({ ...row, state: 'altered', continued_as: fresh });
-  await database.entries.add(again);
-  await putCount(database, `last_seq/${row.device}`, seq);
+  if (row === undefined || row.state !== 'waiting') return null;
+  const { device, seq } = row;
+  const again = { ...waitingRow(resealed(row.entry, { id: fresh, device, seq })), altered_from: id };
+  await database.entries.put(again);
   return again;
 }
 
@@ -67,6 +68,7 @@ export async function moveToDevice(database: BookDatabase, device: string): Prom
     await database.entries.add({
       ...waitingRow(resealed(row.entry, { id: row.id, device, seq })),
       stub: row.stub,
+      altered_from: row.altered_from,
     });
   }
   if (others.length > 0) await putCount(database, `last_seq/${device}`, seq);
@@ -82,7 +84,7 @@ export async function waitAgainAbove(
   const rows = await database.entries
     .where('[device+seq]')
     .between([device, last_seq], [device, Infinity], false)
-    .filter((row) => row.state !== 'waiting' && row.state !== 'altered')
+    .filter((row) => row.state !== 'waiting')
     .toArray();
   for (const row of rows) await waitAgain(database, row);
   await putCount(database, `acked_seq/${device}`, last_seq);

@@ -61,7 +61,7 @@ export function waitingRow(entry: SealedEntry): EntryRow {
     reason: null,
     acknowledged_ms: null,
     stub: null,
-    continued_as: null,
+    altered_from: null,
   };
 }
 

@@ -2,11 +2,7 @@ import { Dexie, type Table } from 'dexie';
 import type { Reason, SealedEntry, Verdict } from '../../domain/book/entry';
 import type { IdbPort } from '../ports/ports';
 
-export type OwnState =
-  | 'waiting'
-  | Verdict
-  /** The server has the id with another text: the first stands, and this text went on under a new id (protocol 3.4). */
-  | 'altered';
+export type OwnState = 'waiting' | Verdict;
 
 export interface EntryRow {
   readonly device: string;
@@ -21,8 +17,8 @@ export interface EntryRow {
   readonly acknowledged_ms: number | null;
   /** Why only a stub of it can travel (protocol 3.7); null while it goes whole. */
   readonly stub: string | null;
-  /** Id under which an altered text went on, or the row of a new device under which it is sent. */
-  readonly continued_as: string | null;
+  /** The id that the server has with another text: the first stands, and this text goes on under its own (protocol 3.4). */
+  readonly altered_from: string | null;
 }
 
 export interface KeyRow {
@@ -88,7 +84,7 @@ export function bookDatabase(lab: string, idb: IdbPort): BookDatabase {
     cache: 'disabled',
   });
   database.version(1).stores({
-    entries: '[device+seq], &id, [state+device+seq], revision',
+    entries: '[device+seq], &id, [state+device+seq], revision, altered_from',
     keys: 'key',
     drafts: '[person+key], key',
     people: 'id',

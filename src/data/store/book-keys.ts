@@ -7,6 +7,8 @@ export interface DeviceRecord {
   readonly lab: { readonly id: string; readonly name: string };
   /** Not extractable: it signs nonces and never leaves this browser (protocol 4.1). Null once the store was emptied. */
   readonly keys: CryptoKeyPair | null;
+  /** The server has another entry at a seq of ours: the next sign-in makes a new tablet of this one (protocol 3.6). */
+  readonly forked: boolean;
 }
 
 export interface ResumeRecord {

@@ -76,12 +76,18 @@ export function openBookStore(lab: string, ports: StorePorts) {
     nextWaiting: (device: string, limit: number): Promise<readonly EntryRow[]> =>
       ofState(database, 'waiting', device).limit(limit).toArray(),
     waiting: () => countWaiting(database),
+    allWaiting: (): Promise<readonly EntryRow[]> => allWaiting(database).toArray(),
     /** Rows that the mirror does not hold yet: waiting, or taken at a revision beyond `revision`. */
     beyond: (revision: number) => rowsBeyond(database, revision),
     byId: (id: string): Promise<EntryRow | undefined> => database.entries.where('id').equals(id).first(),
     byIds: (ids: readonly string[]): Promise<readonly EntryRow[]> =>
       database.entries
         .where('id')
+        .anyOf([...ids])
+        .toArray(),
+    alteredFrom: (ids: readonly string[]): Promise<readonly EntryRow[]> =>
+      database.entries
+        .where('altered_from')
         .anyOf([...ids])
         .toArray(),
     newest: (device: string, limit: number): Promise<readonly EntryRow[]> =>

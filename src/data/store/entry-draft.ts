@@ -7,7 +7,14 @@ type OwnSubject = 'rig.created' | 'sheet.published' | 'check.opened' | 'firing.o
 /** Kinds whose running number is taken in the transaction that appends them (protocol 1.5). */
 type Numbered = 'firing.opened' | 'rig.created' | 'rig.revised';
 
-export type DraftBody<K extends Kind> = K extends Numbered ? Omit<BodyOf<K>, 'number'> : BodyOf<K>;
+/** Screens build bodies from documents, which nobody may change. */
+type Frozen<T> = T extends readonly (infer Item)[]
+  ? readonly Frozen<Item>[]
+  : T extends object
+    ? { readonly [Key in keyof T]: Frozen<T[Key]> }
+    : T;
+
+export type DraftBody<K extends Kind> = Frozen<K extends Numbered ? Omit<BodyOf<K>, 'number'> : BodyOf<K>>;
 
 interface DraftPeople {
   /** Left out: the person who is open, or nobody while locked. */

@@ -23,7 +23,6 @@ export async function foldOwn(
 ): Promise<Judged | null> {
   const run = <T>(effect: Effect<T>) => runEffectAsync(effect, source, changed);
   const { entry, state, reason, revision } = row;
-  if (state === 'altered') return null;
   if (state !== 'waiting') {
     await run(foldEntry(entry, { verdict: state, reason, revision }));
     return { verdict: state, reason };
