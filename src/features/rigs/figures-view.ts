@@ -131,7 +131,12 @@ function wait(figures: Result<RigFigures>): FigureRow {
   const { wait: found } = figures.value;
   if (found.type === 'unknown') return { ...row, value: null, refusal: 'A bleed is not known: no number.' };
   const computed = formatFigure(found.computed_s, { digits: { significant: 3 }, rounding: 'up' });
-  return { ...row, source: `bleeds in ${computed}\u2009s`, ...figure(found.wait_s, 0, 'up', 'decimals') };
+  return {
+    ...row,
+    source: `bleeds in ${computed}\u2009s`,
+    value: formatFigure(found.wait_s, { digits: { decimals: 0 }, rounding: 'up' }),
+    refusal: null,
+  };
 }
 
 function nodesOf(spec: RigSpec, figures: Result<RigFigures>): readonly NodeWait[] {
@@ -168,14 +173,8 @@ function nanofarad(farad: Result<number>): string {
     : '\u2013';
 }
 
-function figure(
-  value: number,
-  digits: number,
-  rounding: Rounding,
-  kind: 'significant' | 'decimals' = 'significant',
-) {
-  const asked = kind === 'significant' ? { significant: digits } : { decimals: digits };
-  return { value: formatFigure(value, { digits: asked, rounding }), refusal: null };
+function figure(value: number, significant: number, rounding: Rounding) {
+  return { value: formatFigure(value, { digits: { significant }, rounding }), refusal: null };
 }
 
 function none(result: { readonly ok: false; readonly refusal: { readonly words: string } }) {

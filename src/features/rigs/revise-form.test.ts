@@ -58,10 +58,10 @@ describe('revising a rig', () => {
   });
 
   it('steps in decimal and stays within the range', () => {
-    expect(stepText(field('gap.gap_mm'), undefined, HERON, 1)).toBe('2.7');
-    expect(stepText(field('gap.gap_mm'), '0.05', HERON, -1)).toBe('0.01');
-    expect(stepText(field('nodes.0.bleed_Mohm'), '', HERON, 1)).toBe('10');
-    expect(stepText(field('gap.gap_mm'), 'abc', HERON, 1)).toBe('0.1');
+    expect(stepText(field('gap.gap_mm'), 1, { text: undefined, spec: HERON })).toBe('2.7');
+    expect(stepText(field('gap.gap_mm'), -1, { text: '0.05', spec: HERON })).toBe('0.01');
+    expect(stepText(field('nodes.0.bleed_Mohm'), 1, { text: '', spec: HERON })).toBe('10');
+    expect(stepText(field('gap.gap_mm'), 1, { text: 'abc', spec: HERON })).toBe('0.1');
   });
 
   it('says beforehand that the permit and the check go', () => {

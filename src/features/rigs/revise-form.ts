@@ -67,12 +67,11 @@ export function readField(field: ReviseField, text: string): ReadField {
 /** One step up or down, in decimal, so that 2.6 and 0.1 give 2.7; from an empty field the step leads to the step. */
 export function stepText(
   field: ReviseField,
-  text: string | undefined,
-  spec: RigSpec,
   direction: -1 | 1,
+  now: { readonly text: string | undefined; readonly spec: RigSpec },
 ): string {
-  const now = text === undefined ? field.read(spec) : Number(text);
-  const from = now === null || !Number.isFinite(now) ? 0 : now;
+  const value = now.text === undefined ? field.read(now.spec) : Number(now.text);
+  const from = value === null || !Number.isFinite(value) ? 0 : value;
   const next = Number((from + direction * field.step).toPrecision(12));
   return String(Math.min(field.rule.max, Math.max(field.rule.min, next)));
 }

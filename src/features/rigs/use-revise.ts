@@ -78,7 +78,8 @@ export function useRevise(rig: RigDoc) {
         texts: Object.fromEntries(Object.entries(now.texts).filter(([one]) => one !== key)),
       })),
     step: (direction: -1 | 1) => {
-      if (field !== null) setText(field.key, stepText(field, draft.texts[field.key], before.spec, direction));
+      if (field !== null)
+        setText(field.key, stepText(field, direction, { text: draft.texts[field.key], spec: before.spec }));
     },
     set,
     clear,
