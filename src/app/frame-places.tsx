@@ -33,11 +33,13 @@ function placesOf(rig: string | undefined): readonly Place[] {
     { key: 'lookups', label: 'Lookups', href: paths.gapLookup(rig) },
     { key: 'checks', label: 'Checks', href: paths.checks(rig) },
     { key: 'rigs', label: 'Rigs', href: paths.rigs() },
-    { key: 'desk', label: 'Desk', href: paths.desk() },
-    { key: 'handover', label: 'Handover', href: paths.handover() },
   ];
 }
 
+/** Desk, Crew, Handover and the settings have their place under Bench. */
+const UNDER_BENCH: ReadonlySet<string> = new Set(['desk', 'crew', 'handover', 'settings', 'sign-in']);
+
 function currentPlace(pathname: string): string {
-  return pathname.split('/')[1] ?? '';
+  const place = pathname.split('/')[1] ?? '';
+  return UNDER_BENCH.has(place) ? 'bench' : place;
 }

@@ -2,15 +2,18 @@ import { createContext, use, useEffect, useState, useSyncExternalStore, type Rea
 import { useNoiseGuard } from '../components/use-noise-guard';
 import { useAppend } from '../data/use-append';
 import { useBookState } from '../data/use-book';
+import { useDisplay } from '../data/use-display';
 import { createNoiseStore, type NoiseStore } from './noise-store';
 
 const NoiseContext = createContext<NoiseStore | null>(null);
 const COUNT_EVERY_MS = 60_000;
+const REFERENCE_PX_PER_MM = 5.2;
 
 /** Watches over touches for the whole app; what was ignored is said in the strip and counted in the Book. */
 export function NoiseProvider({ children }: { readonly children: ReactNode }) {
   const [store] = useState(createNoiseStore);
-  useNoiseGuard({ onNoise: store.heard });
+  const { settings } = useDisplay();
+  useNoiseGuard({ onNoise: store.heard, mm_px: settings.px_per_mm ?? REFERENCE_PX_PER_MM });
   return (
     <NoiseContext value={store}>
       <NoiseCounter store={store} />

@@ -60,11 +60,16 @@ function Face({
           <b>{rig.name}</b>
           <span className="muted">{detail}</span>
         </p>
-        <WideMark state={drawn.mark} hatched={drawn.hatched} solid={firing}>
-          <p className="bench-face-words" role="status">
-            {drawn.hatched ? `${DECLARED_WORDS[view.state]}. Stood down` : DECLARED_WORDS[view.state]}
-          </p>
-        </WideMark>
+        <WideMark
+          state={drawn.mark}
+          hatched={drawn.hatched}
+          solid={firing}
+          title={
+            <p className="bench-face-words" role="status">
+              {drawn.hatched ? `${DECLARED_WORDS[view.state]}. Stood down` : DECLARED_WORDS[view.state]}
+            </p>
+          }
+        />
         <dl className="bench-face-readings">
           {figures.map((one) => (
             <div key={one.label}>

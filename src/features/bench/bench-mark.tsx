@@ -22,21 +22,26 @@ export function BenchMark({ rig, view, zone }: Props) {
   const age = view.age_ms;
   const known = view.state !== 'not-known';
   return (
-    <WideMark state={drawn.mark} hatched={drawn.hatched}>
-      <div className="bench-mark" role="status">
-        <p className="bench-mark-words">
-          <b>{DECLARED_WORDS[view.state]}</b>
-          {known && age !== null ? <AgeFigure age_ms={age} /> : null}
-        </p>
-        <AgeScale age_h={known && age !== null ? age / HOUR_MS : null} />
+    <div className="bench-mark" role="status">
+      <WideMark
+        state={drawn.mark}
+        hatched={drawn.hatched}
+        title={
+          <div className={`bench-mark-words ${view.state}`}>
+            <b>{DECLARED_WORDS[view.state]}</b>
+            {known && age !== null ? <AgeFigure age_ms={age} /> : null}
+          </div>
+        }
+      >
+        <AgeScale age_h={known && age !== null ? age / HOUR_MS : null} steps={48} variant="face" />
         <p className="bench-mark-detail">
           <span>
             <Declarer view={view} zone={zone} /> {tagWords(rig)}
           </span>
-          <span className="muted">{known ? 'at 12 h: not known, treat as charged' : view.why}</span>
+          <span className="muted">{known ? 'at 12 h: not known, treat as charged' : ''}</span>
         </p>
-      </div>
-    </WideMark>
+      </WideMark>
+    </div>
   );
 }
 
@@ -54,11 +59,18 @@ function Declarer({ view, zone }: { readonly view: DeclaredView; readonly zone: 
       : ` Stood down${down === undefined ? '' : ` by ${down.name}`}: ${view.stood_down[0]?.why ?? ''}.`;
   if (view.trace === null) return <>Nothing declared yet.{stoodDown}</>;
   const when = clockWords(view.trace.stamp.wall_ms, zone);
-  const last = view.state === 'not-known' ? 'Last declared by ' : '';
+  const name = by?.name ?? 'author open';
+  if (view.state !== 'not-known') {
+    return (
+      <>
+        {name}, {when}. Declared, not measured.{stoodDown}
+      </>
+    );
+  }
+  const why = view.why ?? '';
   return (
     <>
-      {last}
-      {by?.name ?? 'author open'}, {when}. Declared, not measured.{stoodDown}
+      {why.charAt(0).toUpperCase() + why.slice(1)}. Last by {name}, {when}.{stoodDown}
     </>
   );
 }

@@ -25,7 +25,7 @@ export function GapFields({ lookup }: { readonly lookup: GapLookup }) {
       />
       <FieldRow
         label="Gas"
-        source={`${form.irradiated ? 'UV on the gap' : 'no UV'}, ${revisionSource(form.known.gas, revision)}`}
+        source={`${form.irradiated ? 'with UV' : 'no UV'}, ${revisionSource(form.known.gas, revision)}`}
         value={<Gas name={form.gas} />}
         onPress={() => setDialog('gas')}
       />

@@ -1,6 +1,8 @@
+import { useState } from 'react';
 import { Caution } from '../../components/caution';
 import { Chart } from '../../components/chart/chart';
 import type { ChartData, ChartWords, Slice } from '../../components/chart/types';
+import { Dialog } from '../../components/dialog';
 import { SaysBlock } from '../../components/says-block';
 import { standingPermit } from '../../domain/rules/readiness';
 import type { RigDoc } from '../../domain/book/documents/rig';
@@ -9,8 +11,8 @@ import { highText, lawText, lowText, percentText } from './gap-words';
 import type { GapLookup } from './use-gap-lookup';
 
 const WORDS: ChartWords = {
-  showTable: 'Show as table',
-  showChart: 'Show as chart',
+  showTable: 'Table',
+  showChart: 'Chart',
   low: 'nothing fires below, kV',
   high: 'may hold up to, kV',
   law: 'law, kV',
@@ -110,23 +112,46 @@ function GapModelWords({ lookup }: { readonly lookup: GapLookup }) {
   return (
     <SaysBlock muted>
       {answer.model}, {percentText(answer.band.below)} to {percentText(answer.band.above)} % with the setting
-      errors. Valid {answer.valid}.
+      errors.
       {ambient === null ? null : <span className="nowrap"> Ambient {ambient.toFixed(3)}&nbsp;bar(abs).</span>}
     </SaysBlock>
   );
 }
 
+/** The first caution in full; the others, with where the model holds, one touch away. */
 function GapCaution({ lookup }: { readonly lookup: GapLookup }) {
-  const { view, supply } = lookup;
-  if (!view.ok) return null;
-  const said = [
+  const [open, setOpen] = useState(false);
+  const cautions = cautionsOf(lookup);
+  const [first] = cautions;
+  if (first === undefined) return null;
+  return (
+    <Caution>
+      {first}{' '}
+      <button type="button" className="gap-more" onClick={() => setOpen(true)}>
+        {cautions.length - 1} more, and where it holds
+      </button>
+      {open ? (
+        <Dialog title="Before you trust this number" onClose={() => setOpen(false)} closeLabel="Done">
+          <ul className="gap-cautions">
+            {cautions.map((words) => (
+              <li key={words}>{words}</li>
+            ))}
+          </ul>
+        </Dialog>
+      ) : null}
+    </Caution>
+  );
+}
+
+function cautionsOf({ view, supply }: GapLookup): readonly string[] {
+  if (!view.ok) return [];
+  const { answer } = view.value;
+  return [
     ...(supply === null || supply.reach.type === 'reaches' ? [] : [supply.reach.words]),
-    ...view.value.answer.warnings
-      .filter((warning) => warning.type !== 'no-uv')
-      .map((warning) => warning.words),
+    ...answer.warnings.map((warning) => warning.words),
     'With a person near, no gas gap is a barrier.',
+    `The model holds ${answer.valid}.`,
   ];
-  return <Caution>{said.slice(0, 3).join(' ')}</Caution>;
 }
 
 function voltageSpan(

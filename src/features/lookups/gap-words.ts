@@ -4,8 +4,8 @@ import type { Known } from './gap-form';
 import type { GapLookup } from './use-gap-lookup';
 
 export function revisionSource(known: Known, revision: RigRevision): string {
-  if (known === 'rig') return `rig, rev ${revision.number}`;
-  return known === 'lab' ? 'lab setting' : 'what if';
+  if (known === 'rig') return `rev ${revision.number}`;
+  return known === 'lab' ? 'lab' : 'what if';
 }
 
 export function fieldText(value: number | null, decimals: number): string | null {
