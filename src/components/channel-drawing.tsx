@@ -31,7 +31,7 @@ export function ChannelDrawing({ label, parts, arcs, even, length_mm, onToggle }
   const lower = electrodePath({ ...body, y: height - bar, facing: 'up' });
   const partWidth = long / Math.max(1, parts.length);
   const middle = (i: number): number => end + (i + 0.5) * partWidth;
-  const marks = [0, 0.25, 0.5, 0.75, 1];
+  const marks = long > 500 ? [0, 0.25, 0.5, 0.75, 1] : [0, 0.5, 1];
   return (
     <div ref={ref} className="channel" role="group" aria-label={label}>
       <svg aria-hidden="true">

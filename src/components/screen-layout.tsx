@@ -23,12 +23,12 @@ export function ScreenLayout(props: ScreenLayoutProps) {
       className={`screen-layout${banner === undefined ? '' : ' with-banner'}${fields === undefined && thumbs === undefined ? ' wide' : ''}`}
     >
       {strip}
-      {tooth}
-      <div className="screen-scroll">
+      <aside>{tooth}</aside>
+      <main className="screen-scroll">
         {banner === undefined ? null : <div className="screen-banner">{banner}</div>}
-        <main className="screen-figure">{children}</main>
+        <div className="screen-figure">{children}</div>
         {fields === undefined ? null : <div className="screen-fields">{fields}</div>}
-      </div>
+      </main>
       {thumbs === undefined ? null : <div className="screen-thumbs">{thumbs}</div>}
       <div className="screen-places">{places}</div>
     </div>

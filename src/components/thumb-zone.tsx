@@ -12,10 +12,10 @@ export interface ThumbZoneProps {
 export function ThumbZone({ label, main, others = [] }: ThumbZoneProps) {
   const [lower, upper] = others;
   return (
-    <div className="thumb-zone" role="group" aria-label={label}>
+    <section className="thumb-zone" aria-label={label}>
       {upper}
       {lower}
       {main}
-    </div>
+    </section>
   );
 }

@@ -81,7 +81,7 @@ describe('reading off', () => {
 });
 
 describe('layout', () => {
-  const needs = { width: 842, height: 540, font: 22, slice: true, wall: true, topLabel: true };
+  const needs = { width: 842, height: 540, font: 22, lead: 28, slice: 19, wall: true, topLabel: true };
 
   it('gives the tablet the drawn places', () => {
     const layout = chartLayout(needs);
@@ -92,10 +92,11 @@ describe('layout', () => {
   });
 
   it('stacks the slice when letters are large', () => {
-    expect(standsBeside(842, 22)).toBe(true);
-    expect(standsBeside(390, 18)).toBe(true);
-    expect(standsBeside(842, 44)).toBe(false);
-    expect(chartLayout({ ...needs, font: 44 }).slice).toBeNull();
+    expect(standsBeside(needs)).toBe(true);
+    expect(standsBeside({ width: 390, font: 18, lead: 21, slice: 19 })).toBe(true);
+    expect(standsBeside({ ...needs, font: 26.4, lead: 33.6 })).toBe(false);
+    expect(standsBeside({ ...needs, slice: 30 })).toBe(false);
+    expect(chartLayout({ ...needs, font: 44, lead: 56 }).slice).toBeNull();
   });
 
   const least = sliceHeights({

@@ -121,7 +121,7 @@ function ReadOff({
   const start = layout.left - font * 0.55;
   const slice = layout.slice?.right;
   const across = (y: number, faceY: number): string =>
-    slice === undefined || Math.abs(faceY - y) > font * 0.7
+    slice === undefined || Math.abs(faceY - y) > font * (layout.width < 500 ? 0.2 : 0.7)
       ? `M${start} ${y}H${x}`
       : `M${slice + 3} ${faceY}L${start} ${y}H${x}`;
   return (

@@ -2,7 +2,7 @@ import { useRef, useState } from 'react';
 import { useSize } from '../use-size';
 import { ChartAxes } from './chart-axes';
 import { ChartCursor, plainWords } from './chart-cursor';
-import { chartLayout, sliceFaces, sliceHeights, standsBeside } from './chart-layout';
+import { chartLayout, sliceFaces, sliceHeights } from './chart-layout';
 import { cursorStops, type Plot } from './chart-paths';
 import { ChartPlot } from './chart-plot';
 import { ChartSlice } from './chart-slice';
@@ -33,11 +33,12 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
 
   const font = fonts.body;
   const drawn = size.width > 0 && size.height > 0 && font > 0;
-  const beside = slice !== undefined && drawn && standsBeside(size.width, font);
+  const letters = slice === undefined ? 0 : Math.max(slice.high.words.length, slice.low.words.length);
   const layout = chartLayout({
     ...size,
     font,
-    slice: slice !== undefined,
+    lead: fonts.lead,
+    slice: letters,
     wall: data.wall !== undefined,
     topLabel: data.wall !== undefined || data.spans !== undefined,
   });
@@ -50,7 +51,7 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
     y: scaleOf(data.y, layout.bottom, layout.top),
   };
   const least =
-    beside && layout.slice !== null
+    slice !== undefined && drawn && layout.slice !== null
       ? sliceHeights({
           fonts: slice.lean === 'high' ? fonts : { ...fonts, high: fonts.low, low: fonts.high },
           highNote: slice.high.note !== undefined,
@@ -81,7 +82,9 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
         <i className="size-answer" />
         <i className="size-read" />
       </span>
-      {slice !== undefined && drawn && !beside ? <ChartSlice slice={slice} place={null} /> : null}
+      {slice !== undefined && drawn && layout.slice === null ? (
+        <ChartSlice slice={slice} place={null} />
+      ) : null}
       <div ref={box} className="chart-box" style={{ ...height, ...minHeight }} hidden={asTable}>
         {drawn ? (
           <>

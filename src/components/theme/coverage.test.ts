@@ -52,15 +52,26 @@ describe('shipped faces', () => {
 
 describe('words of the app', () => {
   it('use no character that would fall back to another face', () => {
-    const strays = sourceFiles(src).flatMap((file) =>
-      [...new Set(stringsOf(file).join(''))]
-        // U+FFFF is no character: stores use it as the upper end of a range of keys.
-        .filter((sign) => sign > '\u007e' && sign !== '\uffff' && !isCovered(sign))
-        .map((sign) => `${path.relative(src, file)}: U+${(sign.codePointAt(0) ?? 0).toString(16)} ${sign}`),
-    );
+    const strays = sourceFiles(src)
+      .filter(mayStray)
+      .flatMap((file) =>
+        [...new Set(stringsOf(file).join(''))]
+          // U+FFFF is no character: stores use it as the upper end of a range of keys.
+          .filter((sign) => sign > '\u007e' && sign !== '\uffff' && !isCovered(sign))
+          .map((sign) => `${path.relative(src, file)}: U+${(sign.codePointAt(0) ?? 0).toString(16)} ${sign}`),
+      );
     expect(strays).toEqual([]);
   });
 });
+
+/** Parsing every file takes seconds; most hold no such character, not even in a comment or as an escape. */
+function mayStray(file: string): boolean {
+  const text = readFileSync(file, 'utf8');
+  const escaped = [...text.matchAll(/\\u\{?([0-9a-f]{4,6})/gi)].map(([, hex = '']) =>
+    String.fromCodePoint(Number.parseInt(hex, 16)),
+  );
+  return [...new Set([...text, ...escaped])].some((sign) => sign > '\u007e' && !isCovered(sign));
+}
 
 function isCovered(sign: string): boolean {
   const code = sign.codePointAt(0) ?? 0;
