@@ -10,14 +10,20 @@ const root = fileURLToPath(new URL('..', import.meta.url)).replace(/\/$/, '');
 const wanted = process.argv.slice(2).filter((argument) => argument !== '--');
 const keeper = createProcessKeeper();
 
+let stopping = false;
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-  process.once(signal, () => {
+  // Ctrl-C comes twice, from the terminal and from npm: the second one must not cut the first one short.
+  process.on(signal, () => {
+    if (stopping) return;
+    stopping = true;
     console.log(`\n${signal}: stopping everything that this run started.`);
-    void keeper.stopAll().then(() => process.exit(130));
+    void keeper.close().then(() => process.exit(130));
   });
 }
 
-process.exit(await main());
+const exitCode = await main();
+await keeper.close();
+if (!stopping) process.exit(exitCode);
 
 async function main() {
   const unknown = wanted.filter((name) => !stages.some((stage) => stage.name === name));
@@ -55,6 +61,7 @@ async function prepare(chosen) {
 async function runStages(chosen) {
   const results = new Map();
   for (const stage of chosen) {
+    if (stopping) break;
     const blocked = stage.after?.find((name) => results.get(name)?.failed > 0);
     console.log(`\n── ${stage.name}: ${stage.says}`);
     const started = performance.now();

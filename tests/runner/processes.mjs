@@ -1,7 +1,9 @@
 import { spawn } from 'node:child_process';
 import { randomUUID } from 'node:crypto';
-import { readFileSync, readdirSync } from 'node:fs';
-import { sleep } from '../../server/launch/programs.mjs';
+import { mkdtempSync, readFileSync, readdirSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import path from 'node:path';
+import { sleep, tiedToParent } from '../../server/launch/programs.mjs';
 
 const markName = 'HOLDOFF_TEST_RUN';
 const patienceMs = 5000;
@@ -9,20 +11,28 @@ const patienceMs = 5000;
 /**
  * Starts programs and finds all that came of them again. Browsers and databases leave the process group of
  * their parent, and may outlive it; a mark in the environment is handed down to all of them, and is this
- * run's alone, so nothing foreign can be hit.
+ * run's alone, so nothing foreign can be hit. Likewise all of them put their temporary files into one folder.
  */
 export function createProcessKeeper() {
   const mark = randomUUID();
-  const environment = { ...process.env, [markName]: mark };
+  const folder = mkdtempSync(path.join(tmpdir(), 'holdoff-run-'));
+  const environment = { ...process.env, [markName]: mark, TMPDIR: folder };
   delete environment['NODE_ENV'];
   return {
+    folder,
+    /** Ends everything and takes the temporary files away. */
+    async close() {
+      await this.stopAll();
+      rmSync(folder, { recursive: true, force: true, maxRetries: 3 });
+    },
     /**
      * @param {readonly string[]} args arguments for Node
      * @param {{cwd: string, env?: NodeJS.ProcessEnv}} options
      * @returns {Promise<number>} the exit code
      */
     node(args, options) {
-      const child = spawn(process.execPath, args, {
+      const tied = tiedToParent(process.execPath, args);
+      const child = spawn(tied.command, tied.args, {
         cwd: options.cwd,
         env: { ...environment, ...options.env },
         stdio: ['ignore', 'inherit', 'inherit'],

@@ -1,5 +1,4 @@
-import { existsSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { existsSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { ensureClient } from '../../server/launch/client-build.mjs';
 import { Refusal } from '../../server/launch/refusal.mjs';
@@ -79,24 +78,19 @@ function command(...commands) {
 /** @param {...string} projects @returns {Stage['run']} */
 function vitest(...projects) {
   return async ({ root, keeper }) => {
-    const folder = mkdtempSync(path.join(tmpdir(), 'holdoff-tests-'));
-    const report = path.join(folder, 'report.json');
-    try {
-      const code = await keeper.node(
-        [
-          'node_modules/vitest/vitest.mjs',
-          'run',
-          ...projects.flatMap((project) => ['--project', project]),
-          '--reporter=default',
-          '--reporter=json',
-          `--outputFile.json=${report}`,
-        ],
-        { cwd: root },
-      );
-      return readReport(report, code);
-    } finally {
-      rmSync(folder, { recursive: true, force: true });
-    }
+    const report = path.join(keeper.folder, `report-${projects.join('-')}.json`);
+    const code = await keeper.node(
+      [
+        'node_modules/vitest/vitest.mjs',
+        'run',
+        ...projects.flatMap((project) => ['--project', project]),
+        '--reporter=default',
+        '--reporter=json',
+        `--outputFile.json=${report}`,
+      ],
+      { cwd: root },
+    );
+    return readReport(report, code);
   };
 }
 
