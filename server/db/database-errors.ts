@@ -19,6 +19,8 @@ export function isDatabaseError(error: unknown): boolean {
   if (!(error instanceof Error)) return false;
   if (error.name === 'KnexTimeoutError') return true;
   if ('sqlState' in error || 'sqlMessage' in error) return true;
+  // The driver's own word for a connection that is lost; some of these carry no code.
+  if ('fatal' in error && error.fatal === true) return true;
   return 'code' in error && typeof error.code === 'string' && lostConnection.has(error.code);
 }
 

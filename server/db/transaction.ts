@@ -15,11 +15,22 @@ export async function inTransaction<T>(
   work: (transaction: Transaction) => Promise<T>,
 ): Promise<T> {
   for (let attempt = 1; ; attempt++) {
+    let thrown: { readonly error: unknown } | undefined;
     try {
       // Knex rolls back by itself when `work` rejects, also after a lock wait timeout, which rolls back nothing.
-      return await database.transaction(work);
+      return await database.transaction(async (transaction) => {
+        try {
+          return await work(transaction);
+        } catch (error) {
+          thrown = { error };
+          throw error;
+        }
+      });
     } catch (error) {
-      if (attempt === mostAttempts || !isRetryable(error)) throw error;
+      // On a dead connection the rollback fails as well, and its error would stand in for what went wrong.
+      const first = thrown === undefined ? error : thrown.error;
+      const rolledBack = first === error;
+      if (attempt === mostAttempts || !rolledBack || !isRetryable(first)) throw first;
       await sleep(firstPauseMs * 2 ** attempt * (0.5 + Math.random()));
     }
   }

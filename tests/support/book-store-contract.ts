@@ -142,7 +142,8 @@ export function describeBookStore(name: string, open: () => Promise<ContractStor
       const first = sample(whose, 1);
       const second = sample(whose, 2);
       await append(store, whose, [first], [claim(first.id), claim(second.id)]);
-      const changed = { ...claim(first.id), parent: randomUUID() };
+      const before = claim(first.id);
+      const changed: Document = before.kind === 'claim' ? { ...before, parent: randomUUID() } : before;
       await append(store, whose, [second], [changed]);
       const found = (await linesOf(store, lab)).map((line) => JSON.parse(line) as Document);
       expect(found.toSorted(byId)).toEqual([changed, claim(second.id)].toSorted(byId));
