@@ -23,7 +23,7 @@ describe('tablets of the crew', () => {
   it('says what waited as last known, never that nothing waits now', () => {
     expect(pendingWords(tablet({}), 3 * HOUR_MS)).toBe('12 entries, the oldest 2 h');
     expect(pendingWords(tablet({ pending: { count: 1, oldest_wall_ms: null } }), 0)).toBe('1 entry');
-    expect(pendingWords(tablet({ pending: { count: 0, oldest_wall_ms: null } }), 0)).toBe('nothing waited');
+    expect(pendingWords(tablet({ pending: { count: 0, oldest_wall_ms: null } }), 0)).toBe('nothing');
     expect(pendingWords(tablet({ pending: null }), 0)).toBe('not known');
   });
 

@@ -13,7 +13,7 @@ export function lastSeenWords(tablet: Tablet, now_ms: number): string {
 export function pendingWords(tablet: Tablet, now_ms: number): string {
   const { pending } = tablet;
   if (pending === null) return 'not known';
-  if (pending.count === 0) return 'nothing waited';
+  if (pending.count === 0) return 'nothing';
   const entries = `${pending.count} ${pending.count === 1 ? 'entry' : 'entries'}`;
   if (pending.oldest_wall_ms === null) return entries;
   return `${entries}, the oldest ${ageWords(Math.max(0, now_ms - pending.oldest_wall_ms))}`;

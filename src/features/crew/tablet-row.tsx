@@ -28,7 +28,7 @@ export function TabletRow({ tablet, now_ms, mayRevoke, revoke }: Props) {
         {revoked ? <b>, revoked</b> : null}
       </p>
       <p className="muted">
-        seen {lastSeenWords(tablet, now_ms)}, {tablet.last_seq} entries taken, then{' '}
+        seen {lastSeenWords(tablet, now_ms)}, {tablet.last_seq} entries taken. Waiting then:{' '}
         {pendingWords(tablet, now_ms)}
       </p>
       {mayRevoke && !revoked && !confirming ? (

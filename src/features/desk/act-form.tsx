@@ -51,7 +51,7 @@ export function ActForm(props: Props) {
           }}
         />
       </div>
-      {hindrance === null ? null : <p className="muted">{hindrance}</p>}
+      {props.hindrance === null ? null : <p className="muted">{props.hindrance}</p>}
     </div>
   );
 }

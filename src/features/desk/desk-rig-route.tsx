@@ -8,7 +8,7 @@ import { momentWords } from '../../domain/report/time-words';
 import { DeskScreen } from './desk-screen';
 import { IncidentSection } from './incident-section';
 import { PartingSection } from './parting-section';
-import { PermitSection } from './permit-section';
+import { PermitSection, WithdrawSection } from './permit-section';
 import { StandDownSection } from './stand-down-section';
 import { useNames } from './use-names';
 
@@ -36,8 +36,8 @@ function OpenedRig({ id }: { readonly id: string }) {
           {rig.name}, revision {latest.number}
         </h2>
         <p className="muted">
-          {nameOf(latest.by)}, {momentWords(latest.stamp.wall_ms, zone)}: {latest.why}. Envelope{' '}
-          {envelopeWords(latest.spec.envelope)}.{' '}
+          {nameOf(latest.by)}, {momentWords(latest.stamp.wall_ms, zone)}: {latest.why.replace(/\.$/, '')}.
+          Envelope {envelopeWords(latest.spec.envelope)}.{' '}
           <Link to={paths.rig(rig.id)} className="underline">
             The whole rig
           </Link>
@@ -48,6 +48,7 @@ function OpenedRig({ id }: { readonly id: string }) {
         <PermitSection rig={rig} zone={zone} />
         <div className="desk-column">
           <StandDownSection rig={rig} zone={zone} />
+          <WithdrawSection rig={rig} />
           <IncidentSection rig={rig} zone={zone} />
         </div>
       </div>

@@ -21,6 +21,7 @@ export function PermitSection({ rig, zone }: Props) {
   const { best_ms } = useNow(60_000);
   const permit = standingPermit(rig, best_ms);
   const may = useMay();
+  const nameOf = useNames();
   return (
     <section className="desk-column" aria-label="Permit">
       <h3>{permit === null ? 'No permit rules' : permitWords(permit, zone)}</h3>
@@ -28,7 +29,9 @@ export function PermitSection({ rig, zone }: Props) {
       {permit === null ? (
         <LastPermit rig={rig} now_ms={best_ms} zone={zone} />
       ) : (
-        <Standing rig={rig} permit={permit} />
+        <p>
+          {envelopeWords(permit.envelope)}, by {nameOf(permit.by)}
+        </p>
       )}
       {may('permit.granted') ? (
         <PermitGrant rig={rig} zone={zone} />
@@ -76,29 +79,29 @@ function LastPermit({ rig, now_ms, zone }: Props & { readonly now_ms: number }) 
   );
 }
 
-function Standing({ rig, permit }: { readonly rig: RigDoc; readonly permit: RigDoc['permits'][number] }) {
-  const nameOf = useNames();
+/** Taking a permit back rules on this tablet at once, before the server has heard of it. */
+export function WithdrawSection({ rig }: { readonly rig: RigDoc }) {
+  const { best_ms } = useNow(60_000);
   const may = useMay();
   const act = useAct();
+  const permit = standingPermit(rig, best_ms);
+  const said = act.logged === null ? null : <ActOutcome entry={act.logged} />;
+  if (permit === null || !may('permit.withdrawn')) return said;
   return (
-    <div className="desk-form">
-      <p>
-        {envelopeWords(permit.envelope)}, by {nameOf(permit.by)}
-      </p>
-      {may('permit.withdrawn') ? (
-        <ActForm
-          draft={`desk/withdraw/${permit.entry}`}
-          wordsLabel="Why it is withdrawn"
-          needed="Say why it is withdrawn."
-          label="Withdraw"
-          holdLabel={`Hold: withdraw the permit of ${rig.name}`}
-          hindrance={null}
-          onComplete={(why) =>
-            act.log({ kind: 'permit.withdrawn', subject: rig.id, body: { permit: permit.entry, why } })
-          }
-        />
-      ) : null}
-      {act.logged === null ? null : <ActOutcome entry={act.logged} />}
-    </div>
+    <section className="desk-form" aria-label="Withdraw the permit">
+      <h3>Withdraw the permit</h3>
+      <ActForm
+        draft={`desk/withdraw/${permit.entry}`}
+        wordsLabel="Why it is withdrawn"
+        needed="Say why it is withdrawn."
+        label="Withdraw permit"
+        holdLabel={`Hold: withdraw the permit of ${rig.name}`}
+        hindrance={null}
+        onComplete={(why) =>
+          act.log({ kind: 'permit.withdrawn', subject: rig.id, body: { permit: permit.entry, why } })
+        }
+      />
+      {said}
+    </section>
   );
 }

@@ -32,7 +32,7 @@ export function WaitingRow({ chosen }: { readonly chosen?: string }) {
               title={pair.title}
               foot={pair.by}
               footEnd={pair.age}
-              chosen={chosen !== undefined && (item.id === chosen || item.rig === chosen)}
+              chosen={chosen !== undefined && pair.href.endsWith(chosen)}
               onPress={() => void navigate(pair.href)}
             >
               {pair.substance}
