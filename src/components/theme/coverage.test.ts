@@ -67,10 +67,10 @@ describe('words of the app', () => {
 /** Parsing every file takes seconds; most hold no such character, not even in a comment or as an escape. */
 function mayStray(file: string): boolean {
   const text = readFileSync(file, 'utf8');
-  const escaped = [...text.matchAll(/\\u\{?([0-9a-f]{4,6})/gi)].map(([, hex = '']) =>
-    String.fromCodePoint(Number.parseInt(hex, 16)),
+  const escaped = [...text.matchAll(/\\u(?:\{([0-9a-f]+)\}|([0-9a-f]{4}))/gi)].map(([, long, short]) =>
+    String.fromCodePoint(Number.parseInt(long ?? short ?? '0', 16)),
   );
-  return [...new Set([...text, ...escaped])].some((sign) => sign > '\u007e' && !isCovered(sign));
+  return [...Array.from(text), ...escaped].some((sign) => sign > '\u007e' && !isCovered(sign));
 }
 
 function isCovered(sign: string): boolean {
