@@ -48,6 +48,8 @@ export type HazardType = 'below-reflex' | 'reflex' | 'serious-injury' | 'may-kil
 export interface HazardBand {
   readonly type: HazardType;
   readonly words: string;
+  /** The effect alone, for places that show energy and supply beside it already. */
+  readonly effect: string;
   readonly exceedsTouchLimit: boolean;
 }
 
@@ -75,6 +77,7 @@ export function hazardBand(
   const energy = formatFigure(energy_J, { digits: { significant: 2 }, rounding: 'up' });
   return ok({
     type,
+    effect: BAND_WORDS[type],
     exceedsTouchLimit: touch.value,
     words: `${energy}\u2009J at the supply\u2019s ${String(supply.kV)}\u2009kV and ${String(supply.mA)}\u2009mA: ${BAND_WORDS[type]}`,
   });

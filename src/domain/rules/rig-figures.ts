@@ -27,7 +27,7 @@ export function rigFigures(
   const { supply_kV, supply_mA } = spec.charging;
   const stored = storedEnergy(storing_F(spec, first.value, second.value), supply_kV * 1000);
   if (!stored.ok) return stored;
-  const hazard = hazardBand(first.value + second.value, { kV: supply_kV, mA: supply_mA });
+  const hazard = hazardBand(storing_F(spec, first.value, second.value), { kV: supply_kV, mA: supply_mA });
   if (!hazard.ok) return hazard;
   const wait = rigWait(spec, settings);
   if (!wait.ok) return wait;

@@ -80,9 +80,7 @@ function StoredPin({ revision, settings, figures }: Omit<Props, 'rig'> & { reado
           </span>
         ) : null}
       </span>
-      {figures.hazard.type === 'below-reflex' ? null : (
-        <span className="bench-pin-caution">{figures.hazard.words}</span>
-      )}
+      <span className="bench-pin-caution">{sentence(figures.hazard.effect)}</span>
     </div>
   );
 }
@@ -131,4 +129,8 @@ function one(value: number, rounding: 'up' | 'down' | 'nearest'): string {
 /** Energies round up: two decimals, three below a tenth of a joule. */
 function energy(value_J: number): string {
   return formatFigure(value_J, { digits: { decimals: value_J < 0.1 ? 3 : 2 }, rounding: 'up' });
+}
+
+function sentence(words: string): string {
+  return words.charAt(0).toUpperCase() + words.slice(1);
 }

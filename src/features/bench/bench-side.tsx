@@ -6,7 +6,7 @@ import { useHandover } from '../../data/use-handover';
 import { useNow } from '../../data/use-now';
 import { standingReading } from '../../domain/book/documents/reading';
 import type { RigDoc } from '../../domain/book/documents/rig';
-import { agoWords, momentWords } from '../../domain/report/time-words';
+import { agoWords, dayWords } from '../../domain/report/time-words';
 import { LOOK_WORDS } from '../../domain/report/words';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import { formatFigure } from '../../domain/units/format-quantity';
@@ -51,7 +51,7 @@ function LastFiring({ id, zone }: { readonly id: string; readonly zone: string }
   const now = last === undefined ? null : standingReading(last);
   return (
     <Link className="bench-last" to={paths.firing(id)}>
-      <p className="muted">Last firing, {momentWords(firing.opened.stamp.wall_ms, zone)}</p>
+      <p className="muted">Last firing, {dayWords(firing.opened.stamp.wall_ms, zone)}</p>
       <Reading
         value={formatFigure(firing.shots, { digits: { decimals: 0 }, rounding: 'nearest' })}
         unit="shots"
