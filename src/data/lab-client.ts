@@ -62,6 +62,8 @@ export type LabOpening =
 
 export interface LabOptions {
   readonly pin_iterations?: number;
+  /** False where whoever opens it calls `exchange.round` by hand. */
+  readonly exchanges_by_itself?: boolean;
 }
 
 export async function openLab(ports: Ports, place: LabPlace, options: LabOptions = {}): Promise<LabOpening> {
@@ -71,7 +73,7 @@ export async function openLab(ports: Ports, place: LabPlace, options: LabOptions
   await lab.people.load();
   await Promise.all([lab.view.reload(), lab.drafts.load(), lab.resume.load()]);
   await lab.session.restore();
-  lab.handover.start();
+  if (options.exchanges_by_itself !== false) lab.handover.start();
   return { type: 'open', lab };
 }
 

@@ -10,6 +10,7 @@ const NO_LAB: AppendOutcome = {
   type: 'not-saved',
   cause: 'closed',
   words: 'NOT SAVED: this tablet is not enrolled in any lab yet.',
+  detail: '',
 };
 const NOT_JUDGED: Judged = {
   verdict: 'held-back',

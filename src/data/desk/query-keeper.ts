@@ -1,4 +1,4 @@
-import { dehydrate, hydrate, type QueryClient } from '@tanstack/react-query';
+import { dehydrate, hydrate, type DehydratedState, type QueryClient } from '@tanstack/react-query';
 import * as z from 'zod/mini';
 import type { SmallStore, Timers } from '../ports/ports';
 
@@ -26,7 +26,7 @@ export function keepQueries({ client, small, timers, now, key, version }: Keeper
   if (text !== null) {
     const kept = readKept(text);
     if (kept !== null && kept.version === version && now() - kept.kept_ms < KEEP_MS)
-      hydrate(client, kept.state);
+      hydrate(client, kept.state as DehydratedState);
     else small.remove(key);
   }
   const write = () => {

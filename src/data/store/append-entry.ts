@@ -22,6 +22,9 @@ export interface AppendOrder {
 
 /** Takes `seq` and running number and seals the entry, all inside the caller's strict transaction (protocol 2.4). */
 export async function appendInside(database: BookDatabase, order: AppendOrder): Promise<EntryRow> {
+  // A connection may be lost between commit and answer: the second try must find what the first one wrote.
+  const written = await database.entries.where('id').equals(order.id).first();
+  if (written !== undefined) return written;
   const seq = (await lastSeq(database, order.device)) + 1;
   const { kind, version } = order.draft;
   const subject = subjectOf(order);

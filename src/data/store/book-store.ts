@@ -54,7 +54,11 @@ export function openBookStore(lab: string, ports: StorePorts) {
       ),
     append: (order: AppendOrder): Promise<WriteOutcome<EntryRow>> =>
       write(() =>
-        database.transaction('rw', [database.entries, database.keys], () => appendInside(database, order)),
+        database.transaction(
+          'rw',
+          [database.entries, database.keys],
+          async () => await appendInside(database, order),
+        ),
       ),
     acknowledge: (receipts: readonly Receipt[], received: Received) =>
       change(database, () => acknowledgeInside(database, receipts, received)),
@@ -131,8 +135,9 @@ async function openWithin(database: BookDatabase, timers: Timers): Promise<OpenO
   return outcome;
 }
 
-function change<T>(database: BookDatabase, work: () => Promise<T>): Promise<T> {
-  return Promise.resolve(database.transaction('rw', [database.entries, database.keys], work));
+/** Dexie follows awaits only inside a function that is itself written `async`: a bare arrow would commit too early. */
+async function change<T>(database: BookDatabase, work: () => Promise<T>): Promise<T> {
+  return await database.transaction('rw', [database.entries, database.keys], async () => await work());
 }
 
 function ofState(database: BookDatabase, state: EntryRow['state'], device: string) {

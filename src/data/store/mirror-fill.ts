@@ -23,7 +23,7 @@ export function beginFill(database: MirrorDatabase) {
       database.transaction(
         'rw',
         [database.documents, database.staged, database.entries, database.meta, database.set_aside],
-        () => flip(database, { header, promised, since }),
+        async () => await flip(database, { header, promised, since }),
       ),
   };
 }

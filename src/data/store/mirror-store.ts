@@ -73,8 +73,10 @@ export function openMirrorStore(lab: string, idb: IdbPort) {
           .toArray()
       ).map((row) => row.pulled),
     applyPage: (page: PullAnswer) =>
-      database.transaction('rw', [database.documents, database.entries, database.meta], () =>
-        applyPage(database, page),
+      database.transaction(
+        'rw',
+        [database.documents, database.entries, database.meta],
+        async () => await applyPage(database, page),
       ),
     noteBackup: (revision: number) =>
       database.transaction('rw', [database.meta], async () => {

@@ -4,6 +4,8 @@ export interface StorageFailure {
   readonly type: 'not-saved';
   readonly cause: StorageCause;
   readonly words: string;
+  /** What the browser said, for whoever is asked for help. */
+  readonly detail: string;
 }
 
 const WORDS: Readonly<Record<StorageCause, string>> = {
@@ -16,7 +18,7 @@ const WORDS: Readonly<Record<StorageCause, string>> = {
 
 export function storageFailure(error: unknown): StorageFailure {
   const cause = storageCause(error);
-  return { type: 'not-saved', cause, words: WORDS[cause] };
+  return { type: 'not-saved', cause, words: WORDS[cause], detail: String(error) };
 }
 
 const BY_NAME: Readonly<Record<string, StorageCause>> = {
