@@ -1,18 +1,34 @@
-import type { ChartData, ChartReading } from '../../components/chart/types';
+import type { ChartData, ChartReading, ChartWords } from '../../components/chart/types';
 import type { RigSpec } from '../../domain/book/rig-spec';
-import { gapCurve } from '../../domain/gap/gap-curve';
+import { gapCurve, type GapCurvePoint } from '../../domain/gap/gap-curve';
 import { reachableVoltage } from '../../domain/charging/supply-reach';
 import { chargingOf } from '../../domain/rules/rig-figures';
 import { gapSetupOf } from '../../domain/rules/rig-gap';
 import type { FormValues } from './reading-form';
 import { isSelfBreak, type StandingRow } from './reading-fit';
 
+/** What of the form the chart hangs on. */
+export type ChartedValues = Pick<
+  FormValues,
+  'voltage_kV' | 'pressure_bar_g' | 'ambient_bar_abs' | 'temperature_C' | 'gas'
+>;
+
 export interface FiringChartInput {
   readonly spec: RigSpec;
-  readonly values: FormValues;
+  readonly values: ChartedValues;
   readonly rows: readonly StandingRow[];
   readonly sigmas: ReadonlyMap<string, number>;
 }
+
+export const FIRING_CHART_WORDS: ChartWords = {
+  showTable: 'Table',
+  showChart: 'Curve',
+  low: 'nothing fires below',
+  high: 'may hold up to',
+  law: 'law',
+  own: 'own',
+  number: 'No.',
+};
 
 const CURVE_POINTS = 40;
 /** Margin around the allowed pressures, share of their span. */
@@ -29,50 +45,54 @@ const ODD_SIGMA = 3;
 export function firingChart({ spec, values, rows, sigmas }: FiringChartInput): ChartData | null {
   const { ambient_bar_abs, temperature_C, gas, pressure_bar_g } = values;
   if (ambient_bar_abs === null || temperature_C === null) return null;
-  const readings = rows.filter((row) => isSelfBreak(row.values));
-  const x = pressureRange(spec, [...readings.map((row) => row.values.pressure_bar_g), pressure_bar_g ?? 0]);
+  const selfBreaks = rows.filter((row) => isSelfBreak(row.values));
+  const now = pressure_bar_g === null ? [] : [pressure_bar_g];
+  const x = pressureRange(spec, [...selfBreaks.map((row) => row.values.pressure_bar_g), ...now]);
   const gauge = Array.from(
     { length: CURVE_POINTS + 1 },
     (_, i) => x.min + ((x.max - x.min) * i) / CURVE_POINTS,
   );
-  const setup = { ...gapSetupOf(spec, temperature_C), gas };
   const curve = gapCurve(
-    setup,
-    pressure_bar_g === null
-      ? gauge.map((bar) => bar + ambient_bar_abs)
-      : [...gauge.map((bar) => bar + ambient_bar_abs), pressure_bar_g + ambient_bar_abs],
+    { ...gapSetupOf(spec, temperature_C), gas },
+    [...gauge, ...now].map((bar_g) => bar_g + ambient_bar_abs),
   );
   if (!curve.ok) return null;
-  const at = pressure_bar_g === null ? undefined : curve.value.at(-1);
-  const points = curve.value
-    .slice(0, gauge.length)
-    .flatMap((point) =>
-      point.valid
-        ? [
-            {
-              x: point.pressure_bar_abs - ambient_bar_abs,
-              low: point.low_kV,
-              high: point.high_kV,
-              law: point.law_kV,
-            },
-          ]
-        : [],
-    );
+  const points = curve.value.slice(0, gauge.length).flatMap((point) =>
+    point.valid
+      ? [
+          {
+            x: point.pressure_bar_abs - ambient_bar_abs,
+            low: point.low_kV,
+            high: point.high_kV,
+            law: point.law_kV,
+          },
+        ]
+      : [],
+  );
   const [first] = points;
   const last = points.at(-1);
   if (first === undefined || last === undefined) return null;
-  const kV = readings.map((row) => row.values.voltage_kV);
-  const y = voltageRange([first.low, last.high, ...kV]);
+  const y = voltageRange([first.low, last.high, ...selfBreaks.map((row) => row.values.voltage_kV)]);
   return {
     x: { ...x, unit: 'bar(g)', decimals: 2 },
     y: { ...y, unit: 'kV', decimals: 1 },
     band: { points, above: 'breaks', below: 'holds' },
     law: points.map((point) => ({ x: point.x, y: point.law })),
-    readings: readings.map((row) => dot(row, sigmas)),
-    ...(at?.valid === true ? { point: { x: pressure_bar_g ?? 0, low: at.low_kV, high: at.high_kV } } : {}),
+    readings: selfBreaks.map((row) => dot(row, sigmas)),
+    ...workingPoint(values, curve.value[gauge.length]),
     ...limitOf(spec, y.max),
     ...(last.x < x.max - 1e-9 ? { notValid: { from: last.x, label: 'not valid here' } } : {}),
   };
+}
+
+/** Where the form stands: between its two limits, with its voltage once there is one. */
+function workingPoint(
+  { pressure_bar_g, voltage_kV }: ChartedValues,
+  at: GapCurvePoint | undefined,
+): Pick<ChartData, 'point'> {
+  if (at?.valid !== true || pressure_bar_g === null) return {};
+  const point = { x: pressure_bar_g, low: at.low_kV, high: at.high_kV };
+  return { point: voltage_kV === null ? point : { ...point, y: voltage_kV } };
 }
 
 function dot({ reading, values }: StandingRow, sigmas: ReadonlyMap<string, number>): ChartReading {

@@ -35,15 +35,15 @@ const ARCS: Readonly<Partial<Record<Looked, readonly ChannelPartKey[]>>> = {
   'arc-both-ends': ['a', 'b'],
 };
 
-export function arcsOf(looked: Looked): readonly ChannelPartKey[] {
-  return ARCS[looked] ?? [];
+export function arcsOf(looked: Looked | null): readonly ChannelPartKey[] {
+  return looked === null ? [] : (ARCS[looked] ?? []);
 }
 
 /**
  * What the channel looked like after a touch on one of its parts. The ends go together; the middle stands alone, since a
  * reading holds one look. With the last arc taken away it was even.
  */
-export function toggleArc(looked: Looked, key: ChannelPartKey): Looked {
+export function toggleArc(looked: Looked | null, key: ChannelPartKey): Looked {
   const now = arcsOf(looked);
   if (now.includes(key)) {
     const [left] = now.filter((each) => each !== key);
@@ -54,9 +54,9 @@ export function toggleArc(looked: Looked, key: ChannelPartKey): Looked {
 }
 
 /** Which of the row stands between faces; none while an arc is drawn. */
-export function rowOf(looked: Looked): LookRow | null {
+export function rowOf(looked: Looked | null): LookRow | null {
   if (looked === 'even' || looked === 'surface-flashover') return looked;
-  return isFailure(looked) ? 'failed' : null;
+  return looked !== null && isFailure(looked) ? 'failed' : null;
 }
 
 export function isFailure(looked: Looked): boolean {
@@ -64,9 +64,13 @@ export function isFailure(looked: Looked): boolean {
 }
 
 /** The row with the failure by its own name once one is chosen. */
-export function lookRowFor(looked: Looked): readonly { readonly value: LookRow; readonly label: string }[] {
+export function lookRowFor(
+  looked: Looked | null,
+): readonly { readonly value: LookRow; readonly label: string }[] {
   return LOOK_ROW.map((row) =>
-    row.value === 'failed' && isFailure(looked) ? { ...row, label: LOOK_WORDS[looked] } : row,
+    row.value === 'failed' && looked !== null && isFailure(looked)
+      ? { ...row, label: LOOK_WORDS[looked] }
+      : row,
   );
 }
 

@@ -54,14 +54,22 @@ describe('the first reading of a firing', () => {
     expect(refusal.ok ? null : fieldOf(refusal.refusal)).toBe('voltage_kV');
     const shots = toReading(first, enter(EMPTY_DRAFT, 'voltage_kV', 18.9));
     expect(shots.ok ? null : shots.refusal.words).toBe('Shots: enter how many this burst had.');
+    const how = toReading(first, enter(enter(EMPTY_DRAFT, 'voltage_kV', 18.9), 'shots', 40));
+    expect(how.ok ? null : fieldOf(how.refusal)).toBe('how');
+    const looked = toReading(
+      first,
+      enter(enter(enter(EMPTY_DRAFT, 'voltage_kV', 18.9), 'shots', 40), 'how', 'set'),
+    );
+    expect(looked.ok ? null : fieldOf(looked.refusal)).toBe('looked');
   });
 
   it('stores as carried over everything that nobody touched', () => {
-    const draft = enter(enter(EMPTY_DRAFT, 'voltage_kV', 18.9), 'shots', 40);
+    const measured = enter(enter(EMPTY_DRAFT, 'voltage_kV', 18.9), 'shots', 40);
+    const draft = enter(enter(measured, 'how', 'self-break'), 'looked', 'even');
     const body = must(toReading(first, draft));
     expect(body.carried_over).not.toContain('voltage_kV');
     expect(body.carried_over).toContain('ambient_bar_abs');
-    expect(body.carried_over).toHaveLength(CARRIABLE.length - 1);
+    expect(body.carried_over).toHaveLength(CARRIABLE.length - 3);
     expect(checkBody('firing.reading', body).type).toBe('ok');
   });
 });

@@ -7,14 +7,14 @@ import { isQuantity, QUANTITY_KEYS, QUANTITY_TRAITS, type QuantityKey } from './
 
 export type Carriable = (typeof CARRIABLE)[number];
 export type ChoiceKey = 'how' | 'gas' | 'looked';
-export type FieldKey = QuantityKey | 'how' | 'gas' | 'note' | 'summary';
+export type FieldKey = QuantityKey | ChoiceKey | 'note' | 'summary';
 
 type Quantities = { readonly [K in QuantityKey]: number | null };
 /** A reading as it stands on the form: what is not known yet is null, never a made-up figure. */
 export interface FormValues extends Quantities {
-  readonly how: ReadingValues['how'];
+  readonly how: ReadingValues['how'] | null;
   readonly gas: ReadingValues['gas'];
-  readonly looked: ReadingValues['looked'];
+  readonly looked: ReadingValues['looked'] | null;
 }
 type ValueKey = keyof FormValues;
 
@@ -49,7 +49,10 @@ export const EMPTY_DRAFT: ReadingDraft = {
   open: false,
 };
 
-/** The first reading of a firing stands on the rig and the lab; a voltage and a count of shots nobody knows beforehand. */
+/**
+ * The first reading of a firing stands on the rig and the lab. Voltage, how it was measured, shots and looks nobody knows
+ * beforehand: a guess there would pass for something that was seen, and the calibration lives on measured self-breaks.
+ */
 export function firstBase(spec: RigSpec, revision: string, settings: LabSettings | undefined): Base {
   const none = 'not entered';
   const rig = `rig, rev ${revision}`;
@@ -65,9 +68,9 @@ export function firstBase(spec: RigSpec, revision: string, settings: LabSettings
       ambient_bar_abs: settings?.ambient_bar_abs ?? null,
       temperature_C: settings?.ambient_C ?? null,
       humidity_pct: null,
-      how: 'self-break',
+      how: null,
       gas: spec.gap.gas,
-      looked: 'even',
+      looked: null,
     },
     source: {
       voltage_kV: none,
@@ -79,9 +82,9 @@ export function firstBase(spec: RigSpec, revision: string, settings: LabSettings
       ambient_bar_abs: lab,
       temperature_C: lab,
       humidity_pct: none,
-      how: 'not entered',
+      how: none,
       gas: rig,
-      looked: 'not entered',
+      looked: none,
     },
   };
 }
@@ -144,16 +147,9 @@ export function stepQuantity(
 /** The body of the reading, or what is still missing before it can be logged. */
 export function toReading(base: Base, draft: ReadingDraft): Result<ReadingValues> {
   const values = formValues(base, draft);
-  const missing = firstMissing(values);
-  if (missing !== null) return refused(missing);
-  const { voltage_kV, pressure_bar_g, shots, ambient_bar_abs, temperature_C } = values;
+  if (!isComplete(values)) return refused(firstMissing(values));
   return ok({
     ...values,
-    voltage_kV: voltage_kV ?? 0,
-    pressure_bar_g: pressure_bar_g ?? 0,
-    shots: shots ?? 0,
-    ambient_bar_abs: ambient_bar_abs ?? 0,
-    temperature_C: temperature_C ?? 0,
     note: draft.note.trim(),
     carried_over: CARRIABLE.filter((key) => isCarried(draft, key)),
   });
@@ -175,17 +171,31 @@ export function toCorrection(before: ReadingValues, draft: ReadingDraft): Result
 }
 
 /** The field to open for what is missing; null for those that have none. */
-export function fieldOf(refusal: Refusal): QuantityKey | null {
-  return refusal.field !== undefined && isQuantity(refusal.field) ? refusal.field : null;
+export function fieldOf(refusal: Refusal): FieldKey | null {
+  const { field } = refusal;
+  return field === 'how' || field === 'looked' || (field !== undefined && isQuantity(field)) ? field : null;
 }
 
-function firstMissing(values: FormValues): Refusal | null {
+type Complete = Omit<ReadingValues, 'note' | 'carried_over'>;
+
+function isComplete(values: FormValues): values is FormValues & Complete {
+  return (
+    values.how !== null &&
+    values.looked !== null &&
+    QUANTITY_KEYS.every((key) => QUANTITY_TRAITS[key].optional || values[key] !== null)
+  );
+}
+
+/** In the order in which the screen shows them. */
+function firstMissing(values: FormValues): Refusal {
+  const empty = (field: FieldKey, words: string): Refusal => ({ type: 'empty', field, words });
   for (const key of QUANTITY_KEYS) {
     const { optional, label } = QUANTITY_TRAITS[key];
     if (optional || values[key] !== null) continue;
-    const words =
-      key === 'shots' ? 'Shots: enter how many this burst had.' : `${label}: enter a number before logging.`;
-    return { type: 'empty', field: key, words };
+    if (key === 'shots') return empty(key, 'Shots: enter how many this burst had.');
+    return empty(key, `${label}: enter a number before logging.`);
   }
-  return null;
+  return values.how === null
+    ? empty('how', 'Voltage was: choose set, held or self-break.')
+    : empty('looked', 'How it looked: touch the channel, or choose a word below it.');
 }
