@@ -40,9 +40,9 @@ const PLAIN: Readonly<Record<string, readonly [label: string, unit: string]>> = 
   'model.gap_nH': ['Gap inductance', 'nH'],
   'model.channel_nH': ['Channel inductance', 'nH'],
   'model.known': ['Inductances are', ''],
-  'envelope.max_kV': ['Highest voltage', 'kV'],
-  'envelope.max_bar_g': ['Highest pressure', 'bar(g)'],
-  'envelope.max_rate_Hz': ['Highest rate', 'Hz'],
+  'envelope.max_kV': ['Envelope voltage', 'kV'],
+  'envelope.max_bar_g': ['Envelope pressure', 'bar(g)'],
+  'envelope.max_rate_Hz': ['Envelope rate', 'Hz'],
 };
 
 const OF_CAPACITOR: Readonly<Record<string, readonly [label: string, unit: string]>> = {
@@ -84,7 +84,7 @@ export function specFieldWords(field: string, topology: Topology): FieldWords {
   return { label: field, unit: '' };
 }
 
-/** A change in words: "Highest rate: 5 Hz, was 6 Hz". Values as they were entered, never rounded. */
+/** A change in words: "Envelope rate: 5 Hz, was 6 Hz". Values as they were entered, never rounded. */
 export function specChangeWords(change: SpecChange, topology: Topology): string {
   const { label, unit } = specFieldWords(change.field, topology);
   return `${label}: ${valueWords(change.after, unit)}, was ${valueWords(change.before, unit)}`;

@@ -23,11 +23,13 @@ export function HandoverStatus({ handover, zone }: { readonly handover: Status; 
           <br />
           <span className="muted">{pending.count === 1 ? 'entry' : 'entries'} on this tablet only</span>
         </p>
-        <p>
-          <Reading value={oldest ?? '\u2013'} size="read" />
-          <br />
-          <span className="muted">age of the oldest</span>
-        </p>
+        {oldest === null ? null : (
+          <p>
+            <Reading value={oldest} size="read" />
+            <br />
+            <span className="muted">age of the oldest</span>
+          </p>
+        )}
         <p>
           <Reading
             value={

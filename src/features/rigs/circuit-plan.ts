@@ -39,7 +39,7 @@ export interface Plates {
 }
 
 const WIDE_INVERSION: CircuitPlan = {
-  width: 842,
+  width: 866,
   height: 372,
   rail: 92,
   ground: 352,
@@ -48,13 +48,13 @@ const WIDE_INVERSION: CircuitPlan = {
   ballast: { from: 112, to: 208 },
   bleed_x: 236,
   gap: { upright: true, x: 330, y: 222, thick: 60, long: 68, apart: 28 },
-  first: { x: 470, width: 116 },
-  channel: { upright: false, x: 588, y: 92, thick: 34, long: 68, apart: 24 },
-  second: { x: 708, width: 100 },
-  second_bleed_x: 806,
+  first: { x: 516, width: 108 },
+  channel: { upright: false, x: 626, y: 92, thick: 34, long: 68, apart: 24 },
+  second: { x: 730, width: 88 },
+  second_bleed_x: 804,
   rings: [
-    { x: 400, y: 92 },
-    { x: 760, y: 92 },
+    { x: 436, y: 92 },
+    { x: 767, y: 92 },
   ],
   ring_r: 17,
   font: 22,

@@ -8,7 +8,7 @@ import type { Revise } from './use-revise';
 export function ReviseFieldsColumn({ revise }: { readonly revise: Revise }) {
   return (
     <FieldColumn label="What to revise">
-      {revise.fields.map((field) => (
+      {revise.shown.map((field) => (
         <Field key={field.key} field={field} revise={revise} />
       ))}
     </FieldColumn>
@@ -21,23 +21,31 @@ function Field({ field, revise }: { readonly field: ReviseField; readonly revise
   const text = draft.texts[field.key];
   const was = field.read(before.spec);
   const changed = text !== undefined && text !== String(was ?? '');
-  const source = changed ? `was ${was === null ? 'not known' : String(was)}` : `revision ${before.number}`;
+  const source = changed ? `was ${was === null ? 'not known' : String(was)}` : `rev ${before.number}`;
   const shown = revise.textOf(field.key).replace('-', '\u2212');
   const value = shown === '' ? null : shown;
+  const known = value === null && field.mayBeUnknown ? 'not known' : source;
   const common = {
-    label: field.label,
-    source: value === null && field.mayBeUnknown ? 'not known' : source,
     value,
     unit: field.unit,
     carried: !changed,
     ...(refusal === undefined ? {} : { refusal }),
   };
   if (revise.field?.key !== field.key)
-    return <FieldRow {...common} onPress={() => revise.choose(field.key)} />;
+    return (
+      <FieldRow
+        {...common}
+        label={field.short}
+        source={[field.about, changed ? known : ''].filter((words) => words !== '').join(', ')}
+        onPress={() => revise.choose(field.key)}
+      />
+    );
   return (
     <QuantityField
       {...common}
-      stepWords={`by ${field.step}`}
+      label={field.label}
+      source={known}
+      {...(changed ? {} : { stepWords: `by ${field.step}` })}
       onStep={revise.step}
       onOpen={revise.openKeypad}
       lessLabel={`${field.label} less by ${field.step} ${field.unit}`}

@@ -2,11 +2,18 @@ import type { RigSpec } from '../../domain/book/rig-spec';
 import { specFieldWords } from '../../domain/report/spec-words';
 import type { NumberRule } from '../../domain/units/check-number';
 
+/** What stands together on the screen, so that nothing hides below its edge. */
+export type ReviseGroup = 'gap' | 'envelope' | 'charging';
+
 /** A number of a rig that can be revised by keypad. */
 export interface ReviseField {
   /** Path in the spec, as `specChanges` names it. */
   readonly key: string;
   readonly label: string;
+  /** For the narrow row: two short lines in place of the label. */
+  readonly short: string;
+  readonly about: string;
+  readonly group: ReviseGroup;
   readonly unit: string;
   readonly step: number;
   readonly allowMinus: boolean;
@@ -18,6 +25,9 @@ export interface ReviseField {
 }
 
 interface Numeric {
+  readonly group: ReviseGroup;
+  readonly short: string;
+  readonly about: string;
   readonly step: number;
   readonly min: number;
   readonly max: number;
@@ -27,6 +37,9 @@ interface Numeric {
 
 const NUMBERS: Readonly<Record<string, Numeric>> = {
   'gap.gap_mm': {
+    group: 'gap',
+    short: 'Gap',
+    about: '',
     step: 0.1,
     min: 0.01,
     max: 500,
@@ -34,6 +47,9 @@ const NUMBERS: Readonly<Record<string, Numeric>> = {
     write: (spec, gap_mm) => ({ ...spec, gap: { ...spec.gap, gap_mm } }),
   },
   'gap.highest_bar_g': {
+    group: 'gap',
+    short: 'Works up to',
+    about: '',
     step: 0.05,
     min: -1.1,
     max: 20,
@@ -41,6 +57,9 @@ const NUMBERS: Readonly<Record<string, Numeric>> = {
     write: (spec, highest_bar_g) => ({ ...spec, gap: { ...spec.gap, highest_bar_g } }),
   },
   'envelope.max_kV': {
+    group: 'envelope',
+    short: 'Envelope',
+    about: 'voltage',
     step: 0.5,
     min: 0.1,
     max: 200,
@@ -48,6 +67,9 @@ const NUMBERS: Readonly<Record<string, Numeric>> = {
     write: (spec, max_kV) => ({ ...spec, envelope: { ...spec.envelope, max_kV } }),
   },
   'envelope.max_bar_g': {
+    group: 'envelope',
+    short: 'Envelope',
+    about: 'pressure',
     step: 0.05,
     min: -1.1,
     max: 20,
@@ -55,6 +77,9 @@ const NUMBERS: Readonly<Record<string, Numeric>> = {
     write: (spec, max_bar_g) => ({ ...spec, envelope: { ...spec.envelope, max_bar_g } }),
   },
   'envelope.max_rate_Hz': {
+    group: 'envelope',
+    short: 'Envelope',
+    about: 'rate',
     step: 0.5,
     min: 0.001,
     max: 1000,
@@ -62,6 +87,9 @@ const NUMBERS: Readonly<Record<string, Numeric>> = {
     write: (spec, max_rate_Hz) => ({ ...spec, envelope: { ...spec.envelope, max_rate_Hz } }),
   },
   'charging.supply_kV': {
+    group: 'charging',
+    short: 'Supply',
+    about: 'voltage',
     step: 0.5,
     min: 0.1,
     max: 200,
@@ -69,6 +97,9 @@ const NUMBERS: Readonly<Record<string, Numeric>> = {
     write: (spec, supply_kV) => ({ ...spec, charging: { ...spec.charging, supply_kV } }),
   },
   'charging.supply_mA': {
+    group: 'charging',
+    short: 'Supply',
+    about: 'current',
     step: 0.1,
     min: 0.001,
     max: 10_000,
@@ -84,6 +115,9 @@ export function reviseFields(spec: RigSpec): readonly ReviseField[] {
     return {
       key,
       label,
+      short: one.short,
+      about: one.about,
+      group: one.group,
       unit,
       step: one.step,
       allowMinus: one.min < 0,
@@ -109,6 +143,9 @@ function bleedField(spec: RigSpec, at: number): ReviseField {
   return {
     key,
     label,
+    short: 'Bleed',
+    about: spec.nodes[at]?.name ?? '',
+    group: 'charging',
     unit: 'MΩ',
     step: bleed < 1 ? 0.01 : 10,
     allowMinus: false,

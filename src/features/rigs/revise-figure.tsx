@@ -8,6 +8,11 @@ import { specChangeWords } from '../../domain/report/spec-words';
 import { useNames } from './use-names';
 import type { Revise } from './use-revise';
 
+const GROUPS = [
+  { value: 'gap', label: 'gap' },
+  { value: 'envelope', label: 'envelope' },
+  { value: 'charging', label: 'supply and bleeds' },
+] as const;
 const GASES = gasName.options.map((gas) => ({ value: gas, label: gas }));
 
 /** What would change, what it costs, and why: all of it before anything is saved. */
@@ -22,29 +27,8 @@ export function ReviseFigure({ revise, zone }: { readonly revise: Revise; readon
           {revise.save === 'not-saved' ? ', draft not saved on this tablet' : ''}
         </span>
       </div>
-      <div className="rig-columns">
-        <div>
-          <p className="muted">Gas in the gap</p>
-          <Choice
-            label="Gas in the gap"
-            options={GASES}
-            value={draft.gas ?? before.spec.gap.gas}
-            onChange={(gas) => set((now) => ({ ...now, gas: gas === before.spec.gap.gas ? null : gas }))}
-          />
-        </div>
-        <div>
-          <p className="muted">UV on the gap</p>
-          <Choice
-            label="UV on the gap"
-            options={[
-              { value: 'yes', label: 'reaches it' },
-              { value: 'no', label: 'does not' },
-            ]}
-            value={(draft.irradiated ?? before.spec.gap.irradiated) ? 'yes' : 'no'}
-            onChange={(said) => set((now) => ({ ...now, irradiated: said === 'yes' }))}
-          />
-        </div>
-      </div>
+      <Choice label="What to revise" options={GROUPS} value={revise.group} onChange={revise.chooseGroup} />
+      {revise.group === 'gap' ? <GapChoices revise={revise} /> : null}
       <Changes revise={revise} />
       <Cost revise={revise} zone={zone} />
       <WordsField
@@ -52,6 +36,31 @@ export function ReviseFigure({ revise, zone }: { readonly revise: Revise; readon
         hint="stands in the Book beside the revision"
         value={draft.why}
         onChange={(why) => set((now) => ({ ...now, why }))}
+      />
+    </div>
+  );
+}
+
+function GapChoices({ revise }: { readonly revise: Revise }) {
+  const { before, draft, set } = revise;
+  return (
+    <div>
+      <p className="muted">Gas in the gap</p>
+      <Choice
+        label="Gas in the gap"
+        options={GASES}
+        value={draft.gas ?? before.spec.gap.gas}
+        onChange={(gas) => set((now) => ({ ...now, gas: gas === before.spec.gap.gas ? null : gas }))}
+      />
+      <p className="muted">UV on the gap</p>
+      <Choice
+        label="UV on the gap"
+        options={[
+          { value: 'yes', label: 'reaches it' },
+          { value: 'no', label: 'does not' },
+        ]}
+        value={(draft.irradiated ?? before.spec.gap.irradiated) ? 'yes' : 'no'}
+        onChange={(said) => set((now) => ({ ...now, irradiated: said === 'yes' }))}
       />
     </div>
   );

@@ -92,7 +92,7 @@ function contradictions(spec: RigSpec): Record<string, string> {
         ? `${name}: above the relief valve's ${vessel.relief_bar_g}\u2009bar(g).`
         : null;
   const working = over(highest_bar_g, 'Highest working pressure');
-  const limit = over(spec.envelope.max_bar_g, 'Highest pressure');
+  const limit = over(spec.envelope.max_bar_g, 'Envelope pressure');
   if (working !== null) found['gap.highest_bar_g'] = working;
   if (limit !== null) found['envelope.max_bar_g'] = limit;
   return found;

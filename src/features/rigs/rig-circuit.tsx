@@ -196,13 +196,7 @@ function Letters({ plan, spec, view }: Omit<Props, 'name'> & { readonly plan: Ci
       />
       <Lines x={bleed_x - 20} y={middle - 6} anchor="end" lines={[firstBleed ?? '', 'MΩ']} />
       {plan.second_bleed_x === null ? null : (
-        <Lines
-          x={plan.second_bleed_x + 14}
-          y={ground - 70}
-          anchor="end"
-          lines={[secondBleed ?? '', 'MΩ']}
-          muted={0}
-        />
+        <Lines x={plan.second_bleed_x + 20} y={middle - 6} anchor="start" lines={[secondBleed ?? '', 'MΩ']} />
       )}
       <Lines
         x={gapAt.x}

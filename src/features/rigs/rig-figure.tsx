@@ -24,7 +24,8 @@ interface Props {
 
 export function RigFigure({ rig, view, settings }: Props) {
   const { number, spec } = latestRevision(rig);
-  const rings = spec.nodes.length === 1 ? 'ring 1' : `rings 1 to ${spec.nodes.length}`;
+  const count = spec.nodes.length;
+  const rings = count === 1 ? 'ring 1' : `rings 1 ${count === 2 ? 'and' : 'to'} ${count}`;
   return (
     <div className="rig-page">
       <div className="rig-head">

@@ -7,7 +7,7 @@ import { useDraft } from '../../data/use-draft';
 import { useNow } from '../../data/use-now';
 import { useResume } from '../../data/use-resume';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
-import { reviseFields } from './revise-fields';
+import { reviseFields, type ReviseGroup } from './revise-fields';
 import { EMPTY_DRAFT, readField, revisionOf, stepText, voidedBy, type ReviseDraft } from './revise-form';
 
 /** State of one revision being written: a draft kept at every key, always laid over the latest revision. */
@@ -25,6 +25,8 @@ export function useRevise(rig: RigDoc) {
   );
   const [typing, setTyping] = useState(false);
   const field = fields.find((one) => one.key === active) ?? null;
+  const group = field?.group ?? 'gap';
+  const shown = fields.filter((one) => one.group === group);
 
   const setText = (key: string, text: string): void =>
     set((now) => ({ ...now, texts: { ...now.texts, [key]: text } }));
@@ -50,12 +52,14 @@ export function useRevise(rig: RigDoc) {
     before,
     draft,
     save,
-    fields,
+    group,
+    shown,
     field,
     revision,
     voided: voidedBy(rig, best_ms),
     typing: typing && field !== null,
     choose,
+    chooseGroup: (next: ReviseGroup) => choose(fields.find((one) => one.group === next)?.key ?? active),
     openKeypad: () => setTyping(true),
     closeKeypad: () => setTyping(false),
     /** Text of a field as it stands: typed, else the value of the latest revision. */
