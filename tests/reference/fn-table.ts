@@ -1,7 +1,10 @@
 import type { Answer } from '../../src/domain/units/answer';
 import type { Result } from '../../src/domain/units/result';
 import { CAPACITOR_FUNCTIONS } from './fn-capacitor';
+import { CIRCUIT_FUNCTIONS } from './fn-circuit';
 import { GAP_FUNCTIONS } from './fn-gap';
+import { LINE_FUNCTIONS } from './fn-line';
+import { SPARK_FUNCTIONS } from './fn-spark';
 import type { Inputs } from './inputs';
 
 /** What the project gives for one check. */
@@ -18,4 +21,7 @@ export type ReferenceFunction = (inputs: Inputs) => Evaluated | Skipped;
 export const FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = {
   ...GAP_FUNCTIONS,
   ...CAPACITOR_FUNCTIONS,
+  ...SPARK_FUNCTIONS,
+  ...LINE_FUNCTIONS,
+  ...CIRCUIT_FUNCTIONS,
 };

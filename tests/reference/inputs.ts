@@ -35,6 +35,14 @@ export class Inputs {
     throw new InputProblem(`input ${name} ${this.has(name) ? 'is not true or false' : 'is missing'}`);
   }
 
+  /** Named values that stand together under one name. */
+  group(name: string): Inputs {
+    const value = this.#raw[name];
+    if (isNamedValues(value)) return new Inputs(value);
+    const given = typeof value === 'string' ? `"${value}" is not in the file` : 'is not a group of values';
+    throw new InputProblem(`input ${name} ${this.has(name) ? given : 'is missing'}`);
+  }
+
   oneOf<T extends string>(name: string, choices: readonly T[]): Result<T> {
     const value = this.text(name);
     const found = choices.find((choice) => choice === value);
@@ -42,4 +50,8 @@ export class Inputs {
       ? refused({ type: 'unknown-choice', field: name, words: `${name} "${value}" is not known` })
       : ok(found);
   }
+}
+
+function isNamedValues(value: unknown): value is Readonly<Record<string, unknown>> {
+  return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
