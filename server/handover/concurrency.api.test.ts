@@ -33,13 +33,13 @@ describe('many at once', () => {
     const person = await lab.join('operator', 'Many');
     const tablets = await Promise.all(Array.from({ length: 8 }, () => lab.tablet(person)));
     const pushes = 6;
-    let pushing = true;
+    const state = { pushing: true };
     const reader = await lab.tablet(person);
     const seen: number[] = [];
     const reading = (async () => {
       let cursor = { since: 0, hash: GENESIS_HASH };
       for (;;) {
-        const wasPushing = pushing;
+        const wasPushing = state.pushing;
         const { body } = await reader.pull({ ...cursor, limit: 50 });
         seen.push(...body.entries.map((one) => one.revision));
         const last = body.entries.at(-1);
@@ -56,7 +56,7 @@ describe('many at once', () => {
         }
       }),
     );
-    pushing = false;
+    state.pushing = false;
     await reading;
     expect(seen).toEqual(seen.map((_, at) => at + 1));
     const all = await reader.pullAll();

@@ -111,8 +111,15 @@ export async function createTestLab(server: TestServer): Promise<TestLab> {
     tablet,
     async join(role, name = 'Ada') {
       const person = await add(name);
-      const { result } = await leadTablet.write('person.joined', person.id, { name, role });
-      if (result.outcome !== 'applied') throw new Error(`joining failed: ${JSON.stringify(result)}`);
+      const entry = leadTablet.seal('person.joined', person.id, { name, role });
+      let answer = await leadTablet.push([entry]);
+      // A test that sets the clock on has let the lead's access token run out.
+      if (answer.status === 401) {
+        await leadTablet.signIn(lead.email, TEST_PASSWORD, { lab: id });
+        answer = await leadTablet.push([entry]);
+      }
+      if (answer.status !== 200 || answer.body.results[0]?.outcome !== 'applied')
+        throw new Error(`joining failed: ${JSON.stringify(answer.body)}`);
       return person;
     },
   };
