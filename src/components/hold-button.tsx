@@ -10,7 +10,7 @@ export interface HoldButtonProps {
   readonly failedWords?: string;
   readonly disabled?: boolean;
   readonly reason?: string;
-  /** The one that the eye should find: solid, with a brass face. */
+  /** The one that the eye should find: metal with a brass face, whose pieces must be told apart in any light. */
   readonly main?: boolean;
 }
 
@@ -35,7 +35,7 @@ export function HoldButton(props: HoldButtonProps) {
     >
       <ElectrodeBody
         facing="up"
-        tone={main ? 'text' : 'raised'}
+        tone={main ? 'metal' : 'raised'}
         rim={main ? 'brass' : 'quiet'}
         pieces={HOLD_PIECES[hold]}
         edge={0.04}
