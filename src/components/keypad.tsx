@@ -71,7 +71,7 @@ export function Keypad(props: KeypadProps) {
 
   const press = (key: KeypadKey): void => {
     if (key === '-' && !allowMinus) return;
-    const edits = key === 'erase' || key === '-';
+    const edits = key === 'erase';
     const next = (secret ? typeSecretKey : typeKey)(typed ?? (edits ? initial : ''), key);
     setTyped(next);
     props.onText?.(next);

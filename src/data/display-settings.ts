@@ -20,6 +20,9 @@ export const DEFAULT_DISPLAY: DisplaySettings = {
 
 const KEY = 'holdoff.display';
 
+/** From here on the layout gives way to the text. */
+const LARGE_TEXT_FROM = 1.3;
+
 export interface TextStore {
   readonly getItem: (key: string) => string | null;
   readonly setItem: (key: string, value: string) => void;
@@ -60,6 +63,7 @@ export function applyDisplay(root: HTMLElement, settings: DisplaySettings, place
   setAttribute(root, 'data-theme', daylight ? 'daylight' : null);
   setAttribute(root, 'data-hand', settings.hand === 'left' ? 'left' : null);
   setAttribute(root, 'data-eyewear', settings.eyewear ? 'on' : null);
+  setAttribute(root, 'data-large-text', settings.scale > LARGE_TEXT_FROM ? '' : null);
   setProperty(root, '--scale', settings.scale === 1 ? null : String(settings.scale));
   setProperty(root, '--mm', settings.px_per_mm === null ? null : `${settings.px_per_mm}px`);
 }

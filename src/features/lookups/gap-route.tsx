@@ -29,9 +29,18 @@ export function GapRoute() {
 
 function GapLookupScreen({ rig, lab }: { readonly rig: RigDoc; readonly lab: LabDoc | undefined }) {
   const lookup = useGapLookup(rig, lab);
+  const fields = <GapFields lookup={lookup} />;
+  // On a phone the keypad needs the thumb zone's place.
+  if (lookup.form.typing !== null) {
+    return (
+      <Screen fields={fields}>
+        <GapKeypad lookup={lookup} />
+      </Screen>
+    );
+  }
   return (
-    <Screen fields={<GapFields lookup={lookup} />} thumbs={<GapThumbs rig={rig} lookup={lookup} />}>
-      {lookup.form.typing === null ? <GapFigure rig={rig} lookup={lookup} /> : <GapKeypad lookup={lookup} />}
+    <Screen fields={fields} thumbs={<GapThumbs rig={rig} lookup={lookup} />}>
+      <GapFigure rig={rig} lookup={lookup} />
     </Screen>
   );
 }
