@@ -1,5 +1,6 @@
 import { readConfig } from './config';
 import { createContext } from './context';
+import { withoutValues } from './db/database-errors';
 import { createLogger } from './logger';
 import { serve } from './serve';
 
@@ -23,7 +24,7 @@ for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     server.stop().then(
       () => process.exit(0),
       (error: unknown) => {
-        log.error({ error }, 'The server did not stop cleanly');
+        log.error({ error: withoutValues(error) }, 'The server did not stop cleanly');
         process.exit(1);
       },
     );

@@ -27,3 +27,21 @@ export function isDatabaseError(error: unknown): boolean {
 export function isDuplicateKey(error: unknown): boolean {
   return error instanceof Error && 'errno' in error && error.errno === 1062;
 }
+
+/**
+ * What may be logged of an error. Those of the database carry the statement with its values in text and fields, and
+ * values are people's words, addresses and password hashes.
+ */
+export function withoutValues(error: unknown): unknown {
+  if (!(error instanceof Error) || !isDatabaseError(error)) return error;
+  const { name, stack } = error;
+  const fact = (key: string): unknown =>
+    key in error ? (error as unknown as Record<string, unknown>)[key] : undefined;
+  return {
+    type: name,
+    message: `the database answered ${String(fact('code') ?? fact('errno') ?? name)}`,
+    errno: fact('errno'),
+    sqlState: fact('sqlState'),
+    stack: (stack ?? '').split('\n').filter((line) => /^\s+at /.test(line)),
+  };
+}

@@ -33,6 +33,8 @@ export function createDatabase(settings: Config['database'], log: Logger): Datab
     connection,
     pool: { min: 0, max: largestPool, afterCreate: prepareSession },
     acquireConnectionTimeout: acquireMs,
+    // Statements in errors keep their question marks.
+    compileSqlOnError: false,
     log: {
       warn: (message: unknown) => log.warn({ from: 'knex' }, String(message)),
       error: (message: unknown) => log.error({ from: 'knex' }, String(message)),

@@ -1,4 +1,5 @@
 import type { Database } from '../db/database';
+import { withoutValues } from '../db/database-errors';
 import type { Route } from '../http/route';
 import type { Logger } from '../logger';
 import { createFounding, type FoundedLab, type Founding } from './founding';
@@ -39,7 +40,8 @@ export function createHandover({
   const watcher = createHeadWatcher({
     pollEveryMs,
     readHead: async (lab) => (await store.labState(lab))?.revision ?? 0,
-    onPollFailed: (error) => log.warn({ error }, 'The head of a Book could not be read for those who wait'),
+    onPollFailed: (error) =>
+      log.warn({ error: withoutValues(error) }, 'The head of a Book could not be read for those who wait'),
   });
   const service = createHandoverService({
     store,

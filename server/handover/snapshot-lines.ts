@@ -1,8 +1,7 @@
-import { once } from 'node:events';
-import { finished } from 'node:stream/promises';
-import type { Writable } from 'node:stream';
+import { Readable, type Writable } from 'node:stream';
+import { pipeline } from 'node:stream/promises';
 import { createGzip } from 'node:zlib';
-import type { BookStore } from './book-store';
+import type { BookStore, Snapshot } from './book-store';
 
 /** Writes a lab's snapshot as gzipped JSON lines: header, documents, trailer. A broken one has no trailer. */
 export async function writeSnapshot(
@@ -10,33 +9,27 @@ export async function writeSnapshot(
   lab: string,
   to: Writable,
 ): Promise<void> {
-  const gzip = createGzip({ level: 4 });
-  // A reader that hangs up must not keep the snapshot's transaction open.
-  to.once('close', () => gzip.destroy());
-  gzip.pipe(to);
-  const write = async (lines: string): Promise<void> => {
-    if (gzip.destroyed) throw new ReaderGone();
-    if (!gzip.write(lines)) await Promise.race([once(gzip, 'drain'), once(gzip, 'close')]);
-  };
   try {
-    await store.snapshot(lab, async ({ lab: state, fold_version, pages }) => {
-      const { epoch, revision, hash } = state;
-      await write(`${JSON.stringify({ snapshot: 1, epoch, revision, hash, fold_version })}\n`);
-      let documents = 0;
-      for await (const page of pages) {
-        documents += page.length;
-        await write(page.map((doc) => `{"doc":${doc}}\n`).join(''));
-      }
-      await write(`${JSON.stringify({ end: true, documents })}\n`);
-    });
-    gzip.end();
-    await finished(to);
+    await store.snapshot(lab, (snapshot) =>
+      pipeline(Readable.from(linesOf(snapshot)), createGzip({ level: 4 }), to),
+    );
   } catch (error) {
-    if (error instanceof ReaderGone || gzip.destroyed) return;
-    gzip.destroy();
-    to.destroy();
-    throw error;
+    // A reader that hung up wants no answer any more.
+    if (!isHungUp(error)) throw error;
   }
 }
 
-class ReaderGone extends Error {}
+async function* linesOf({ lab, fold_version, pages }: Snapshot): AsyncGenerator<string> {
+  const { epoch, revision, hash } = lab;
+  yield `${JSON.stringify({ snapshot: 1, epoch, revision, hash, fold_version })}\n`;
+  let documents = 0;
+  for await (const page of pages) {
+    documents += page.length;
+    yield page.map((doc) => `{"doc":${doc}}\n`).join('');
+  }
+  yield `${JSON.stringify({ end: true, documents })}\n`;
+}
+
+function isHungUp(error: unknown): boolean {
+  return error instanceof Error && 'code' in error && error.code === 'ERR_STREAM_PREMATURE_CLOSE';
+}

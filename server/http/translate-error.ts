@@ -1,6 +1,6 @@
 import type { Request, Response } from 'express';
 import { PROBLEM_PREFIX, type Problem } from '../../src/domain/handover/problem';
-import { isDatabaseError } from '../db/database-errors';
+import { isDatabaseError, withoutValues } from '../db/database-errors';
 import type { Logger } from '../logger';
 import { Fault, HttpProblem, NotJson, TooLarge, Unavailable, Unreadable } from './problems';
 import { requestIdOf } from './request-log';
@@ -16,7 +16,10 @@ export function answerProblem(log: Logger, { request, response, error }: Failed)
   const requestId = requestIdOf(response);
   const problem = toProblem(error);
   if (problem.status >= 500)
-    log.error({ requestId, error, path: request.path }, 'A request failed unexpectedly');
+    log.error(
+      { requestId, error: withoutValues(error), path: request.path },
+      'A request failed unexpectedly',
+    );
   if (response.headersSent) {
     response.destroy();
     return;

@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import type { Role } from '../../src/domain/book/bodies/people-bodies';
 import type { ReadingValues } from '../../src/domain/book/bodies/firing-bodies';
 import type { LabSettings, RigSpec } from '../../src/domain/book/rig-spec';
@@ -89,7 +90,7 @@ export async function createTestLab(server: TestServer): Promise<TestLab> {
   const { accounts, handover } = server.context;
   const add = async (name: string): Promise<TestPerson> => {
     count += 1;
-    const email = `${name.toLowerCase()}-${count}@bench.example`;
+    const email = `${name.toLowerCase()}-${count}-${randomUUID().slice(0, 8)}@bench.example`;
     return { id: await accounts.addPerson({ email, name, password: TEST_PASSWORD }), email };
   };
   const lead = await add('Inge');
