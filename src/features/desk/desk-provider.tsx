@@ -1,13 +1,19 @@
 import { QueryClientProvider } from '@tanstack/react-query';
-import { useState, type ReactNode } from 'react';
+import { useEffect, useState, type ReactNode } from 'react';
 import { useLabClient } from '../../data/client-context';
 import { openDeskQueries } from '../../data/desk/desk-queries';
+import { useBookState } from '../../data/use-book';
 import { DeskContext } from './use-desk-query';
 
 /** What the Desk fetches lives here, per lab; it comes with the Desk's own chunk and nothing of the bench needs it. */
 export function DeskProvider({ children }: { readonly children: ReactNode }) {
   const lab = useLabClient();
   const [desk] = useState(() => openDeskQueries(lab));
+  const { revision } = useBookState();
+  // Whatever moved the Book may have moved what was fetched: an act that was applied shows at once.
+  useEffect(() => {
+    void desk.client.invalidateQueries();
+  }, [desk, revision]);
   return (
     <DeskContext value={desk}>
       <QueryClientProvider client={desk.client}>{children}</QueryClientProvider>

@@ -60,18 +60,22 @@ function LastFirings() {
       key: 'when',
       head: 'opened',
       align: 'start',
-      cell: ({ firing }) => momentWords(firing.opened.stamp.wall_ms, zone),
+      cell: ({ firing }) => <span className="nowrap">{momentWords(firing.opened.stamp.wall_ms, zone)}</span>,
     },
     {
       key: 'by',
       head: 'by',
       align: 'start',
-      cell: ({ firing }) => (firing.opened.by === null ? 'author open' : (people[firing.opened.by] ?? '')),
+      cell: ({ firing }) => (
+        <span className="nowrap">
+          {firing.opened.by === null ? 'author open' : (people[firing.opened.by] ?? '')}
+        </span>
+      ),
     },
     { key: 'readings', head: 'readings', cell: ({ firing }) => formatFigure(firing.readings, WHOLE) },
     { key: 'shots', head: 'shots', cell: ({ firing }) => formatFigure(firing.shots, WHOLE) },
     { key: 'state', head: 'state', align: 'start', cell: ({ firing }) => stateWords(firing) },
-    { key: 'revision', head: 'rev. of the Book', cell: (row) => formatFigure(row.revision, WHOLE) },
+    { key: 'revision', head: 'rev.', cell: (row) => formatFigure(row.revision, WHOLE) },
     { key: 'hash', head: 'hash', align: 'start', cell: (row) => row.chain_hash.slice(0, 12) },
   ];
   return (

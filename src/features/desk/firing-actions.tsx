@@ -5,6 +5,7 @@ import { WordsField } from '../../components/words-field';
 import { useDraft } from '../../data/use-draft';
 import { usePerson } from '../../data/use-book';
 import { useSession } from '../../data/use-session';
+import { standingReview } from '../../domain/book/documents/firing';
 import type { FiringAnswer } from '../../domain/report/desk-shapes';
 import { mayAppend } from '../../domain/rules/roles';
 import { ActOutcome, ForecastWords } from './act-outcome';
@@ -35,19 +36,25 @@ export function FiringActions({ answer, left_out, onLogged }: Props) {
     `${firing.id}/${firing.closed?.entry ?? 'open'}/${book.revision}`,
   );
   if (!may) return <p className="muted">Reviewing is for a reviewer or a lead.</p>;
-  const blocked = forecast.against !== null;
+  const hindrance =
+    forecast.against?.words ??
+    (standingReview(firing)?.verdict === 'reviewed' ? 'It was accepted before.' : null);
   return (
     <div className="desk-actions">
       <div className="desk-buttons">
-        <HoldButton label="Send back" disabled={blocked} onComplete={() => setSending(true)} />
+        <HoldButton
+          label="Send back"
+          disabled={forecast.against !== null}
+          onComplete={() => setSending(true)}
+        />
         <span className="desk-apart">
           <HoldButton
             main
             label="Accept"
             hold="second"
             holdLabel={`Hold: accept ${firing.number}`}
-            disabled={blocked}
-            {...(blocked ? { reason: forecast.against.words } : {})}
+            disabled={hindrance !== null}
+            {...(hindrance === null ? {} : { reason: hindrance })}
             onComplete={() => act.log(accepted)}
           />
         </span>
