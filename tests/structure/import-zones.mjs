@@ -224,8 +224,8 @@ function judgePackage(from, fromFile, specifier) {
   }
   if (from.zone === 'data' && ['react', 'react-dom', 'react-router-dom'].includes(name)) {
     return allow(
-      name === 'react' && /\/use-[^/]*\.tsx?$/.test(fromFile),
-      'data knows React only in its live-query hooks (use-*.ts)',
+      name === 'react' && /\/(use-[^/]*|client-context)\.tsx?$/.test(fromFile),
+      'data knows React only in its live-query hooks (use-*.ts) and their provider',
     );
   }
   return undefined;

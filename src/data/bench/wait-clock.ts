@@ -35,22 +35,20 @@ export function openWaitClock({ store, clock, timers, locks }: WaitPorts) {
   const saved = (key: string) => getCount(store.database, `wait/${key}`);
 
   /** Adds what has passed since the last tick, but shows it only once it is durable. */
-  const count = async (key: string, stopped: Promise<void>): Promise<void> => {
+  const count = async (key: string, stop: AbortSignal): Promise<void> => {
     let sum_s = await saved(key);
     let counted_ms = clock.monotonicMs();
     put(key, { waited_s: sum_s, running: true });
-    let going = true;
-    const stopping = stopped.then(() => {
-      going = false;
-    });
-    while (going) {
-      await Promise.race([tick(timers), stopping]);
+    const stopped = aborted(stop);
+    while (!stop.aborted) {
+      await Promise.race([tick(timers), stopped]);
       const now_ms = clock.monotonicMs();
-      sum_s += Math.max(0, now_ms - counted_ms) / 1000;
+      const next_s = sum_s + Math.max(0, now_ms - counted_ms) / 1000;
+      const outcome = await store.write(() => putCount(store.database, `wait/${key}`, next_s));
+      if (outcome.type === 'not-saved') continue;
+      sum_s = next_s;
       counted_ms = now_ms;
-      const waited_s = sum_s;
-      const outcome = await store.write(() => putCount(store.database, `wait/${key}`, waited_s));
-      if (outcome.type === 'saved') put(key, { waited_s, running: going });
+      put(key, { waited_s: sum_s, running: !stop.aborted });
     }
     put(key, { waited_s: sum_s, running: false });
   };
@@ -69,10 +67,11 @@ export function openWaitClock({ store, clock, timers, locks }: WaitPorts) {
     /** Does nothing while it runs already, here or in another tab: two tabs must not count one minute twice. */
     start: async (key: string): Promise<void> => {
       if (stops.has(key)) return;
-      const stopped = new Promise<void>((resolve) => {
-        stops.set(key, resolve);
+      const stop = new AbortController();
+      stops.set(key, () => {
+        stop.abort();
       });
-      await locks.hold(`holdoff-wait/${store.lab}/${key}`, { wait: 'never' }, () => count(key, stopped));
+      await locks.hold(`holdoff-wait/${store.lab}/${key}`, { wait: 'never' }, () => count(key, stop.signal));
       stops.delete(key);
     },
     pause: (key: string) => {
@@ -87,5 +86,13 @@ export function openWaitClock({ store, clock, timers, locks }: WaitPorts) {
 function tick(timers: Timers): Promise<void> {
   return new Promise((resolve) => {
     timers.after(TICK_MS, resolve);
+  });
+}
+
+function aborted(signal: AbortSignal): Promise<void> {
+  return new Promise((resolve) => {
+    signal.addEventListener('abort', () => {
+      resolve();
+    });
   });
 }

@@ -76,7 +76,7 @@ export function memoryLockHub() {
           mine.add(release);
           const outcome = await hold(name, options, (lost) => Promise.race([work(lost), died.then(never)]));
           mine.delete(release);
-          return outcome as never;
+          return outcome;
         },
       };
       return {

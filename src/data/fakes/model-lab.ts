@@ -57,7 +57,7 @@ export function modelLab(random: RandomBytes, now_ms: () => number): ModelLab {
         base: { epoch: server.book.epoch, revision: 0, hash: GENESIS_HASH },
         stamp,
       },
-      bodyText(body as Record<string, unknown>, '00'.repeat(16)),
+      bodyText(body, '00'.repeat(16)),
     );
     appendToBook(server.book, entry, { verdict: 'applied', reason: null, received_ms: now_ms() });
     return own;

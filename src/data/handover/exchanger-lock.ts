@@ -31,7 +31,7 @@ export async function asExchanger(
       await whileBeating(ports, lost, work);
     });
     watch.stop();
-    if (outcome.type === 'called-off' && watch.isSilent() && !signal.aborted) {
+    if (outcome.type === 'called-off' && watch.isSilent()) {
       await ports.locks.hold(name, { wait: 'never', steal: true }, (lost) => whileBeating(ports, lost, work));
     }
   }

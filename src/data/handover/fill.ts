@@ -16,29 +16,27 @@ export async function fillMirror(parts: HandoverParts, signal: AbortSignal): Pro
   const since = await parts.mirror.cursor();
   const fill = beginFill(parts.mirror.database);
   await fill.clear();
-  let header: Header | null = null;
-  let promised: number | null = null;
-  let held: Document[] = [];
+  const come: Arriving = { header: null, promised: null, held: [] };
   const outcome = await parts.tokens.lines(
     'device',
     { method: 'GET', path: '/api/handover/snapshot', signal, timeout_ms: FILL_TIMEOUT_MS },
     async (text) => {
       const line: unknown = JSON.parse(text);
-      if (header === null) {
-        header = snapshotHeaderSchema.parse(line);
+      if (come.header === null) {
+        come.header = snapshotHeaderSchema.parse(line);
         return;
       }
       const trailer = snapshotTrailerSchema.safeParse(line);
-      if (trailer.success) promised = trailer.data.documents;
-      else held.push(documentOf(line));
-      if (held.length < STAGE_AT) return;
-      await fill.stage(held);
-      held = [];
+      if (trailer.success) come.promised = trailer.data.documents;
+      else come.held.push(documentOf(line));
+      if (come.held.length < STAGE_AT) return;
+      await fill.stage(come.held);
+      come.held = [];
     },
   );
   if (outcome.type !== 'ok') return toSetback(outcome);
-  await fill.stage(held);
-  const begun = asHeader(header);
+  await fill.stage(come.held);
+  const { header: begun, promised } = come;
   if (begun === null || promised === null)
     return { type: 'later', state: 'no-network', words: 'The Book broke off while it was arriving.' };
   if (begun.fold_version !== FOLD_VERSION)
@@ -61,9 +59,10 @@ export async function fillMirror(parts: HandoverParts, signal: AbortSignal): Pro
   return went(null);
 }
 
-/** Assigned inside the reader, which the compiler cannot follow. */
-function asHeader(header: Header | null): Header | null {
-  return header;
+interface Arriving {
+  header: Header | null;
+  promised: number | null;
+  held: Document[];
 }
 
 /** Documents are the server's folds by the same code; only their frame is looked at. */

@@ -53,6 +53,7 @@ export function createHandoverLoop(parts: LoopParts): HandoverLoop {
     for (const listen of listeners) listen();
   };
   const show = (next: Activity) => {
+    if (closing.signal.aborted) return;
     activity = next;
     refresh();
   };
@@ -67,7 +68,6 @@ export function createHandoverLoop(parts: LoopParts): HandoverLoop {
       const greet = clock.monotonicMs() - greeted_ms > GREET_EVERY_MS;
       if (greet) greeted_ms = clock.monotonicMs();
       const outcome = await guarded(() => exchange.round(signal, { greet }));
-      if (signal.aborted) break;
       if (outcome.type === 'quiet') {
         failures = 0;
         upgrade = outcome.upgrade;

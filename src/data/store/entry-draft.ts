@@ -30,7 +30,8 @@ export type EntryDraft = {
 export interface ReadDraft {
   readonly kind: Kind;
   readonly version: number;
-  readonly subject: string | 'itself' | 'lab';
+  /** An id, 'itself' or 'lab'. */
+  readonly subject: string;
   readonly body: Readonly<Record<string, unknown>>;
   readonly number: 'firing' | 'revision' | null;
 }
