@@ -1,0 +1,31 @@
+import type { CheckDoc } from '../../domain/book/documents/check';
+import type { RigDoc } from '../../domain/book/documents/rig';
+import { elapsedMs, type Stamp } from '../../domain/book/stamp';
+import { ageWords, agoWords } from '../../domain/report/time-words';
+import { checkLapse, checkTimeLeftMs } from '../../domain/rules/check-validity';
+
+export interface HistoryFacts {
+  readonly rig: RigDoc;
+  readonly device: string;
+  readonly now: Stamp;
+}
+
+/** What a walked check is worth now: what made it lapse, or how long it still counts. */
+export function checkWorth(check: CheckDoc, { rig, device, now }: HistoryFacts): string {
+  const { ended } = check;
+  if (ended === null) return 'open';
+  if (ended.how === 'abandoned') return `abandoned: ${ended.words}`;
+  if (ended.irregular !== null) return 'closed with steps missing: it declared nothing but the danger';
+  if (check.purpose === 'make-safe') return 'declared shorted';
+  if (rig.ready_check?.check !== check.id) return 'replaced by a later check';
+  const lapse = checkLapse(rig, device, now);
+  if (lapse !== null) return lapse.words;
+  const left = checkTimeLeftMs(rig.ready_check, now);
+  return left === null ? 'counts' : `counts for another ${ageWords(left)} without activity`;
+}
+
+/** "14 min ago"; a check from another page life with an uncertain clock has no age that anybody could vouch for. */
+export function checkAge(check: CheckDoc, now: Stamp): string {
+  const age_ms = elapsedMs((check.ended ?? check.opened).stamp, now);
+  return age_ms === null ? 'age not known' : agoWords(age_ms);
+}
