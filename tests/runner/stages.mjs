@@ -18,7 +18,14 @@ export const stages = [
   {
     name: 'format',
     says: 'is every file as prettier writes it',
-    run: command(['node_modules/prettier/bin/prettier.cjs', '--check', '--log-level', 'warn', '.']),
+    run: command([
+      'node_modules/prettier/bin/prettier.cjs',
+      '--check',
+      '--log-level',
+      'warn',
+      '--cache',
+      '.',
+    ]),
   },
   {
     name: 'lint',
