@@ -57,7 +57,8 @@ export async function openLabStores(ports: Ports, { lab, page_life }: LabPlace):
   const device = await store.device();
   if (device === undefined) {
     store.close();
-    return { type: 'not-enrolled' };
+    const [words] = notices;
+    return words === undefined ? { type: 'not-enrolled' } : { type: 'failed', words };
   }
   const earlier = (await store.key('findings')) ?? [];
   return {

@@ -19,7 +19,7 @@ export interface Recovery {
 export async function recoverFromJournal(store: BookStore, gathered: Gathered): Promise<Recovery> {
   const { database } = store;
   const outcome = await store.write(() =>
-    database.transaction('rw', [database.entries, database.keys], async () => {
+    database.transaction('rw', [database.entries, database.keys, database.people], async () => {
       const emptied = (await getKey(database, 'sentinel')) === undefined && gathered.header !== null;
       if (emptied) await restoreKeys(store, gathered);
       let restored = 0;
