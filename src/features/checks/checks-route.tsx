@@ -117,7 +117,7 @@ function SheetLine({ rig, sheet }: { readonly rig: RigDoc; readonly sheet: Sheet
       <HoldButton
         label={`Open check: ${title}`}
         disabled={locked}
-        main={purpose === 'make-safe'}
+
         onComplete={open}
       />
     </article>

@@ -4,6 +4,9 @@ import { Keypad } from '../../components/keypad';
 import { QuantityField } from '../../components/quantity-field';
 import { SaysBlock } from '../../components/says-block';
 import { ThumbDome } from '../../components/thumb-dome';
+import { TwoFaces } from '../../components/two-faces';
+import type { RigSpec } from '../../domain/book/rig-spec';
+import { stepLimits } from '../../domain/rules/check-progress';
 import { checkNumber } from '../../domain/units/check-number';
 import { CHECK_KEYPAD_WORDS } from './keypad-words';
 import { StepFrame } from './step-frame';
@@ -59,7 +62,7 @@ export function ReadingStep({ walk, step }: { readonly walk: CheckWalk; readonly
       fields={
         <QuantityField
           label={step.quantity}
-          source={limitWords(step, revision.spec)}
+          source={entered === null ? 'not entered' : 'entered'}
           stepWords={`by ${size}`}
           value={entered === null ? null : figure(entered)}
           unit={step.unit}
@@ -109,8 +112,33 @@ export function ReadingStep({ walk, step }: { readonly walk: CheckWalk; readonly
         ) : null
       }
     >
-      <SaysBlock lead="Limits:">{limitWords(step, revision.spec)}.</SaysBlock>
+      <LimitsLine step={step} entered={entered} spec={revision.spec} />
       <StepNote walk={walk} step={step.key} />
     </StepFrame>
+  );
+}
+
+interface LimitsLineProps {
+  readonly step: Reading;
+  readonly entered: number | null;
+  readonly spec: RigSpec;
+}
+
+/** The limits are two faces; what was read stands in the void between them, or it does not belong there. */
+function LimitsLine({ step, entered, spec }: LimitsLineProps) {
+  const { lowest, highest } = stepLimits(step, spec);
+  if (lowest === null || highest === null)
+    return <SaysBlock lead="Limits:">{limitWords(step, spec)}.</SaysBlock>;
+  const inside = entered !== null && outsideWords(step, entered, spec) === null;
+  return (
+    <div>
+      <TwoFaces
+        label={`Limits: ${limitWords(step, spec)}`}
+        low={figure(lowest)}
+        {...(inside ? { middle: figure(entered) } : {})}
+        high={figure(highest)}
+        unit={step.unit}
+      />
+    </div>
   );
 }

@@ -29,6 +29,9 @@ export function StepFrame({ walk, main, also, panel, fields, children }: StepFra
   const open = check.ended === null;
   const mayWaive = open && walk.actionable && walk.may_waive;
   const step = shown?.step;
+  const hideList = (): void => {
+    change((now) => ({ ...now, list: false }));
+  };
   const others = [
     also,
     mayWaive ? (
@@ -51,8 +54,7 @@ export function StepFrame({ walk, main, also, panel, fields, children }: StepFra
             <FieldRow
               label="Abandon check"
               source="with a reason"
-              value={null}
-              unit=""
+              value=""
               onPress={() => {
                 setAsking('abandon');
               }}
@@ -60,7 +62,17 @@ export function StepFrame({ walk, main, also, panel, fields, children }: StepFra
           ) : null}
         </FieldColumn>
       }
-      thumbs={<ThumbZone label="Actions" main={main} others={others} />}
+      thumbs={
+        draft.list ? (
+          // A step that is hidden behind the list cannot be done by a thumb that rests there.
+          <ThumbZone
+            label="Actions"
+            main={<ThumbDome size="big" label={'Back to\nthe step'} onComplete={hideList} />}
+          />
+        ) : (
+          <ThumbZone label="Actions" main={main} others={others} />
+        )
+      }
     >
       {draft.list ? <StepList walk={walk} /> : (panel ?? <StepFigure walk={walk}>{children}</StepFigure>)}
       {asking === 'waive' && step !== undefined ? (
@@ -107,7 +119,7 @@ function WalkRow({ walk }: { readonly walk: CheckWalk }) {
     <FieldRow
       label={shown === null ? 'All steps' : 'Step'}
       source={draft.list ? 'hide the list' : 'show the list'}
-      value={shown === null ? String(total) : `${at} of ${total}`}
+      value={<span className="check-count">{shown === null ? total : `${at} of ${total}`}</span>}
       onPress={() => {
         change((now) => ({ ...now, list: !now.list }));
       }}
@@ -129,7 +141,17 @@ function StepFigure({ walk, children }: { readonly walk: CheckWalk; readonly chi
         </>
       )}
       {children}
+      <After walk={walk} />
       <div role="status">{said === null ? null : <SaysBlock muted>{said}</SaysBlock>}</div>
     </div>
   );
+}
+
+/** What comes next, so that a hand can get ready for it. */
+function After({ walk }: { readonly walk: CheckWalk }) {
+  const { progress, shown, actionable } = walk;
+  const after = shown === null ? undefined : progress.steps[progress.steps.indexOf(shown) + 1];
+  return actionable && after !== undefined ? (
+    <p className="check-after muted">Then: {after.step.title}</p>
+  ) : null;
 }
