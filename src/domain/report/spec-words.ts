@@ -84,10 +84,22 @@ export function specFieldWords(field: string, topology: Topology): FieldWords {
   return { label: field, unit: '' };
 }
 
-/** A change in words: "Envelope rate: 5 Hz, was 6 Hz". Values as they were entered, never rounded. */
-export function specChangeWords(change: SpecChange, topology: Topology): string {
+export interface DifferenceWords {
+  readonly label: string;
+  readonly before: string;
+  readonly after: string;
+}
+
+/** Both sides of a difference, as they were entered and never rounded. */
+export function specDifference(change: SpecChange, topology: Topology): DifferenceWords {
   const { label, unit } = specFieldWords(change.field, topology);
-  return `${label}: ${valueWords(change.after, unit)}, was ${valueWords(change.before, unit)}`;
+  return { label, before: valueWords(change.before, unit), after: valueWords(change.after, unit) };
+}
+
+/** A change in words: "Envelope rate: 5 Hz, was 6 Hz". */
+export function specChangeWords(change: SpecChange, topology: Topology): string {
+  const { label, before, after } = specDifference(change, topology);
+  return `${label}: ${after}, was ${before}`;
 }
 
 function valueWords(value: SpecChange['after'], unit: string): string {

@@ -2,7 +2,7 @@ import { useState } from 'react';
 import { Choice } from '../../components/choice';
 import { headRevisions, rulingEnvelope, type RigDoc } from '../../domain/book/documents/rig';
 import { envelopeWords } from '../../domain/report/permit-words';
-import { specChangeWords } from '../../domain/report/spec-words';
+import { specDifference } from '../../domain/report/spec-words';
 import { specChanges } from '../../domain/rules/loosening';
 import { ActForm } from './act-form';
 import { ActOutcome, ForecastWords } from './act-outcome';
@@ -46,11 +46,14 @@ export function PartingSection({ rig }: { readonly rig: RigDoc }) {
         ))}
       </ul>
       {others.flatMap((other) =>
-        specChanges(first.spec, other.spec).map((change) => (
-          <p key={`${other.entry}${change.field}`} className="muted">
-            {other.number} against {first.number}: {specChangeWords(change, other.spec.topology)}
-          </p>
-        )),
+        specChanges(first.spec, other.spec).map((change) => {
+          const { label, before, after } = specDifference(change, other.spec.topology);
+          return (
+            <p key={`${other.entry}${change.field}`}>
+              <span className="muted">{label}</span> {first.number}: {before}, {other.number}: {after}
+            </p>
+          );
+        }),
       )}
       {may('parting.settled') ? (
         <>

@@ -53,7 +53,7 @@ function CardThumbs({ emergency }: { readonly emergency: Emergency }) {
             size="big"
             critical
             hold="second"
-            label={'Stand\nrig down'}
+            label={rig === undefined ? 'Stand\nrig down' : `Stand rig down:\n${rig.name}`}
             holdLabel={rig === undefined ? 'Hold: stand down' : `Hold: stand ${rig.name} down`}
             disabled={rig === undefined}
             onComplete={emergency.standDown}
