@@ -78,9 +78,9 @@ export function memoryBrowser({ time, seed, http, build_ms = 0 }: BrowserWorld):
         persisted: () => Promise.resolve(false),
         estimate: () => Promise.resolve({ usage: 1, quota: 100 }),
       },
-      http: (path, request) => (dead ? new Promise(() => {}) : http(path, request)),
+      http: (path, request) => (dead ? new Promise(() => {}) : time.working(http(path, request))),
       serviceWorker: null,
-      subtle: crypto.subtle,
+      subtle: countedSubtle(time),
       build_ms,
       app_version: 'test',
     };
@@ -107,4 +107,15 @@ export function memoryBrowser({ time, seed, http, build_ms = 0 }: BrowserWorld):
       factory = new IDBFactory();
     },
   };
+}
+
+/** WebCrypto works on threads of its own, which virtual time has to wait for. */
+function countedSubtle(time: VirtualTime): SubtleCrypto {
+  return new Proxy(crypto.subtle, {
+    get: (target, key) => {
+      const member: unknown = Reflect.get(target, key);
+      if (!(member instanceof Function)) return member;
+      return (...input: unknown[]) => time.working(Promise.resolve(Reflect.apply(member, target, input)));
+    },
+  });
 }

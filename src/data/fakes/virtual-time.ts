@@ -10,6 +10,8 @@ export interface VirtualTime {
   readonly clock: () => Clock;
   readonly timers: Timers;
   readonly passed_ms: () => number;
+  /** Work of real threads, such as WebCrypto: time does not pass before it has come to rest. */
+  readonly working: <T>(work: Promise<T>) => Promise<T>;
   /** Sets the wall clock without letting time pass. */
   readonly setWall: (wall_ms: number) => void;
   /** Lets time pass and runs what falls due, letting promises settle in between. */
@@ -20,6 +22,11 @@ const START_WALL_MS = Date.UTC(2026, 7, 20, 9, 0, 0);
 
 export function virtualTime(start_wall_ms = START_WALL_MS): VirtualTime {
   let passed_ms = 0;
+  let busy = 0;
+  const rest = async () => {
+    do await settle();
+    while (busy > 0);
+  };
   let wall_offset_ms = start_wall_ms;
   const due = new Set<Due>();
   const earliest = (until_ms: number): Due | undefined =>
@@ -28,7 +35,7 @@ export function virtualTime(start_wall_ms = START_WALL_MS): VirtualTime {
     clock: () => {
       const began_ms = passed_ms;
       return {
-        wallMs: () => wall_offset_ms + passed_ms,
+        wallMs: () => Math.floor(wall_offset_ms + passed_ms),
         monotonicMs: () => passed_ms - began_ms,
         offsetMin: () => 120,
         zone: () => 'Europe/Berlin',
@@ -44,25 +51,33 @@ export function virtualTime(start_wall_ms = START_WALL_MS): VirtualTime {
       },
     },
     passed_ms: () => passed_ms,
+    working: async (work) => {
+      busy += 1;
+      try {
+        return await work;
+      } finally {
+        busy -= 1;
+      }
+    },
     setWall: (wall_ms) => {
       wall_offset_ms = wall_ms - passed_ms;
     },
     pass: async (ms) => {
       const until_ms = passed_ms + ms;
-      await settle();
+      await rest();
       for (let one = earliest(until_ms); one !== undefined; one = earliest(until_ms)) {
         due.delete(one);
         passed_ms = Math.max(passed_ms, one.at_ms);
         one.run();
-        await settle();
+        await rest();
       }
       passed_ms = until_ms;
-      await settle();
+      await rest();
     },
   };
 }
 
-const TURNS = 30;
+const TURNS = 100;
 
 /** Lets promises, the in-memory database and WebCrypto come to rest. */
 export async function settle(turns = TURNS): Promise<void> {
