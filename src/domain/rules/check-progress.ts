@@ -25,10 +25,14 @@ export function checkProgress(sheet: SheetDoc, check: CheckDoc, spec: RigSpec): 
   return { steps, next, complete: next === null };
 }
 
+/** Irregular for its value alone: judged again below, since a correction may have put the value right. */
+const BY_VALUE: ReadonlySet<string> = new Set(['outside-limits', 'wait-too-short', 'no-second-person']);
+
 function progressOf(step: Step, record: StepRecord | null, spec: RigSpec): StepProgress {
   if (record === null) return { step, record, state: 'open' };
-  if (record.state === 'waived')
-    return { step, record, state: record.irregular === null ? 'waived' : 'open' };
+  // What was irregular counts as an observation, never as leave to go on (protocol 1.2).
+  if (record.irregular !== null && !BY_VALUE.has(record.irregular)) return { step, record, state: 'open' };
+  if (record.state === 'waived') return { step, record, state: 'waived' };
   if (record.result === null || record.result.type !== step.type) return { step, record, state: 'open' };
   if (record.result.type === 'reading' && !withinLimits(step, record.result.value, spec))
     return { step, record, state: 'outside-limits' };

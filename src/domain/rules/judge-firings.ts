@@ -54,7 +54,7 @@ function* openingObjection(entry: EntryOf<'firing.opened'>, context: JudgeContex
     person,
     device,
     stamp,
-    now_ms: context.now_ms,
+    now_ms: momentOf(stamp, context),
     filling: false,
   });
   if (first !== undefined) return objection(first.code, first.words, first.since);

@@ -68,6 +68,7 @@ export function* foldCheck(entry: CheckEntry, standing: Standing): Effect {
       );
       return;
     case 'check.abandoned':
+      if (check.ended !== null) return;
       yield* putDoc({
         ...check,
         ended: { ...trace, how: 'abandoned', irregular: standing.irregular, words: entry.body.why },
