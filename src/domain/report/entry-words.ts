@@ -131,7 +131,12 @@ function plain(value: number, unit: string): string {
 
 function fieldsOf(prefix: string, value: unknown): { field: string; value: string }[] {
   if (value === null || typeof value !== 'object') {
-    return [{ field: prefix, value: value === null ? 'none' : String(value) }];
+    return [
+      {
+        field: prefix,
+        value: value === null ? 'none' : typeof value === 'string' ? value : JSON.stringify(value),
+      },
+    ];
   }
   return Object.entries(value).flatMap(([key, inner]: [string, unknown]) =>
     fieldsOf(prefix === '' ? key : `${prefix}.${key}`, inner),
