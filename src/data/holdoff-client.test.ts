@@ -1,6 +1,8 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { exchange, labOf, newWorld, openTab, PIN, signIn } from './fakes/tablet';
 import { modelReading } from './fakes/model-lab';
+
+vi.setConfig({ testTimeout: 30_000 });
 
 describe('a tablet from its first sign-in to a handed-over firing', () => {
   it('fills its Book, logs a firing offline and hands everything over exactly once', async () => {

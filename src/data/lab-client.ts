@@ -62,12 +62,13 @@ export type LabOpening =
 
 export interface LabOptions {
   readonly pin_iterations?: number;
+  readonly ballast_MB?: number;
   /** False where whoever opens it calls `exchange.round` by hand. */
   readonly exchanges_by_itself?: boolean;
 }
 
 export async function openLab(ports: Ports, place: LabPlace, options: LabOptions = {}): Promise<LabOpening> {
-  const opened = await openLabStores(ports, place);
+  const opened = await openLabStores({ ...ports, ...options }, place);
   if (opened.type !== 'open') return opened;
   const lab = await assemble(ports, { place, stores: opened.stores, options });
   await lab.people.load();

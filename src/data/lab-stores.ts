@@ -27,7 +27,10 @@ export interface LabPlace {
 }
 
 /** Opens a lab's two databases, and its journal: first what older page lives left, then a file of our own. */
-export async function openLabStores(ports: Ports, { lab, page_life }: LabPlace): Promise<StoresOutcome> {
+export async function openLabStores(
+  ports: Ports & { readonly ballast_MB?: number },
+  { lab, page_life }: LabPlace,
+): Promise<StoresOutcome> {
   const store = openBookStore(lab, ports);
   const opened = await store.open();
   if (opened.type === 'failed') return opened;

@@ -52,6 +52,8 @@ function tablet() {
 
 const ADA = { person: 'ada', key: 'reading/1' };
 
+vi.setConfig({ testTimeout: 30_000 });
+
 describe('drafts', () => {
   it('are there after a reload, 250 ms after the last touch', async () => {
     const { time, pageLife } = tablet();

@@ -12,6 +12,8 @@ export interface MemoryTab {
   readonly setVisible: (visible: boolean) => void;
   /** The tab is gone without a word: its locks are free, its timers never run. */
   readonly kill: () => void;
+  /** The tab holds what it holds and does nothing any more, as a tab in the background may. */
+  readonly freeze: () => void;
 }
 
 export interface MemoryBrowser {
@@ -91,6 +93,9 @@ export function memoryBrowser({ time, seed, http, build_ms = 0 }: BrowserWorld):
       },
       setVisible: (next) => {
         visible = next;
+      },
+      freeze: () => {
+        dead = true;
       },
       kill: () => {
         dead = true;

@@ -39,7 +39,11 @@ export interface OpenTab {
 /** Opens a tab whose handover is moved by hand, unless asked otherwise. */
 export async function openTab(browser: MemoryBrowser, exchanges_by_itself = false): Promise<OpenTab> {
   const tab = browser.openTab();
-  const client = await openClient(tab.ports, { pin_iterations: QUICK_PIN, exchanges_by_itself });
+  const client = await openClient(tab.ports, {
+    pin_iterations: QUICK_PIN,
+    ballast_MB: 1,
+    exchanges_by_itself,
+  });
   return { tab, client };
 }
 

@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { uuidFromBytes } from '../../domain/book/ids';
 import { seededBytes } from '../fakes/chance';
 import { restoreBook } from '../fakes/model-book';
@@ -7,6 +7,8 @@ import type { NetFault } from '../fakes/model-server';
 import { exchange, labOf, newWorld, openTab, signIn, type World } from '../fakes/tablet';
 import type { LabClient } from '../lab-client';
 import { settle } from '../fakes/virtual-time';
+
+vi.setConfig({ testTimeout: 30_000 });
 
 async function bench(name: 'Ada' | 'Milo' | 'Inge' = 'Ada') {
   const world = newWorld();

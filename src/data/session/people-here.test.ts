@@ -1,5 +1,5 @@
 import { IDBFactory, IDBKeyRange } from 'fake-indexeddb';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { seededBytes } from '../fakes/chance';
 import { virtualTime } from '../fakes/virtual-time';
 import { openBookStore } from '../store/book-store';
@@ -30,6 +30,8 @@ async function tablet() {
   await people.setPin(ADA.id, PIN);
   return { time, people, load };
 }
+
+vi.setConfig({ testTimeout: 30_000 });
 
 describe('PINs of the people who signed in here', () => {
   it('open for the right one and double the wait for each wrong one', async () => {

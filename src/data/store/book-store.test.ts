@@ -16,7 +16,12 @@ const device = id();
 const rig = id();
 
 function openOne(indexedDB = new IDBFactory()) {
-  return openBookStore(lab, { idb: { indexedDB, IDBKeyRange }, random, timers: virtualTime().timers });
+  return openBookStore(lab, {
+    idb: { indexedDB, IDBKeyRange },
+    random,
+    timers: virtualTime().timers,
+    ballast_MB: 2,
+  });
 }
 
 function order(draft: EntryDraft, change: Partial<AppendOrder> = {}): AppendOrder {
@@ -56,6 +61,8 @@ function quotaExceeded(): Error {
   const inner = new DOMException('The disk is full.', 'QuotaExceededError');
   return Object.assign(new Error('aborted'), { name: 'AbortError', inner });
 }
+
+vi.setConfig({ testTimeout: 30_000 });
 
 describe('appending to the strict store', () => {
   it('gives two tabs that append at once one contiguous sequence', async () => {

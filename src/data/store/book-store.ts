@@ -9,7 +9,7 @@ import {
   type Received,
 } from './acknowledge';
 import { appendInside, type AppendOrder } from './append-entry';
-import { ballast } from './ballast';
+import { ballast, BALLAST_MB } from './ballast';
 import { bookDatabase, type BookDatabase, type EntryRow } from './book-database';
 import { getCount, getKey, putKey, type DeviceRecord, type KeyValues } from './book-keys';
 import { strictWrite, type WriteOutcome } from './strict-write';
@@ -25,6 +25,7 @@ export interface StorePorts {
   readonly idb: IdbPort;
   readonly random: RandomBytes;
   readonly timers: Timers;
+  readonly ballast_MB?: number;
 }
 
 export type BookStore = ReturnType<typeof openBookStore>;
@@ -32,7 +33,7 @@ export type BookStore = ReturnType<typeof openBookStore>;
 /** Own entries and everything else that must be durable before the screen says so. */
 export function openBookStore(lab: string, ports: StorePorts) {
   const database = bookDatabase(lab, ports.idb);
-  const reserve = ballast(database, ports.random);
+  const reserve = ballast(database, ports.random, ports.ballast_MB ?? BALLAST_MB);
   const write = <T>(work: () => PromiseLike<T>) => strictWrite(database, work, reserve.free);
   return {
     lab,
