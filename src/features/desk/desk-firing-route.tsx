@@ -32,7 +32,7 @@ function OpenedFiring({ id }: { readonly id: string }) {
   const zone = useLab()?.settings.zone ?? 'Etc/UTC';
   return (
     <>
-      <Fetched answer={answer} />
+      <Fetched answer={answer} quiet />
       {answer.data === undefined ? null : (
         <FiringReport answer={answer.data} zone={zone} refetch={answer.refetch} />
       )}

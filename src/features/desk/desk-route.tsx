@@ -81,7 +81,7 @@ function LastFirings() {
   return (
     <section className="desk-scroll">
       <h2>Firings</h2>
-      <Fetched answer={answer} />
+      <Fetched answer={answer} quiet />
       {answer.data === undefined ? null : (
         <Table
           caption="The last firings"
