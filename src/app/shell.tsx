@@ -1,17 +1,18 @@
-import { Suspense } from 'react';
+import { Suspense, useCallback, useState } from 'react';
 import { Navigate, Route, Routes, useLocation } from 'react-router-dom';
 import { Screen, FrameProvider } from '../components/frame';
 import { EmergencyTooth } from '../components/emergency-tooth';
 import { SaysBlock } from '../components/says-block';
 import { paths, patterns } from '../config/paths';
 import { DisplayProvider } from '../data/use-display';
+import { useResume } from '../data/use-resume';
 import { useSession } from '../data/use-session';
 import { UnlockScreen } from '../features/account/unlock-screen';
 import { AreaBoundary } from './area-boundary';
 import { FramePlaces } from './frame-places';
 import { FrameStrip } from './frame-strip';
 import { NoiseProvider } from './noise-watch';
-import { PlaceKeeper } from './place-keeper';
+import { isFrontDoor, PlaceKeeper } from './place-keeper';
 import { useRigInHand } from './rig-in-hand';
 import { ROUTES, type AppRoute } from './routes';
 import { useGo } from './use-go';
@@ -21,11 +22,13 @@ import './shell.css';
 export function Shell() {
   const { pathname } = useLocation();
   const go = useGo();
+  const [cameBack, setCameBack] = useState(false);
+  const cameToPlace = useCallback(() => setCameBack(true), []);
   const atDesk = pathname.startsWith(paths.desk());
   return (
     <DisplayProvider place={atDesk ? 'desk' : 'bench'}>
       <NoiseProvider>
-        <PlaceKeeper />
+        <PlaceKeeper onPlace={cameToPlace} />
         <FrameProvider
           strip={<FrameStrip />}
           tooth={
@@ -41,7 +44,7 @@ export function Shell() {
             {ROUTES.map((route) => (
               <Route key={route.path} path={route.path} element={<Guarded route={route} />} />
             ))}
-            <Route path={patterns.bench} element={<ToRig to={paths.benchOf} />} />
+            <Route path={patterns.bench} element={<FrontDoor cameBack={cameBack} />} />
             <Route path={patterns.lookups} element={<ToRig to={paths.gapLookup} />} />
             <Route path="/" element={<Navigate to={paths.bench()} replace />} />
             <Route path="*" element={<Nowhere />} />
@@ -65,6 +68,16 @@ function Guarded({ route }: { readonly route: AppRoute }) {
       </Suspense>
     </AreaBoundary>
   );
+}
+
+/** After a kill the app comes back to the same place; later the front door is just the Bench. */
+function FrontDoor({ cameBack }: { readonly cameBack: boolean }) {
+  const session = useSession();
+  const { place } = useResume();
+  if (session.state === 'open' && !cameBack && place.route !== null && !isFrontDoor(place.route)) {
+    return <Navigate to={place.route} replace />;
+  }
+  return <ToRig to={paths.benchOf} />;
 }
 
 /** A place without a rig in its path goes to the rig in hand. */

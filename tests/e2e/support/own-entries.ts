@@ -9,7 +9,9 @@ export interface OwnRow {
 /** What the tablet itself keeps as its own entries, read past the app from IndexedDB. */
 export function ownEntries(page: Page): Promise<readonly OwnRow[]> {
   return page.evaluate(async () => {
-    const names = (await indexedDB.databases()).map((one) => one.name ?? '').filter((name) => name.startsWith('book-'));
+    const names = (await indexedDB.databases())
+      .map((one) => one.name ?? '')
+      .filter((name) => name.startsWith('book-'));
     const rows: { id: string; seq: number; kind: string }[] = [];
     for (const name of names) {
       const database = await new Promise<IDBDatabase>((resolve, reject) => {
@@ -25,7 +27,11 @@ export function ownEntries(page: Page): Promise<readonly OwnRow[]> {
           request.onerror = () => reject(request.error ?? new Error('could not read'));
         });
         for (const row of all) {
-          const entry = ((row as { entry?: unknown }).entry ?? row) as { id: string; seq: number; kind: string };
+          const entry = ((row as { entry?: unknown }).entry ?? row) as {
+            id: string;
+            seq: number;
+            kind: string;
+          };
           rows.push({ id: entry.id, seq: entry.seq, kind: entry.kind });
         }
       }
