@@ -17,7 +17,8 @@ export interface Answer {
   readonly warnings: readonly Warning[];
 }
 
-interface AnswerParts {
+/** What an answer is built from. */
+export interface AnswerParts {
   readonly value: number;
   readonly unit: string;
   readonly model: string;
