@@ -34,11 +34,12 @@ export function fieldFactorOf(geometry: FieldGeometry, x: number): number {
 
 /** Axial profile of two equal parallel cylinders at gap over radius x > 0. */
 export function cylinderProfile(x: number): AxialProfile {
-  return {
-    fieldFactor: fieldFactorOf('cylinders', x),
-    fields: Float64Array.from(SHARES, cylinderField(x)),
-    weights: WEIGHTS,
-  };
+  return profileFrom(fieldFactorOf('cylinders', x), cylinderField(x));
+}
+
+/** An axial profile from the field over its mean at a share of the gap. */
+export function profileFrom(fieldFactor: number, fieldAt: (share: number) => number): AxialProfile {
+  return { fieldFactor, fields: Float64Array.from(SHARES, fieldAt), weights: WEIGHTS };
 }
 
 /** Axial profiles of two equal spheres at gap over radius x > 0, by how they are connected. */
