@@ -1,3 +1,8 @@
+import { minimumStrength, relativePermittivity } from '../../src/domain/capacitor/dielectrics';
+import { edgeDischargeInception } from '../../src/domain/capacitor/edge';
+import { fringeExcess } from '../../src/domain/capacitor/fringe';
+import { lifeShots } from '../../src/domain/capacitor/life';
+import { areaStrengthRatio, punctureProbability } from '../../src/domain/capacitor/puncture';
 import { bleedPower, bleedTime } from '../../src/domain/capacitor/bleed';
 import { sheetCapacitance } from '../../src/domain/capacitor/capacitance';
 import { shotCharge, storedEnergy } from '../../src/domain/capacitor/energy';
@@ -36,6 +41,19 @@ export const CAPACITOR_FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = 
       air_um: i.number('g_um'),
     }),
   'capacitor.dielectric.petMinStrength': (i) => petMinimumStrength(i.number('t_um')),
+  'capacitor.dielectric.relativePermittivity': (i) => relativePermittivity(i.text('material')),
+  'capacitor.dielectric.strength': (i) => minimumStrength(i.text('material'), i.number('thickness_mm')),
+  'capacitor.fringeExcess': (i) => fringeExcess(i.number('w_m'), i.number('t_m')),
+  'capacitor.pdInceptionMin': (i) => edgeDischargeInception(i.number('t_um'), i.number('eps_r')),
+  'capacitor.areaStrengthRatio': (i) => areaStrengthRatio(i.number('A_over_A0'), i.number('beta')),
+  'capacitor.punctureProbability': (i) =>
+    punctureProbability({
+      stress_over_E63: i.number('E_over_E63'),
+      area_ratio: i.number('A_over_A0'),
+      beta: i.number('beta'),
+    }),
+  'capacitor.life': (i) =>
+    lifeShots({ ratedShots: i.number('N0'), exponent: i.number('k') }, i.number('E_over_E0')),
   'capacitor.bleedTime': (i) =>
     bleedTime(
       { resistance_ohm: i.number('R_ohm'), capacitance_F: i.number('C_F') },

@@ -1,8 +1,10 @@
+import { rodFieldFactor } from '../../src/domain/gap/capped-rods';
 import { cylinderBreakdown, fieldFactor, sphereBreakdown } from '../../src/domain/gap/curved-gap';
 import { earlyBreakProbability } from '../../src/domain/gap/early-break';
 import { airDensity, humidityFactor, type GapPoint } from '../../src/domain/gap/gas-density';
 import type { GapInput } from '../../src/domain/gap/gap-input';
 import { GAS_NAMES, TOWNSEND_CONSTANTS } from '../../src/domain/gap/gas-table';
+import { hexBarBreakdown, hexFieldFactor } from '../../src/domain/gap/hex-bars';
 import { highFieldFactor } from '../../src/domain/gap/high-field';
 import {
   isMonotone,
@@ -33,15 +35,12 @@ import {
 import { erosionGrowth, purgeFlow } from '../../src/domain/gap/upkeep';
 import { kilopascalToBar } from '../../src/domain/units/pressure';
 import { refused, type Result } from '../../src/domain/units/result';
-import type { ReferenceFunction, Skipped } from './fn-table';
+import type { ReferenceFunction } from './fn-table';
 import type { Inputs } from './inputs';
 
 // What the check format states where these are not among the inputs.
 const SPHERE_TABLE_KPA = 101.3;
 const REFERENCE_C = 20;
-
-const HEX_LATER: Skipped = { skip: 'hexagonal bars are not modelled yet' };
-const RODS_LATER: Skipped = { skip: 'capped rods are not modelled yet' };
 
 export const GAP_FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = {
   'gap.airDensity': (i) => airDensity(i.number('p_kPa'), i.number('T_C')),
@@ -50,8 +49,8 @@ export const GAP_FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = {
     sphereBreakdown({ ...pointOf(i, pressureOf(i)), diameter_cm: diameterOf(i) ?? Number.NaN }),
   'gap.breakdown.cylinders': (i) =>
     cylinderBreakdown({ ...pointOf(i, pressureOf(i)), radius_cm: i.number('R_cm') }),
-  'gap.breakdown.hexBars': () => HEX_LATER,
-  'gap.fieldFactorHex': () => HEX_LATER,
+  'gap.breakdown.hexBars': hexBarsOf,
+  'gap.fieldFactorHex': hexFactorOf,
   'gap.fieldFactor': fieldFactorOf,
   'gap.martin.spheres': (i) =>
     martinSpheres({
@@ -140,7 +139,8 @@ function constantsOf(i: Inputs) {
 }
 
 function fieldFactorOf(i: Inputs) {
-  if (i.text('geometry') === 'capped_rods') return RODS_LATER;
+  if (i.text('geometry') === 'capped_rods')
+    return rodFieldFactor(i.number('d_over_R'), i.number('L_over_R', 20));
   const geometry = i.oneOf('geometry', [
     'spheres_sym',
     'spheres_ground',
@@ -149,6 +149,31 @@ function fieldFactorOf(i: Inputs) {
     'cylinder_plane',
   ]);
   return geometry.ok ? fieldFactor(geometry.value, i.number('d_over_R')) : geometry;
+}
+
+function orientationOf(i: Inputs) {
+  return i.oneOf('orientation', ['flat', 'edge']);
+}
+
+function hexFactorOf(i: Inputs) {
+  const orientation = orientationOf(i);
+  if (!orientation.ok) return orientation;
+  return hexFieldFactor({
+    orientation: orientation.value,
+    cornerOverFlats: i.number('rc_over_AF'),
+    gapOverFlats: i.number('d_over_AF'),
+  });
+}
+
+function hexBarsOf(i: Inputs) {
+  const orientation = orientationOf(i);
+  if (!orientation.ok) return orientation;
+  return hexBarBreakdown({
+    ...pointOf(i, pressureOf(i)),
+    orientation: orientation.value,
+    acrossFlats_mm: 10 * i.number('AF_cm'),
+    cornerRadius_mm: 10 * i.number('rc_cm'),
+  });
 }
 
 const SHAPES: Readonly<Record<string, GapInput['electrodes']['shape']>> = {

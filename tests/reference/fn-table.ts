@@ -1,8 +1,12 @@
 import type { Answer } from '../../src/domain/units/answer';
 import type { Result } from '../../src/domain/units/result';
+import { ALIGNMENT_FUNCTIONS } from './fn-alignment';
+import { BEAM_FUNCTIONS } from './fn-beam';
 import { CAPACITOR_FUNCTIONS } from './fn-capacitor';
+import { CHANNEL_FUNCTIONS } from './fn-channel';
 import { CIRCUIT_FUNCTIONS } from './fn-circuit';
 import { GAP_FUNCTIONS } from './fn-gap';
+import { GAS_FUNCTIONS } from './fn-gas';
 import { LINE_FUNCTIONS } from './fn-line';
 import { SPARK_FUNCTIONS } from './fn-spark';
 import type { Inputs } from './inputs';
@@ -24,4 +28,8 @@ export const FUNCTIONS: Readonly<Record<string, ReferenceFunction>> = {
   ...SPARK_FUNCTIONS,
   ...LINE_FUNCTIONS,
   ...CIRCUIT_FUNCTIONS,
+  ...CHANNEL_FUNCTIONS,
+  ...ALIGNMENT_FUNCTIONS,
+  ...GAS_FUNCTIONS,
+  ...BEAM_FUNCTIONS,
 };

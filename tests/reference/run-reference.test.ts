@@ -29,10 +29,22 @@ describe('evaluate', () => {
     ['an input that the domain refuses', { inputs: { p_bar_abs: -1, d_cm: 1 } }, 'failed'],
     ['a truth', { fn: 'gap.uniform.isMonotone', inputs: { gas: 'air' }, expected: true }, 'passed'],
     ['a truth against a figure', { expected: true }, 'failed'],
-    ['an unknown function', { fn: 'beam.photonEnergy' }, 'skipped'],
+    ['an unknown function', { fn: 'gap.noSuchThing' }, 'skipped'],
     ['a name that every object has', { fn: 'toString' }, 'skipped'],
-    ['hexagonal bars', { fn: 'gap.breakdown.hexBars', inputs: {} }, 'skipped'],
-    ['capped rods', { fn: 'gap.fieldFactor', inputs: { geometry: 'capped_rods', d_over_R: 1 } }, 'skipped'],
+    [
+      'hexagonal bars without a size',
+      { fn: 'gap.breakdown.hexBars', inputs: { orientation: 'flat' } },
+      'failed',
+    ],
+    [
+      'capped rods',
+      {
+        fn: 'gap.fieldFactor',
+        inputs: { geometry: 'capped_rods', d_over_R: 2, L_over_R: 20 },
+        expected: 1.749,
+      },
+      'passed',
+    ],
     ['an unknown geometry', { fn: 'gap.fieldFactor', inputs: { geometry: 'cubes', d_over_R: 1 } }, 'failed'],
     [
       'spheres without a pressure, which is 101.3 kPa',
@@ -109,11 +121,11 @@ describe('reportOn', () => {
     const { lines, ...counts } = reportOn([
       check({}),
       check({ id: 'two', expected: 40, area: 'B' }),
-      check({ id: 'three', fn: 'gap.fieldFactorHex', area: 'B' }),
+      check({ id: 'three', fn: 'gap.noSuchThing', area: 'B' }),
     ]);
     expect(counts).toEqual({ passed: 1, failed: 1, skipped: 1 });
     expect(lines[0]).toBe('FAILED two gap.uniform.air: got 31.08, expected 40 within 0.001');
-    expect(lines).toContain('skipped 1 x gap.fieldFactorHex: hexagonal bars are not modelled yet');
+    expect(lines).toContain('skipped 1 x gap.noSuchThing: function not known');
     expect(lines.some((line) => /^B\s+0\s+1\s+1$/.test(line))).toBe(true);
     expect(lines.at(-1)).toBe('1 passed, 1 failed, 1 skipped');
   });
