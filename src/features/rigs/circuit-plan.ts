@@ -62,6 +62,7 @@ const WIDE_INVERSION: CircuitPlan = {
 
 const WIDE_TRANSFER: CircuitPlan = {
   ...WIDE_INVERSION,
+  height: 390,
   first: { x: 340, width: 116 },
   gap: { upright: false, x: 486, y: 92, thick: 60, long: 62, apart: 28 },
   second: { x: 612, width: 92 },

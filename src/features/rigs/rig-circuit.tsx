@@ -101,9 +101,9 @@ function Symbols({ plan, acrossKnown }: { readonly plan: CircuitPlan; readonly a
     <>
       <rect
         className="circuit-box"
-        x={supply_x - 36 * k}
+        x={supply_x - 42 * k}
         y={middle - 42 * k}
-        width={72 * k}
+        width={84 * k}
         height={84 * k}
       />
       {lying((ballast.from + ballast.to) / 2, rail, ballast.to - ballast.from)}
@@ -225,16 +225,16 @@ function Letters({ plan, spec, view }: Omit<Props, 'name'> & { readonly plan: Ci
         muted={1}
       />
       {channel.upright ? (
-        <Lines x={plan.width - 6} y={ground - 6} anchor="end" lines={[channelText]} />
+        <Lines x={channel.x} y={ground + 28} anchor="middle" lines={[channelText]} />
       ) : (
         <Lines x={channel.x} y={rail + 46} anchor="middle" lines={[channelText]} />
       )}
       {spec.channel.across_kohm === null ? null : channel.upright ? (
         <Lines
-          x={channel.x + acrossAside(plan) + 18}
-          y={rail + 30}
-          anchor="end"
-          lines={[`${spec.channel.across_kohm}\u2009kΩ`]}
+          x={channel.x + acrossAside(plan) + 20}
+          y={middle - 6}
+          anchor="start"
+          lines={[String(spec.channel.across_kohm), 'kΩ']}
         />
       ) : (
         <Lines
