@@ -35,11 +35,13 @@ export function isDuplicateKey(error: unknown): boolean {
 export function withoutValues(error: unknown): unknown {
   if (!(error instanceof Error) || !isDatabaseError(error)) return error;
   const { name, stack } = error;
-  const fact = (key: string): unknown =>
-    key in error ? (error as unknown as Record<string, unknown>)[key] : undefined;
+  const fact = (key: string): string | number | undefined => {
+    const value: unknown = key in error ? Object.getOwnPropertyDescriptor(error, key)?.value : undefined;
+    return typeof value === 'string' || typeof value === 'number' ? value : undefined;
+  };
   return {
     type: name,
-    message: `the database answered ${String(fact('code') ?? fact('errno') ?? name)}`,
+    message: `the database answered ${fact('code') ?? fact('errno') ?? name}`,
     errno: fact('errno'),
     sqlState: fact('sqlState'),
     stack: (stack ?? '').split('\n').filter((line) => /^\s+at /.test(line)),

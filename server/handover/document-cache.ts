@@ -29,9 +29,7 @@ export function createDocumentCache(load: Load): DocumentCache {
   async function fetch(ids: readonly string[]): Promise<readonly Document[]> {
     const fresh = [...new Set(ids)].filter((id) => !asked.has(id));
     if (fresh.length === 0) return [];
-    const found = await load(fresh).catch((error: unknown) => {
-      throw new LoadFailed(error);
-    });
+    const found = await load(fresh);
     for (const id of fresh) asked.add(id);
     for (const doc of found) documents.set(docKey(doc), doc);
     return found;
@@ -45,7 +43,11 @@ export function createDocumentCache(load: Load): DocumentCache {
       }
     },
     async get(key) {
-      if (!asked.has(key.id)) await fetch([key.id]);
+      if (!asked.has(key.id)) {
+        await fetch([key.id]).catch((error: unknown) => {
+          throw new LoadFailed(error);
+        });
+      }
       return documents.get(docKey(key));
     },
   };

@@ -2,6 +2,7 @@ import { migrationSource } from '../../migrations/migration-source';
 import { readConfig } from '../config';
 import { createDatabase } from '../db/database';
 import { migrateToLatest } from '../db/migrate';
+import { refoldOutdatedLabs } from '../handover/refold';
 import { createLogger } from '../logger';
 
 const read = readConfig(process.env);
@@ -12,6 +13,8 @@ if (read.type === 'config-problems') {
 const database = createDatabase(read.config.database, createLogger('warn'));
 try {
   const names = await migrateToLatest(database, migrationSource);
+  const refolded = await refoldOutdatedLabs(database);
+  if (refolded.length > 0) console.log(`Made the documents of ${refolded.length} labs anew.`);
   if (names.length > 0) console.log(`Database brought to ${names.at(-1) ?? ''}.`);
 } catch (error) {
   console.error(error);
