@@ -96,7 +96,7 @@ export function ReadingStep({ walk, step }: { readonly walk: CheckWalk; readonly
             {...(text === '' ? {} : { typed: text })}
             units={[{ key: 'only', label: step.unit }]}
             unit="only"
-            allowMinus={(step.lowest ?? -1) < 0}
+            allowMinus
             words={CHECK_KEYPAD_WORDS}
             {...(said === null ? {} : { refusal: said })}
             onText={put}

@@ -9,7 +9,7 @@ describe('the wait before the stick', () => {
     // 400 MΩ · 5 nF · ln(25 kV / 50 V) = 12.43 s, rounded up; worked by hand.
     expect(plan.type === 'known' ? plan.nodes : []).toEqual([
       { name: 'Dump capacitor', words: '12.5\u2009s' },
-      { name: 'Peaking capacitor', words: 'under 0.1\u2009s' },
+      { name: 'Peaking capacitor', words: '< 0.1\u2009s' },
     ]);
   });
 

@@ -38,7 +38,7 @@ export function waitShare(plan: WaitPlan, waited_s: number): number {
 
 /** Waits round up; a millisecond is not shown as one. */
 function computedWords(computed_s: number): string {
-  if (computed_s < 0.1) return 'under 0.1\u2009s';
+  if (computed_s < 0.1) return '< 0.1\u2009s';
   const decimals = computed_s < 100 ? 1 : 0;
   return formatQuantity(computed_s, 's', { digits: { decimals }, rounding: 'up' });
 }

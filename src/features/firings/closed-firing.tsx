@@ -133,9 +133,10 @@ function ClosedHead({ facts }: { readonly facts: FiringFacts }) {
         <SaysBlock lead="Flagged:">{firingFlags(firing).join(', ')}.</SaysBlock>
       )}
       {unready === null ? null : (
-        <SaysBlock lead="Unready because:">
-          {unready.why} Missing: {unready.missing.map((one) => one.words).join(' ')}
-        </SaysBlock>
+        <>
+          <SaysBlock lead="Fired unready:">{unready.why}</SaysBlock>
+          <SaysBlock lead="Missing then:">{unready.missing.map((one) => one.words).join(' ')}</SaysBlock>
+        </>
       )}
       {closed !== null && closed.summary !== '' ? (
         <SaysBlock lead="Closing words:">{closed.summary}</SaysBlock>

@@ -80,7 +80,9 @@ function Quantity({ field, form, warning }: QuantityProps) {
   return (
     <QuantityField
       {...shared}
-      source={field === 'voltage_kV' && values.how !== null ? HOW_WORDS[values.how] : shared.source}
+      source={
+        field === 'voltage_kV' && values.how !== null ? HOW_WORDS[values.how] : shortSource(shared.source)
+      }
       stepWords={`by ${step}`}
       onStep={form.step}
       onOpen={() => {
@@ -137,6 +139,11 @@ function WordsRow({ field, label, form }: WordsRowProps) {
 /** Gauge or absolute is said by the unit; that it was read off the gauge is said here. */
 function gaugeSource(field: QuantityKey, source: string): string {
   return field === 'pressure_bar_g' && source === 'entered' ? 'gauge' : source;
+}
+
+/** Beside the step there is room for less. */
+function shortSource(source: string): string {
+  return source === 'carried over' ? 'carried' : source;
 }
 
 /** A row shows how a note begins; the whole of it stands where it is written. */

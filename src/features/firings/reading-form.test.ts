@@ -17,6 +17,7 @@ import {
   stepQuantity,
   toCorrection,
   toReading,
+  typedNotEntered,
   type ReadingDraft,
 } from './reading-form';
 
@@ -144,6 +145,15 @@ describe('entering and stepping', () => {
       const low = { ...READING, [key]: rule.minExcluded === true ? 0.001 : rule.min };
       expect(checkBody('firing.reading', low).type, key).toBe('ok');
     }
+  });
+});
+
+describe('figures that are typed and not entered', () => {
+  it('stand in the way of logging, since the screen shows them', () => {
+    const draft: ReadingDraft = { ...EMPTY_DRAFT, field: 'voltage_kV', typing: '19.' };
+    expect(typedNotEntered(draft)?.words).toMatch(/^Voltage: 19\.\u2009kV is typed and not entered/);
+    expect(typedNotEntered({ ...draft, typing: '' })).toBeNull();
+    expect(typedNotEntered({ ...draft, typing: null })).toBeNull();
   });
 });
 

@@ -144,6 +144,19 @@ export function stepQuantity(
   return checked.ok ? ok(enter(draft, at.key, checked.value)) : checked;
 }
 
+/** Figures on the open keypad that nobody has entered: logging past them would log something else than what is shown. */
+export function typedNotEntered(draft: ReadingDraft): Refusal | null {
+  const { field, typing } = draft;
+  if (!isQuantity(field) || typing === null || typing === '') return null;
+  const { label, unit } = QUANTITY_TRAITS[field];
+  const shown = `${typing.replace('-', '\u2212')}${unit === '' ? '' : `\u2009${unit}`}`;
+  return {
+    type: 'not-entered',
+    field,
+    words: `${label}: ${shown} is typed and not entered. Enter it, or leave it as it was.`,
+  };
+}
+
 /** The body of the reading, or what is still missing before it can be logged. */
 export function toReading(base: Base, draft: ReadingDraft): Result<ReadingValues> {
   const values = formValues(base, draft);

@@ -78,5 +78,10 @@ function lookedCell(row: ReadingDoc) {
 function EntryPlace({ id }: { readonly id: string }) {
   const state = useEntryState(id);
   if (state === undefined) return null;
-  return state.verdict === 'held-back' || state.verdict === 'altered' ? <b>{state.verdict}</b> : state.place;
+  const { verdict, place } = state;
+  return verdict === 'held-back' || verdict === 'altered' ? (
+    <b className="nowrap">{verdict === 'altered' ? 'altered' : 'held back'}</b>
+  ) : (
+    <span className="nowrap">{place}</span>
+  );
 }

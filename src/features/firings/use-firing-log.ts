@@ -2,7 +2,7 @@ import { useRef, useState } from 'react';
 import { useAppend, type AppendOutcome } from '../../data/use-append';
 import type { HoldOutcome } from '../../components/hold';
 import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
-import { toReading } from './reading-form';
+import { toReading, typedNotEntered } from './reading-form';
 import type { FiringFacts } from './use-firing-facts';
 import type { ReadingForm } from './use-reading-form';
 
@@ -41,6 +41,8 @@ export function useFiringLog({ facts, form, onLogged }: FiringLogOptions): Firin
   };
 
   const writeReading = async (): Promise<HoldOutcome> => {
+    const typed = typedNotEntered(form.draft);
+    if (typed !== null) return failed(typed.words);
     const reading = toReading(form.base, form.draft);
     if (!reading.ok) {
       form.refuse(reading.refusal);
