@@ -7,10 +7,16 @@ import { foldEntry } from '../../src/domain/book/fold';
 import { GENESIS_HASH } from '../../src/domain/book/ids';
 import type { Problem } from '../../src/domain/handover/problem';
 import { helloAnswerSchema, pullAnswerSchema, snapshotHeaderSchema } from '../../src/domain/handover/wire';
-import { createTestLab, testReading, testSpec, type TestLab } from '../../tests/support/test-lab';
+import {
+  createTestLab,
+  TEST_PASSWORD,
+  testReading,
+  testSpec,
+  type TestLab,
+} from '../../tests/support/test-lab';
 import { openTestFiring } from '../../tests/support/test-bench';
 import { startTestServer, type TestServer } from '../../tests/support/test-server';
-import { ask, type TestTablet } from '../../tests/support/test-tablet';
+import { ask, TestTablet } from '../../tests/support/test-tablet';
 
 const rigBody = { name: 'Kettle', number: '1A', spec: testSpec };
 
@@ -115,6 +121,17 @@ describe('what a tablet asks of the Book', () => {
       } finally {
         await second.stop();
       }
+    });
+
+    it('is let go with nothing when the server stops, and the server waits for the answer to be out', async () => {
+      const { since, hash } = await lastOf();
+      const second = await startTestServer({ database: server.config.database });
+      const elsewhere = new TestTablet(second.url);
+      await elsewhere.signIn(lab.lead.email, TEST_PASSWORD);
+      const open = elsewhere.pull({ since: (await tablet.hello()).body.head, hash, wait: 25 });
+      await new Promise((resolve) => setTimeout(resolve, 300));
+      await second.stop();
+      expect((await open).body).toMatchObject({ since, entries: [] });
     });
 
     it('ends a held-open question of a tablet that is revoked meanwhile, without an answer', async () => {
