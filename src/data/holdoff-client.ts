@@ -29,6 +29,8 @@ export interface HoldoffClient {
   readonly session: () => SessionView;
   /** What went wrong at the start, in words, to be shown. */
   readonly notices: readonly string[];
+  /** Somebody has read them: they do not come again at the next start. */
+  readonly noticesSeen: () => Promise<void>;
   /** Time of this page life, also before any lab is open. */
   readonly here: () => Here;
   readonly ports: Ports;
@@ -155,6 +157,11 @@ export async function openClient(ports: Ports, options: LabOptions = {}): Promis
     lab: () => lab,
     session: () => lab?.session.view() ?? NO_LAB,
     notices,
+    noticesSeen: async () => {
+      notices.length = 0;
+      await lab?.store.setKey('findings', []);
+      notify();
+    },
     here: () => lab?.here ?? idleHere,
     ports,
     update: createUpdateWatch(ports.serviceWorker, () => lab),

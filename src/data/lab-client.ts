@@ -142,6 +142,7 @@ async function assemble(ports: Ports, { place, stores, options }: Assembly): Pro
     exchange,
     view,
     chance: ports.chance,
+    small: ports.small,
     clock,
     timers,
     page,
@@ -165,7 +166,15 @@ async function assemble(ports: Ports, { place, stores, options }: Assembly): Pro
       handover.kick('append');
     },
   });
+  const rereadDevice = async () => {
+    device = (await store.device()) ?? device;
+    epoch = (await store.key('epoch')) ?? epoch;
+    tokens.dropAll();
+    await view.ownChanged();
+    handover.kick('session');
+  };
   bus.subscribe((message) => {
+    if (message.type === 'device') void rereadDevice();
     if (message.type === 'appended') {
       handover.kick('append');
       void view.ownChanged();
@@ -216,6 +225,7 @@ async function assemble(ports: Ports, { place, stores, options }: Assembly): Pro
       await store.moveToDevice(next.id);
       await journal?.header(await headerOf(store, next));
       await view.ownChanged();
+      bus.post({ type: 'device' });
       return { saved: true };
     },
     close: async () => {

@@ -3,7 +3,7 @@ import { helloAnswerSchema, PROTOCOL_VERSION, type HelloAnswer } from '../../dom
 import { fillMirror } from './fill';
 import { nextStep, type RoundFacts } from './handover-plan';
 import { went, type HandoverParts, type Setback, type StepOutcome } from './handover-ports';
-import { settleFork, settleReset } from './known';
+import { forgetKnownSetAside, settleFork, settleReset } from './known';
 import { pullPage } from './pull';
 import { createPush } from './push';
 import { toSetback } from './setback';
@@ -29,7 +29,16 @@ export function createExchange(parts: HandoverParts) {
     lastHello = null;
   };
 
+  /** A start that was cut off between enrolling anew and moving the queue leaves entries under the old tablet. */
+  const gatherQueue = async () => {
+    const device = await parts.store.device();
+    if (device === undefined || device.forked || device.keys === null) return;
+    const { count } = await parts.store.waiting();
+    if (count > (await parts.store.waitingOf(device.id))) await parts.store.moveToDevice(device.id);
+  };
+
   const greet = async (signal: AbortSignal): Promise<StepOutcome<HelloAnswer>> => {
+    await gatherQueue();
     const { epoch, revision, hash } = await parts.mirror.cursor();
     const { count, oldest_wall_ms } = await parts.store.waiting();
     const outcome = await parts.tokens.request('device', {
@@ -126,6 +135,9 @@ export function createExchange(parts: HandoverParts) {
         lastHello = { ...hello, state: 'ok' };
         mustReset = false;
         news.wasReset = true;
+        // What stands here is of a Book that is no more: nothing is ready on it until the new one has come.
+        await parts.mirror.outdate();
+        await parts.view.mirrorMoved([]);
         news.refill = true;
         return null;
       }
@@ -137,6 +149,7 @@ export function createExchange(parts: HandoverParts) {
       case 'fill': {
         const filled = await fillMirror(parts, signal);
         if (filled.type !== 'went') return filled;
+        if (news.refill) await forgetKnownSetAside(parts, signal);
         news.refill = false;
         return null;
       }

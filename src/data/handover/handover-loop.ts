@@ -1,4 +1,4 @@
-import type { Chance, Clock, PagePort, Timers } from '../ports/ports';
+import type { Chance, Clock, PagePort, SmallStore, Timers } from '../ports/ports';
 import type { BookView } from '../view/book-view';
 import { asExchanger, type ExchangerPorts } from './exchanger-lock';
 import type { Exchange, RoundOutcome } from './exchange';
@@ -22,6 +22,7 @@ export interface LoopParts extends ExchangerPorts {
   readonly clock: Clock;
   readonly timers: Timers;
   readonly page: PagePort;
+  readonly small: SmallStore;
 }
 
 export interface HandoverLoop {
@@ -39,7 +40,8 @@ export function createHandoverLoop(parts: LoopParts): HandoverLoop {
   const nap = createNap(timers, clock);
   const closing = new AbortController();
   let activity: Activity = { type: 'other-tab' };
-  let last_exchange_ms: number | null = null;
+  const exchangedKey = `holdoff-exchanged/${parts.lab}`;
+  let last_exchange_ms = readTime(parts.small.get(exchangedKey));
   let upgrade = false;
   let running: Promise<void> = Promise.resolve();
   let status = makeStatus();
@@ -72,6 +74,7 @@ export function createHandoverLoop(parts: LoopParts): HandoverLoop {
         failures = 0;
         upgrade = outcome.upgrade;
         last_exchange_ms = clock.wallMs();
+        parts.small.set(exchangedKey, String(last_exchange_ms));
         show({ type: 'idle' });
         if (!nap.isWoken() && !(await polled(signal))) greeted_ms = -Infinity;
         continue;
@@ -138,6 +141,11 @@ export function createHandoverLoop(parts: LoopParts): HandoverLoop {
       await running;
     },
   };
+}
+
+function readTime(text: string | null): number | null {
+  const time_ms = Number(text ?? Number.NaN);
+  return Number.isFinite(time_ms) ? time_ms : null;
 }
 
 /** A broken store or a bug must not end the loop: it is said, and tried again. */

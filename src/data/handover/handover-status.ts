@@ -11,7 +11,7 @@ export interface HandoverStatus {
     | 'fork'
     | 'other-tab'
     | 'trouble';
-  /** Wall clock of the last round that came through; null in a page life without one. */
+  /** Wall clock of the last round that came through; null where none is known. */
   readonly last_exchange_ms: number | null;
   /** Own entries that the server has not taken. */
   readonly waiting: number;

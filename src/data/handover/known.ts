@@ -1,4 +1,5 @@
 import { knownAnswerSchema, type HelloAnswer } from '../../domain/handover/wire';
+import type { Receipt } from '../store/acknowledge';
 import type { EntryRow } from '../store/book-database';
 import { putCount } from '../store/book-keys';
 import { went, type HandoverParts, type StepOutcome } from './handover-ports';
@@ -15,25 +16,53 @@ export async function askKnown(
   const unknown: EntryRow[] = [];
   for (let at = 0; at < rows.length; at += AT_ONCE) {
     const some = rows.slice(at, at + AT_ONCE);
-    const outcome = await parts.tokens.request('device', {
-      method: 'POST',
-      path: '/api/handover/known',
-      body: { ids: some.map((row) => row.id) },
-      schema: knownAnswerSchema,
-      signal: about.signal,
-    });
-    if (outcome.type !== 'ok') return toSetback(outcome);
-    const receipts = outcome.value.known.map(({ id, revision, outcome: verdict, reason }) => ({
-      id,
-      revision,
-      verdict,
-      reason,
-    }));
+    const asked = await knownOf(
+      parts,
+      some.map((row) => row.id),
+      about.signal,
+    );
+    if (asked.type !== 'went') return asked;
+    const receipts = asked.value;
     await parts.store.acknowledge(receipts, { epoch: about.epoch, now_ms: parts.clock.wallMs() });
     const known = new Set(receipts.map((receipt) => receipt.id));
     unknown.push(...some.filter((row) => !known.has(row.id)));
   }
   return went(unknown);
+}
+
+async function knownOf(
+  parts: HandoverParts,
+  ids: readonly string[],
+  signal: AbortSignal,
+): Promise<StepOutcome<readonly Receipt[]>> {
+  const outcome = await parts.tokens.request('device', {
+    method: 'POST',
+    path: '/api/handover/known',
+    body: { ids },
+    schema: knownAnswerSchema,
+    signal,
+  });
+  if (outcome.type !== 'ok') return toSetback(outcome);
+  return went(
+    outcome.value.known.map(({ id, revision, outcome: verdict, reason }) => ({
+      id,
+      revision,
+      verdict,
+      reason,
+    })),
+  );
+}
+
+/** Of the entries set aside from an old mirror only those stay that the new Book lacks (protocol 3.11). */
+export async function forgetKnownSetAside(parts: HandoverParts, signal: AbortSignal): Promise<void> {
+  const { set_aside } = parts.mirror.database;
+  const ids = await set_aside.toCollection().primaryKeys();
+  for (let at = 0; at < ids.length; at += AT_ONCE) {
+    const asked = await knownOf(parts, ids.slice(at, at + AT_ONCE), signal);
+    // Kept, and asked again after the next reset: nothing is lost by that.
+    if (asked.type !== 'went') return;
+    await set_aside.bulkDelete(asked.value.map((receipt) => receipt.id));
+  }
 }
 
 /** After a restored server: what it still has is acknowledged anew, what it lost waits again (protocol 3.11). */

@@ -51,7 +51,7 @@ async function restoreKeys(store: BookStore, { header }: Gathered): Promise<void
   if (header === null) return;
   const { database } = store;
   const { device, letter, device_name, lab, lab_name } = header;
-  await putKey(database, 'sentinel', { device });
+  await putKey(database, 'sentinel', { device, letter });
   await putKey(database, 'device', {
     id: device,
     letter,

@@ -52,6 +52,8 @@ export type BusMessage =
   /** The mirror moved on; `keys` of the documents that changed, null for all. */
   | { readonly type: 'mirror'; readonly keys: readonly string[] | null }
   | { readonly type: 'beat'; readonly page_life: string }
+  /** The tablet was enrolled anew. */
+  | { readonly type: 'device' }
   | { readonly type: 'locked' }
   | { readonly type: 'people' };
 

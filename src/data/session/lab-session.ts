@@ -53,6 +53,7 @@ export function openLabSession(parts: SessionParts): LabSession {
   const become = async (person: string | null) => {
     open = person;
     changed();
+    bus.post({ type: 'people' });
     await store.setKey('open_person', person);
   };
   const checkPin = async (person: string, pin: string) => {

@@ -7,6 +7,7 @@ import type { ReadDraft } from './entry-draft';
 
 export interface AppendOrder {
   readonly lab: string;
+  /** What the page believes; another tab may have enrolled the tablet anew, and then the store decides. */
   readonly device: string;
   readonly letter: string;
   readonly id: string;
@@ -25,15 +26,17 @@ export async function appendInside(database: BookDatabase, order: AppendOrder): 
   // A connection may be lost between commit and answer: the second try must find what the first one wrote.
   const written = await database.entries.where('id').equals(order.id).first();
   if (written !== undefined) return written;
-  const seq = (await lastSeq(database, order.device)) + 1;
+  const here = await getKey(database, 'sentinel');
+  const { device, letter } = here ?? order;
+  const seq = (await lastSeq(database, device)) + 1;
   const { kind, version } = order.draft;
   const subject = subjectOf(order);
-  const body = await numbered(database, order, subject);
+  const body = await numbered(database, { ...order, letter }, subject);
   const entry = sealEntry(
     {
       lab: order.lab,
       id: order.id,
-      device: order.device,
+      device,
       seq,
       kind,
       version,
@@ -47,7 +50,7 @@ export async function appendInside(database: BookDatabase, order: AppendOrder): 
   );
   const row = waitingRow(entry);
   await database.entries.add(row);
-  await putCount(database, `last_seq/${order.device}`, seq);
+  await putCount(database, `last_seq/${device}`, seq);
   await noteWallTime(database, order.stamp);
   return row;
 }

@@ -21,7 +21,7 @@ export interface ResumeRecord {
 /** The small keys of the strict store. */
 export interface KeyValues {
   /** Its absence beside a journal tells an emptied store (protocol 2.3). */
-  readonly sentinel: { readonly device: string };
+  readonly sentinel: Pick<DeviceRecord, 'letter'> & { readonly device: string };
   readonly device: DeviceRecord;
   readonly epoch: string;
   readonly firing_count: number;

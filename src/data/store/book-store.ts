@@ -49,7 +49,7 @@ export function openBookStore(lab: string, ports: StorePorts) {
       write(() =>
         database.transaction('rw', [database.keys], async () => {
           await putKey(database, 'device', device);
-          await putKey(database, 'sentinel', { device: device.id });
+          await putKey(database, 'sentinel', { device: device.id, letter: device.letter });
           if (epoch !== '') await putKey(database, 'epoch', epoch);
         }),
       ),
@@ -81,6 +81,7 @@ export function openBookStore(lab: string, ports: StorePorts) {
     nextWaiting: (device: string, limit: number): Promise<readonly EntryRow[]> =>
       ofState(database, 'waiting', device).limit(limit).toArray(),
     waiting: () => countWaiting(database),
+    waitingOf: (device: string): Promise<number> => ofState(database, 'waiting', device).count(),
     allWaiting: (): Promise<readonly EntryRow[]> => allWaiting(database).toArray(),
     /** Rows that the mirror does not hold yet: waiting, or taken at a revision beyond `revision`. */
     beyond: (revision: number) => rowsBeyond(database, revision),

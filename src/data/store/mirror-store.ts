@@ -18,6 +18,8 @@ export const EMPTY_CURSOR: MirrorCursor = {
   backup_revision: 0,
 };
 
+const OUTDATED = 0;
+
 export type PageOutcome =
   | { readonly type: 'applied'; readonly cursor: MirrorCursor; readonly changed: readonly Document[] }
   /** Another holder moved the mirror meanwhile: nothing was written (protocol 3.9). */
@@ -78,6 +80,11 @@ export function openMirrorStore(lab: string, idb: IdbPort) {
         [database.documents, database.entries, database.meta],
         async () => await applyPage(database, page),
       ),
+    /** From now on it counts as filling, until a fill has flipped. */
+    outdate: () =>
+      database.transaction('rw', [database.meta], async () => {
+        await writeCursor(database, { ...(await readCursor(database)), fold_version: OUTDATED });
+      }),
     noteBackup: (revision: number) =>
       database.transaction('rw', [database.meta], async () => {
         const cursor = await readCursor(database);
