@@ -1,6 +1,6 @@
 import process from 'node:process';
 import { fileURLToPath } from 'node:url';
-import { chromiumNeed, ensureDebianPackages, mariaDbNeed } from '../server/launch/debian.mjs';
+import { chromiumNeed, ensureDebianPackages, mariaDbNeed, ngspiceNeed } from '../server/launch/debian.mjs';
 import { checkNode, ensurePackages } from '../server/launch/packages.mjs';
 import { Refusal } from '../server/launch/refusal.mjs';
 import { createProcessKeeper } from './runner/processes.mjs';
@@ -52,6 +52,7 @@ async function prepare(chosen) {
   const needs = [
     ...(chosen.some((stage) => stage.needs?.includes('mariadb')) ? [mariaDbNeed] : []),
     ...(chosen.some((stage) => stage.needs?.includes('chromium')) ? [chromiumNeed] : []),
+    ...(chosen.some((stage) => stage.needs?.includes('ngspice')) ? [ngspiceNeed] : []),
   ];
   await ensureDebianPackages(needs, say);
   await ensurePackages(root, say);

@@ -14,6 +14,9 @@ export const mariaDbNeed = {
 
 export const chromiumNeed = { name: 'Chromium', programs: ['chromium'], packages: ['chromium'] };
 
+/** The circuit solver is held against it. */
+export const ngspiceNeed = { name: 'ngspice', programs: ['ngspice'], packages: ['ngspice'] };
+
 /**
  * Installs what is missing, or says which command does it.
  * @param {readonly {name: string, programs: readonly string[], packages: readonly string[]}[]} needs

@@ -8,7 +8,7 @@ import { measureCriticalPath } from './bundle-size.mjs';
  * @typedef {{passed: number, failed: number, skipped?: number, note?: string}} Result
  * @typedef {{root: string, keeper: ReturnType<typeof import('./processes.mjs').createProcessKeeper>}} Tools
  * @typedef {{
- *   name: string, says: string, needs?: readonly ('mariadb' | 'chromium')[], after?: readonly string[],
+ *   name: string, says: string, needs?: readonly ('mariadb' | 'chromium' | 'ngspice')[], after?: readonly string[],
  *   run: (tools: Tools) => Promise<Result>,
  * }} Stage
  */
@@ -41,6 +41,12 @@ export const stages = [
     ),
   },
   { name: 'unit', says: 'domain, client and server by themselves', run: vitest('unit', 'unit-dom') },
+  {
+    name: 'ngspice',
+    says: 'the circuit solver against another one, on circuits from a fixed seed',
+    needs: ['ngspice'],
+    run: command(['--import', 'tsx', 'tests/ngspice/run-ngspice.ts', '--seed', '20261', '--count', '40']),
+  },
   { name: 'api', says: 'routes and stores on a real MariaDB', needs: ['mariadb'], run: vitest('api') },
   {
     name: 'build',

@@ -2,12 +2,12 @@ import type { ChannelLaw, GapLaw } from './circuit-input';
 
 /** Resistance of the gap from time or from the action (the integral of its squared current). */
 export type GapResistance =
-  | { readonly by: 'time'; at(time_s: number): number }
+  | { readonly by: 'time'; readonly at: (time_s: number) => number }
   | {
       readonly by: 'action';
-      at(action_A2s: number): number;
+      readonly at: (action_A2s: number) => number;
       /** Change of resistance with action, from a resistance that `at` gave. */
-      slope(action_A2s: number, resistance_ohm: number): number;
+      readonly slope: (action_A2s: number, resistance_ohm: number) => number;
     };
 
 /**

@@ -28,6 +28,8 @@ export interface FeedNetwork {
   readonly zCross: Float64Array;
   readonly zChannel: Float64Array;
   readonly start: NetworkState;
+  /** False where the charging current is always zero. */
+  readonly hasCharging: boolean;
   /** Sets the matrices for a step length; false where they cannot be had. */
   setStep(h: number): boolean;
   /** Voltage over both branches at the stages with no current in them. */

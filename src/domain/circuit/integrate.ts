@@ -52,12 +52,12 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
   let rounds = 0;
   let h = firstStep(circuit.gap_H, circuit.gap);
 
-  while (window_s - stepper.state().time_s > SLIVER * window_s) {
+  while (window_s - stepper.state.time_s > SLIVER * window_s) {
     if (rounds % STEPS_BETWEEN_QUESTIONS === 0 && options.shouldStop?.() === true) return { type: 'stopped' };
     rounds += 1;
-    const good = control.goodStep(Math.min(h, window_s - stepper.state().time_s));
+    const good = control.goodStep(Math.min(h, window_s - stepper.state.time_s));
     if (good === undefined) return { type: 'too-long' };
-    const reach = stepper.state().fired_s === null ? firstReach(curves, CHANNEL_VOLTAGE, break_V) : undefined;
+    const reach = stepper.state.fired_s === null ? firstReach(curves, CHANNEL_VOLTAGE, break_V) : undefined;
     if (reach === undefined) {
       take(good.length);
       h = good.next;
@@ -73,7 +73,7 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
     type: 'done',
     run: {
       watch,
-      end: stepper.state(),
+      end: { ...stepper.state },
       left_J: stepper.stored_J(),
       firingSwing_V,
       steps: control.steps(),
@@ -86,7 +86,7 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
   }
 
   function take(length_s: number): void {
-    watch.add(stepper.state().time_s, length_s, curves);
+    watch.add(stepper.state.time_s, length_s, curves);
     stepper.accept();
   }
 
@@ -112,7 +112,7 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
 
   /** Goes on with the channel open to the top of the swing, or until it is clear of the break; then comes back. */
   function followOpen(firstTry: number): number {
-    const kept = stepper.state();
+    const kept = { ...stepper.state };
     let next = firstTry;
     let top = break_V;
     while (top < (1 + MARGIN) * break_V) {

@@ -28,6 +28,7 @@ export function inversionNetwork(circuit: InversionCircuit, { a, w, w1 }: Colloc
     zCross,
     zChannel,
     start: { first_V: charge_V, second_V: charge_V, charging_A: 0 },
+    hasCharging: true,
     setStep(h) {
       perFirst = h / first_F;
       perSecond = h / second_F;

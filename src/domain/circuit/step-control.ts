@@ -53,7 +53,7 @@ export function createStepControl(
     steps: () => steps,
     goodStep(wanted) {
       let length = wanted;
-      const { time_s } = stepper.state();
+      const { time_s } = stepper.state;
       while (steps < MOST_STEPS && time_s + length > time_s) {
         steps += 1;
         const coarse = stepper.attempt(length) ? coarseness() : Infinity;

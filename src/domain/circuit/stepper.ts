@@ -4,14 +4,16 @@ import { radauCollocation, STAGES } from './collocation';
 import { solveInPlace } from './dense-solve';
 import type { NetworkState } from './feed-network';
 import { inversionNetwork } from './inversion-network';
-import { PIECE } from './piece';
+import { PIECE, pieceAt } from './piece';
 import { transferNetwork } from './transfer-network';
 
 const S = STAGES;
 const RADAU = radauCollocation(S);
 
-/** Twice this squared is far below what a step may err: the iteration converges quadratically. */
-const ITERATION_TOLERANCE = 1e-6;
+/** The iteration converges quadratically: what is left after a move this small is its square. */
+const ITERATION_TOLERANCE = 1e-4;
+/** A curve may be followed this many step lengths beyond its end for a guess. */
+const FARTHEST_GUESS = 2;
 const MOST_ITERATIONS = 8;
 
 /** Offsets of the four curves in a step's buffer. */
@@ -34,8 +36,9 @@ export interface StepperState extends NetworkState {
 }
 
 export interface Stepper {
-  readonly state: () => StepperState;
-  readonly restore: (state: StepperState) => void;
+  /** The present state, which goes on with the run: copy what has to stay. */
+  readonly state: StepperState;
+  readonly restore: (kept: StepperState) => void;
   /** Solves a step from the present state without taking it; false where the iteration fails. */
   readonly attempt: (h: number) => boolean;
   /** Curves over the attempted step as powers of theta. */
@@ -63,7 +66,8 @@ export function createStepper(circuit: Circuit): Stepper {
   const gap_H = circuit.gap_H;
   const channel_H = circuit.channel.inductance_H;
   let channelLaw: ((time_s: number) => number) | null = null;
-  let state: StepperState = {
+  // One object for the whole run: a new one every step would be most of the garbage.
+  const state: { -readonly [Key in keyof StepperState]: StepperState[Key] } = {
     ...network.start,
     time_s: 0,
     gap_A: 0,
@@ -89,6 +93,11 @@ export function createStepper(circuit: Circuit): Stepper {
   };
   const curves = new Float64Array(CURVES);
   const action = new Float64Array(S);
+  const square = new Float64Array(S);
+  const voltage = new Float64Array(S);
+  // Gap current over the step before, to guess the next by.
+  const before = new Float64Array(PIECE);
+  let beforeStep = 0;
   let readyFor = 0;
   let step = 0;
 
@@ -117,25 +126,17 @@ export function createStepper(circuit: Circuit): Stepper {
   }
 
   function solveByAction(law: Extract<typeof gapLaw, { by: 'action' }>): boolean {
-    branches.gap_A.fill(state.gap_A);
-    let scale = 0;
+    guessGapCurrent();
+    let scale = Math.abs(state.gap_A);
     for (let iteration = 0; iteration < MOST_ITERATIONS; iteration += 1) {
-      for (let i = 0; i < S; i += 1) {
-        let sum = 0;
-        for (let j = 0; j < S; j += 1) sum += (a[i * S + j] ?? 0) * (branches.gap_A[j] ?? 0) ** 2;
-        // A coarse guess may run below what was there: the action never falls.
-        action[i] = state.action_A2s + Math.max(0, step * sum);
-        gap_ohm[i] = law.at(action[i] ?? 0);
-      }
+      resistByAction(law);
       const width = buildSystem();
       for (let i = 0; i < S; i += 1) {
-        const ig = branches.gap_A[i] ?? 0;
-        const pull = ig * law.slope(action[i] ?? 0, gap_ohm[i] ?? 0);
-        if (pull === 0) continue;
+        const pull = 2 * step * (branches.gap_A[i] ?? 0) * law.slope(action[i] ?? 0, gap_ohm[i] ?? 0);
         for (let j = 0; j < S; j += 1) {
           const entry = i * width + j;
           const guess = branches.gap_A[j] ?? 0;
-          const change = pull * step * (a[i * S + j] ?? 0) * 2 * guess;
+          const change = pull * (a[i * S + j] ?? 0) * guess;
           matrix[entry] = (matrix[entry] ?? 0) + change;
           right[i] = (right[i] ?? 0) + change * guess;
         }
@@ -143,13 +144,39 @@ export function createStepper(circuit: Circuit): Stepper {
       if (!solveInPlace(matrix, right, width)) return false;
       let moved = 0;
       for (let i = 0; i < S; i += 1) {
-        moved = Math.max(moved, Math.abs((right[i] ?? 0) - (branches.gap_A[i] ?? 0)));
-        scale = Math.max(scale, Math.abs(right[i] ?? 0));
+        const found = right[i] ?? 0;
+        moved = Math.max(moved, Math.abs(found - (branches.gap_A[i] ?? 0)));
+        scale = Math.max(scale, Math.abs(found));
       }
       takeSolution();
-      if (moved <= ITERATION_TOLERANCE * scale) return true;
+      if (moved <= ITERATION_TOLERANCE * scale) {
+        // The ledger wants the resistance of the currents found, not of the last guess.
+        resistByAction(law);
+        return true;
+      }
     }
     return false;
+  }
+
+  /** Goes on with the curve of the step before, where that is not too far. */
+  function guessGapCurrent(): void {
+    const stretch = step / beforeStep;
+    for (let i = 0; i < S; i += 1) {
+      branches.gap_A[i] =
+        stretch <= FARTHEST_GUESS ? pieceAt(before, 0, 1 + stretch * (nodes[i] ?? 0)) : state.gap_A;
+    }
+  }
+
+  function resistByAction(law: Extract<typeof gapLaw, { by: 'action' }>): void {
+    for (let j = 0; j < S; j += 1) square[j] = (branches.gap_A[j] ?? 0) ** 2;
+    for (let i = 0; i < S; i += 1) {
+      let sum = 0;
+      for (let j = 0; j < S; j += 1) sum += (a[i * S + j] ?? 0) * (square[j] ?? 0);
+      // A coarse guess may run below what was there: the action never falls.
+      const here = state.action_A2s + Math.max(0, step * sum);
+      action[i] = here;
+      gap_ohm[i] = law.at(here);
+    }
   }
 
   /** Stage equations of the branches; with the channel open only the gap's. */
@@ -188,38 +215,31 @@ export function createStepper(circuit: Circuit): Stepper {
 
   function drawCurves(): void {
     const { first_V, second_V, charging_A } = stages;
-    const { gap_A, channel_A } = branches;
-    const voltage = network.channelVoltage(state.first_V, state.second_V);
+    for (let i = 0; i < S; i += 1) voltage[i] = network.channelVoltage(first_V[i] ?? 0, second_V[i] ?? 0);
+    draw(CHANNEL_VOLTAGE, network.channelVoltage(state.first_V, state.second_V), voltage);
+    draw(GAP_CURRENT, state.gap_A, branches.gap_A);
+    if (channelLaw !== null) draw(CHANNEL_CURRENT, state.channel_A, branches.channel_A);
+    if (network.hasCharging) draw(CHARGING_CURRENT, state.charging_A, charging_A);
+  }
+
+  function draw(curve: number, start: number, values: Float64Array): void {
     for (let k = 0; k < PIECE; k += 1) {
       const row = k * PIECE;
-      const share = powers[row] ?? 0;
-      let v = share * voltage;
-      let ig = share * state.gap_A;
-      let il = share * state.channel_A;
-      let ic = share * state.charging_A;
-      for (let i = 0; i < S; i += 1) {
-        const at = powers[row + 1 + i] ?? 0;
-        v += at * network.channelVoltage(first_V[i] ?? 0, second_V[i] ?? 0);
-        ig += at * (gap_A[i] ?? 0);
-        il += at * (channel_A[i] ?? 0);
-        ic += at * (charging_A[i] ?? 0);
-      }
-      curves[CHANNEL_VOLTAGE + k] = v;
-      curves[GAP_CURRENT + k] = ig;
-      curves[CHANNEL_CURRENT + k] = il;
-      curves[CHARGING_CURRENT + k] = ic;
+      let sum = (powers[row] ?? 0) * start;
+      for (let i = 0; i < S; i += 1) sum += (powers[row + 1 + i] ?? 0) * (values[i] ?? 0);
+      curves[curve + k] = sum;
     }
   }
 
   function accept(): void {
-    let square = 0;
+    let action_A2 = 0;
     let gap_W = 0;
     let channel_W = 0;
     let loss_W = 0;
     for (let i = 0; i < S; i += 1) {
       const weight = b[i] ?? 0;
       const ig2 = (branches.gap_A[i] ?? 0) ** 2;
-      square += weight * ig2;
+      action_A2 += weight * ig2;
       gap_W += weight * (gap_ohm[i] ?? 0) * ig2;
       if (channelLaw !== null) {
         channel_W += weight * (channel_ohm[i] ?? 0) * (branches.channel_A[i] ?? 0) ** 2;
@@ -227,28 +247,28 @@ export function createStepper(circuit: Circuit): Stepper {
       loss_W += weight * network.loss_W(stages.second_V[i] ?? 0, stages.charging_A[i] ?? 0);
     }
     const last = S - 1;
-    state = {
-      time_s: state.time_s + step,
-      first_V: stages.first_V[last] ?? 0,
-      second_V: stages.second_V[last] ?? 0,
-      charging_A: stages.charging_A[last] ?? 0,
-      gap_A: branches.gap_A[last] ?? 0,
-      channel_A: branches.channel_A[last] ?? 0,
-      action_A2s: state.action_A2s + step * square,
-      gap_J: state.gap_J + step * gap_W,
-      channel_J: state.channel_J + step * channel_W,
-      loss_J: state.loss_J + step * loss_W,
-      fired_s: state.fired_s,
-    };
+    state.time_s += step;
+    state.first_V = stages.first_V[last] ?? 0;
+    state.second_V = stages.second_V[last] ?? 0;
+    state.charging_A = stages.charging_A[last] ?? 0;
+    state.gap_A = branches.gap_A[last] ?? 0;
+    state.channel_A = branches.channel_A[last] ?? 0;
+    state.action_A2s += step * action_A2;
+    state.gap_J += step * gap_W;
+    state.channel_J += step * channel_W;
+    state.loss_J += step * loss_W;
+    before.set(curves.subarray(GAP_CURRENT, GAP_CURRENT + PIECE));
+    beforeStep = step;
   }
 
   function restore(kept: StepperState): void {
-    state = kept;
+    Object.assign(state, kept);
+    beforeStep = 0;
     channelLaw = kept.fired_s === null ? null : channelResistance(circuit.channel, kept.fired_s);
   }
 
   return {
-    state: () => state,
+    state,
     restore,
     attempt,
     curves,

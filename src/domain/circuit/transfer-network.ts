@@ -22,6 +22,7 @@ export function transferNetwork(circuit: TransferCircuit, { a }: Collocation): F
     zCross,
     zChannel,
     start: { first_V: charge_V, second_V: 0, charging_A: 0 },
+    hasCharging: false,
     setStep(h) {
       perDump = h / dump_F;
       const perPeaking = h / peaking_F;
