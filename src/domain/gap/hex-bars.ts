@@ -7,9 +7,9 @@ import { gasLaw } from './gas-law';
 import { checkSetup, type GapInput } from './gap-input';
 import { solveHexField, type HexField } from './hex-field';
 import type { HexOrientation, HexShape } from './hex-outline';
-import { tracePeakLine } from './hex-path';
+import { tracePaths } from './hex-path';
 import { selfBreakAt, type GapAnswer } from './self-break';
-import { AIR_CRITERION } from './streamer-criterion';
+import { AIR_CRITERION, type StreamerCriterion } from './streamer-criterion';
 import { streamerVoltage_kV } from './streamer';
 
 const LOWEST_X_BAR_CM = 0.013;
@@ -41,8 +41,8 @@ export function hexFieldFactor(shape: HexShape): Result<Answer> {
 }
 
 /**
- * Breakdown of two hexagonal bars in air, kV: streamer integral along the line of force from the highest field. From
- * flat to flat that is a corner\u2019s line and not the middle axis, which reads up to 15 % too high (physics K2). The
+ * Breakdown of two hexagonal bars in air, kV: streamer integral along the line of force from the highest field, and from
+ * flat to flat along the middle axis too, where that is weaker. The axis alone reads up to 15 % too high (physics K2). The
  * band reaches down to the edge-to-edge value, the one to plan with.
  */
 export function hexBarBreakdown(bars: HexBars & GapPoint): Result<Answer> {
@@ -57,12 +57,12 @@ export function hexBarBreakdown(bars: HexBars & GapPoint): Result<Answer> {
       words: `Pressure times gap must lie between ${String(LOWEST_X_BAR_CM)} and ${String(HIGHEST_X_BAR_CM)}\u2009bar cm for this model.`,
     });
   }
-  const own = profileOf(shape.value);
-  const edge = profileOf({ ...shape.value, orientation: 'edge' });
+  const own = weakestPath(shape.value, AIR_CRITERION, x.value);
+  const edge = weakestPath({ ...shape.value, orientation: 'edge' }, AIR_CRITERION, x.value);
   if (!own.ok) return own;
   if (!edge.ok) return edge;
-  const value = streamerVoltage_kV(AIR_CRITERION, x.value, own.value);
-  const least = Math.min(value, streamerVoltage_kV(AIR_CRITERION, x.value, edge.value));
+  const value = own.value.voltage_kV;
+  const least = Math.min(value, edge.value.voltage_kV);
   return ok(
     answer({
       value,
@@ -70,17 +70,21 @@ export function hexBarBreakdown(bars: HexBars & GapPoint): Result<Answer> {
       relative: { below: 1 - (1 - BAND) * (least / value), above: BAND },
       model: `Streamer integral, hexagonal bars ${bars.orientation} to ${bars.orientation}`,
       valid: 'air, 0.013 to 50 bar cm, long bars with radiused ends; no measurement of such bars was found',
-      warnings: [
-        {
-          type: 'bars-by-computation',
-          words: 'Hexagonal bars rest on computed fields alone. Burrs and bar ends break lower.',
-        },
-      ],
+      warnings: [BY_COMPUTATION],
     }),
   );
 }
 
 const BAND = 0.05;
+const NO_FIELD = {
+  type: 'no-field',
+  field: 'bars',
+  words: 'The field between these bars could not be computed.',
+} as const;
+const BY_COMPUTATION = {
+  type: 'bars-by-computation',
+  words: 'Hexagonal bars rest on computed fields alone. Burrs and bar ends break lower.',
+} as const;
 
 /**
  * Self-break of two hexagonal bars with both sides, as `selfBreak` gives it for other electrodes; physics K2 and M.
@@ -99,8 +103,15 @@ export function hexBarSelfBreak(
   const narrow = shapeOf({ ...bars, orientation: 'edge' }, input.gap_mm - input.u_gap_mm);
   if (!shape.ok) return shape;
   if (!narrow.ok) return narrow;
-  const field = profileOf(shape.value);
-  const narrowField = profileOf(narrow.value);
+  const point = {
+    pressure_bar_abs: input.pressure.bar_abs,
+    gap_cm: input.gap_mm / 10,
+    temperature_C: input.temperature_C,
+  };
+  const x = checkedSimilarity(point);
+  if (!x.ok) return x;
+  const field = weakestPath(shape.value, law.value.criterion, x.value);
+  const narrowField = weakestPath(narrow.value, law.value.criterion, x.value);
   if (!field.ok) return field;
   if (!narrowField.ok) return narrowField;
   const sides = selfBreakAt(
@@ -109,8 +120,8 @@ export function hexBarSelfBreak(
       setup: { ...setup, electrodes: { shape: 'cylinder', radius_mm: bars.cornerRadius_mm } },
       law: law.value,
       radius_mm: undefined,
-      field: field.value,
-      narrowFields: [narrowField.value],
+      field: field.value.profile,
+      narrowFields: [narrowField.value.profile],
     },
     input.pressure.bar_abs,
   );
@@ -118,13 +129,7 @@ export function hexBarSelfBreak(
   return ok({
     ...sides.value,
     model: `Law: streamer integral, hexagonal bars ${bars.orientation} to ${bars.orientation}`,
-    warnings: [
-      ...sides.value.warnings,
-      {
-        type: 'bars-by-computation',
-        words: 'Hexagonal bars rest on computed fields alone. Burrs and bar ends break lower.',
-      },
-    ],
+    warnings: [...sides.value.warnings, BY_COMPUTATION],
   });
 }
 
@@ -197,7 +202,20 @@ function isOrientation(value: unknown): value is HexOrientation {
   return value === 'flat' || value === 'edge';
 }
 
-function profileOf(shape: HexShape): Result<AxialProfile> {
+interface WeakestPath {
+  readonly profile: AxialProfile;
+  readonly voltage_kV: number;
+}
+
+function weakestPath(shape: HexShape, criterion: StreamerCriterion, x_bar_cm: number): Result<WeakestPath> {
   const field = checkedField(shape);
-  return field.ok ? ok(tracePeakLine(field.value, shape)) : field;
+  if (!field.ok) return field;
+  const paths = tracePaths(field.value, shape).map((profile) => ({
+    // The highest field counts for its allowance wherever the path starts.
+    profile: { ...profile, fieldFactor: field.value.fieldFactor },
+    voltage_kV: streamerVoltage_kV(criterion, x_bar_cm, profile),
+  }));
+  const [first, ...others] = paths;
+  if (first === undefined) return refused(NO_FIELD);
+  return ok(others.reduce((weakest, path) => (path.voltage_kV < weakest.voltage_kV ? path : weakest), first));
 }

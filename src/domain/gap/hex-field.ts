@@ -6,13 +6,21 @@ interface Point {
   readonly y: number;
 }
 
+/** A place on the surface, the way out of the bar there, and the field over the mean field. */
+export interface SurfacePoint {
+  readonly place: Point;
+  readonly outward: Point;
+  readonly field: number;
+}
+
 /** The solved field of two hexagonal bars at plus and minus half the voltage, lengths over the width across flats. */
 export interface HexField {
   /** Highest field over the mean field, mean of one panel. */
   readonly fieldFactor: number;
-  /** Where on the surface the field is highest, and the way out of the bar there. */
-  readonly peak: Point;
-  readonly outward: Point;
+  /** Where on the surface the field is highest. */
+  readonly peak: SurfacePoint;
+  /** On the axis, at the front of the bar. */
+  readonly front: SurfacePoint;
   /** Field over mean field, as a vector, at a place between the bars. */
   readonly fieldAt: (place: Point) => Point;
 }
@@ -37,12 +45,18 @@ export function solvePanels(panels: readonly Panel[], gap: number): HexField | u
   panels.forEach((_, index) => {
     if ((charges[index] ?? 0) > (charges[peak] ?? 0)) peak = index;
   });
-  const loudest = panels[peak];
-  if (loudest === undefined) return undefined;
+  const surface = (index: number): SurfacePoint | undefined => {
+    const panel = panels[index];
+    if (panel === undefined) return undefined;
+    return { place: middleOf(panel), outward: outwardOf(panel), field: gap * (charges[index] ?? Number.NaN) };
+  };
+  const loudest = surface(peak);
+  const front = surface(0);
+  if (loudest === undefined || front === undefined) return undefined;
   return {
-    fieldFactor: gap * (charges[peak] ?? Number.NaN),
-    peak: middleOf(loudest),
-    outward: outwardOf(loudest),
+    fieldFactor: loudest.field,
+    peak: loudest,
+    front,
     fieldAt: (place) => {
       let x = 0;
       let y = 0;

@@ -1,5 +1,5 @@
 import type { AxialProfile } from './field-geometry';
-import type { HexField } from './hex-field';
+import type { HexField, SurfacePoint } from './hex-field';
 import type { HexShape } from './hex-outline';
 
 const LEAST_STEP = 0.02;
@@ -7,19 +7,26 @@ const STEP_SHARE = 0.06;
 const MOST_STEPS = 2000;
 
 /**
- * Field along the line of force that starts where the field is highest, from bar to bar, for the streamer integral.
- * Weights are lengths as shares of the gap: along a bowed line they add up to more than 1. Half the line is traced and the other half is its mirror.
+ * Fields along the lines of force that may break first, from bar to bar, for the streamer integral: the line of the
+ * highest field, and from flat to flat the middle axis too, which is shorter. Weights are lengths as shares of the gap:
+ * along a bowed line they add up to more than 1. Half a line is traced and the other half is its mirror.
  */
-export function tracePeakLine(
+export function tracePaths(field: HexField, shape: HexShape): readonly AxialProfile[] {
+  const peak = traceFrom(field.peak, field, shape);
+  return shape.orientation === 'edge' ? [peak] : [peak, traceFrom(field.front, field, shape)];
+}
+
+function traceFrom(
+  start: SurfacePoint,
   field: HexField,
   { cornerOverFlats: finest, gapOverFlats: gap }: HexShape,
 ): AxialProfile {
   const first = LEAST_STEP * finest;
   // On the surface itself a panel's field has no side; the first step leaves it along the normal.
-  let x = field.peak.x + first * field.outward.x;
-  let y = field.peak.y + first * field.outward.y;
+  let x = start.place.x + first * start.outward.x;
+  let y = start.place.y + first * start.outward.y;
   let travelled = first;
-  const fields = [field.fieldFactor];
+  const fields = [start.field];
   const weights = [(2 * first) / gap];
   for (let step = 0; step < MOST_STEPS && x < 0; step += 1) {
     const size = STEP_SHARE * travelled + first;
