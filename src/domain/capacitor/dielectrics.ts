@@ -134,10 +134,8 @@ export function minimumStrength(material: string, thickness_mm: number): Result<
     max: 100,
   });
   if (!thickness.ok) return thickness;
-  const { strength, source } = DIELECTRICS[found.value];
-  if (found.value === 'PET' && thickness_mm >= PET_FROM_MM && thickness_mm <= PET_TO_MM) {
-    return petMinimumStrength(thickness_mm * 1000);
-  }
+  const { source } = DIELECTRICS[found.value];
+  const strength = found.value === 'PET' ? petNear(thickness_mm) : DIELECTRICS[found.value].strength;
   const ratio = Math.max(1, thickness_mm / strength.thickness_mm);
   const far = thickness_mm > 3 * strength.thickness_mm || thickness_mm < strength.thickness_mm / 3;
   const warnings: readonly Warning[] = far
@@ -160,6 +158,13 @@ export function minimumStrength(material: string, thickness_mm: number): Result<
 
 const PET_FROM_MM = 0.075;
 const PET_TO_MM = 0.35;
+
+/** The data sheet's fit at the nearest thickness that it covers. */
+function petNear(thickness_mm: number): Dielectric['strength'] {
+  const nearest_mm = Math.min(PET_TO_MM, Math.max(PET_FROM_MM, thickness_mm));
+  const fit = petMinimumStrength(Number((nearest_mm * 1000).toPrecision(12)));
+  return fit.ok ? { kV_mm: fit.value.value, thickness_mm: nearest_mm } : DIELECTRICS.PET.strength;
+}
 
 /**
  * Voltage that may come back on a shorted capacitor, V, at most: absorbed charge, 1 to 5 % in PET and acetate and under
