@@ -18,7 +18,8 @@ export class AreaBoundary extends Component<Props, State> {
   }
 
   override componentDidCatch(error: unknown, info: ErrorInfo): void {
-    console.error(`${this.props.area} failed`, error, info.componentStack);
+    // Rethrown outside React, so that it reaches the console with its stack and nothing is swallowed.
+    reportError(new Error(`${this.props.area} failed: ${info.componentStack ?? ''}`, { cause: error }));
   }
 
   override render(): ReactNode {

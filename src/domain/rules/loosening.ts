@@ -75,7 +75,7 @@ function collect(
   leaves: Map<string, Leaf>,
 ): void {
   if (value === null || typeof value !== 'object') {
-    leaves.set(prefix, value as Leaf);
+    leaves.set(prefix, value);
     return;
   }
   for (const [key, inner] of Object.entries(value) as [string, Leaf | object][]) {

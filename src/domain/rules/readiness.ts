@@ -57,19 +57,21 @@ function missingOfRig({ rig, filling }: ReadinessInput): Missing[] {
       missing('newer-app', 'An entry about this rig needs a newer version of the app.', 'a newer app'),
     );
   for (const down of unliftedStandDowns(rig)) {
-    found.push(missing('stood-down', `The rig is stood down: ${down.why}`, 'reviewer', down.at));
+    found.push(since(missing('stood-down', `The rig is stood down: ${down.why}`, 'reviewer'), down.at));
   }
   for (const tag of rig.hands) {
-    found.push(missing('hands-in', 'A hands-in tag is on the rig.', 'whoever has hands in', tag.at));
+    found.push(since(missing('hands-in', 'A hands-in tag is on the rig.', 'whoever has hands in'), tag.at));
   }
   return found;
 }
 
 function missingOfPerson({ rig, person, now_ms }: ReadinessInput): Missing[] {
   if (person === undefined || !isRole(person.role, 'operator', 'reviewer', 'lead')) {
-    return [missing('role', 'Your role does not include firing.', 'lead', person?.role_set.at ?? null)];
+    return [
+      since(missing('role', 'Your role does not include firing.', 'lead'), person?.role_set.at ?? null),
+    ];
   }
-  const own = person.authorisations.filter((one) => one.rig === rig.id && one.task === 'fire');
+  const own = person.authorisations.filter((one) => one.rig === rig.id);
   const standing = own.find((one) => one.ended === null && one.until_ms > now_ms);
   if (standing !== undefined) return [];
   const last = own.at(-1);
@@ -77,10 +79,8 @@ function missingOfPerson({ rig, person, now_ms }: ReadinessInput): Missing[] {
     return [missing('not-authorised', 'You are not authorised to fire this rig.', 'reviewer')];
   if (last.ended !== null)
     return [
-      missing(
-        'authorisation-ended',
-        'Your authorisation to fire this rig was ended.',
-        'reviewer',
+      since(
+        missing('authorisation-ended', 'Your authorisation to fire this rig was ended.', 'reviewer'),
         last.ended.at,
       ),
     ];
@@ -99,19 +99,25 @@ function missingPermit({ rig, now_ms }: ReadinessInput): Missing[] {
     return [missing('no-permit', words, 'reviewer')];
   }
   if (last.withdrawn !== null)
-    return [missing('permit-withdrawn', 'The firing permit was withdrawn.', 'reviewer', last.withdrawn.at)];
+    return [
+      since(missing('permit-withdrawn', 'The firing permit was withdrawn.', 'reviewer'), last.withdrawn.at),
+    ];
   return [missing('permit-lapsed', 'The firing permit has lapsed.', 'reviewer')];
 }
 
 function missingCheck({ rig, device, stamp }: ReadinessInput): Missing[] {
   const lapse = checkLapse(rig, device, stamp);
-  return lapse === null ? [] : [missing(lapse.code, lapse.words, 'you', lapse.since)];
+  return lapse === null ? [] : [since(missing(lapse.code, lapse.words, 'you'), lapse.since)];
 }
 
 function permitsOfHead(rig: RigDoc): readonly Permit[] {
   return rig.permits.filter((permit) => rig.heads.includes(permit.rig_revision));
 }
 
-function missing(code: string, words: string, mend: Mender, since: number | null = null): Missing {
-  return { code, words, mend, since };
+function missing(code: string, words: string, mend: Mender): Missing {
+  return { code, words, mend, since: null };
+}
+
+function since(one: Missing, revision: number | null): Missing {
+  return { ...one, since: revision };
 }

@@ -1,4 +1,4 @@
-import { useId, useState, type FormEvent } from 'react';
+import { useId, useState, type SyntheticEvent } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { Screen } from '../../components/frame';
 import { SaysBlock } from '../../components/says-block';
@@ -46,7 +46,7 @@ function SignInForm({ onSignedIn }: { readonly onSignedIn: (pinNeeded: boolean) 
   const [says, setSays] = useState<string | null>(null);
   const [busy, setBusy] = useState(false);
   const id = useId();
-  const submit = async (event: FormEvent) => {
+  const submit = async (event: SyntheticEvent) => {
     event.preventDefault();
     if (email.trim() === '' || password === '') {
       setSays('Enter your e-mail address and your password.');

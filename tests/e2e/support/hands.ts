@@ -55,9 +55,16 @@ export async function takeRig(page: Page, name: string): Promise<void> {
   await page.getByRole('banner').getByText(name, { exact: true }).waitFor();
 }
 
-/** Types into the open keypad by the hardware keyboard, and enters. */
+/** Types into the open keypad by its own keys, and enters. Letters have no key there. */
 export async function keyIn(page: Page, text: string): Promise<void> {
-  await press(page.getByRole('button', { name: 'Clear', exact: true }));
-  for (const key of text) await page.keyboard.press(key);
-  await page.keyboard.press('Enter');
+  const keypad = page.locator('.keypad');
+  const key = (name: string | RegExp) =>
+    keypad.getByRole('button', typeof name === 'string' ? { name, exact: true } : { name });
+  await press(key('Clear'));
+  for (const figure of text) {
+    if (figure === '-') await press(key(/^minus$/i));
+    else if (figure === '.') await press(key(/^point$/i));
+    else if (/\d/.test(figure)) await press(key(figure));
+  }
+  await press(keypad.locator('.key.enter'));
 }

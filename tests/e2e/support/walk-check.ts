@@ -13,6 +13,8 @@ const WAIT_PATIENCE_MS = 90_000;
 
 /** Walks every step of the open check as a person would, and closes it. */
 export async function walkCheck(page: Page, options: WalkOptions): Promise<void> {
+  await page.waitForURL(/\/checks\/[0-9a-f-]{36}$/);
+  await page.getByText(/^1 of \d+$/).waitFor();
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const title = await page.getByRole('main').getByRole('heading', { level: 1 }).first().innerText();
     if (title.startsWith('Every step is done')) {

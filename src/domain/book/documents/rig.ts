@@ -75,24 +75,26 @@ export function* updateRig(id: string, change: (rig: RigDoc) => RigDoc): Effect 
 
 export function standDown(rig: RigDoc, trace: Trace, why: string): RigDoc {
   const standing = { ...rig, stand_downs: [...rig.stand_downs, { ...trace, why, lifted: null }] };
-  return voidCheck(standing, trace, 'stood-down', 'The rig was stood down after the check.');
+  return voidCheck(standing, trace, { code: 'stood-down', words: 'The rig was stood down after the check.' });
 }
 
-export function voidCheck(rig: RigDoc, by: Trace, code: string, words: string): RigDoc {
+export function voidCheck(
+  rig: RigDoc,
+  by: Trace,
+  why: { readonly code: string; readonly words: string },
+): RigDoc {
   const { ready_check } = rig;
   if (ready_check === null || ready_check.voided !== null) return rig;
-  return { ...rig, ready_check: { ...ready_check, voided: { code, words, at: by.at } } };
+  return { ...rig, ready_check: { ...ready_check, voided: { ...why, at: by.at } } };
 }
 
 export function declare(rig: RigDoc, trace: Trace, state: Declaration['state']): RigDoc {
   const declared = { ...rig, declared: { ...trace, state }, holder: trace.device };
   if (state === 'short-off') return declared;
-  return voidCheck(
-    { ...declared, last_short: trace },
-    trace,
-    'made-safe',
-    'The rig was made safe after the check.',
-  );
+  return voidCheck({ ...declared, last_short: trace }, trace, {
+    code: 'made-safe',
+    words: 'The rig was made safe after the check.',
+  });
 }
 
 type RigEntry = EntryOf<
@@ -163,21 +165,17 @@ function changed(rig: RigDoc, entry: Exclude<RigEntry, EntryOf<'rig.created'>>, 
     case 'rig.returned':
       return lift(rig, entry.body.lifts, trace);
     case 'hands.in':
-      return voidCheck(
-        { ...rig, hands: [...rig.hands, { ...trace, where: entry.body.where }] },
-        trace,
-        'hands-in',
-        'Hands went in after the check.',
-      );
+      return voidCheck({ ...rig, hands: [...rig.hands, { ...trace, where: entry.body.where }] }, trace, {
+        code: 'hands-in',
+        words: 'Hands went in after the check.',
+      });
     case 'hands.out':
       return { ...rig, hands: rig.hands.filter((tag) => tag.entry !== entry.body.tag) };
     case 'gas.changed':
-      return voidCheck(
-        { ...rig, gas_changed: trace },
-        trace,
-        'gas-changed',
-        'The gas was changed after the check.',
-      );
+      return voidCheck({ ...rig, gas_changed: trace }, trace, {
+        code: 'gas-changed',
+        words: 'The gas was changed after the check.',
+      });
     case 'permit.asked':
       return { ...rig, permits_asked: [...rig.permits_asked, { ...trace, ...entry.body, answered: false }] };
     case 'permit.granted':
@@ -204,7 +202,7 @@ function revise(rig: RigDoc, body: BodyOf<'rig.revised'>, trace: Trace): RigDoc 
     revisions: [...rig.revisions, { ...trace, number, spec, based_on, why }],
     heads: [...rig.heads.filter((head) => head !== based_on), trace.entry],
   };
-  return voidCheck(revised, trace, 'revised', 'The rig was revised after the check.');
+  return voidCheck(revised, trace, { code: 'revised', words: 'The rig was revised after the check.' });
 }
 
 function grant(rig: RigDoc, body: BodyOf<'permit.granted'>, trace: Trace): RigDoc {
