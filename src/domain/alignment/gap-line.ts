@@ -3,7 +3,7 @@ import { uniformVoltage_kV, AIR_CRITERION } from '../gap/streamer-criterion';
 import type { Answer } from '../units/answer';
 import { checkNumber, type NumberRule } from '../units/check-number';
 import { computed } from '../units/computed';
-import { firstRefusal, refused, type Refusal, type Result } from '../units/result';
+import { firstRefusal, mapResult, refused, type Refusal, type Result } from '../units/result';
 
 /** A gap between two straight bars, measured at two places along them. */
 export interface MeasuredGap {
@@ -62,44 +62,52 @@ export function lineAt(gap: MeasuredGap, place_mm: number): number {
 export function gapAlong(gap: MeasuredGap, place_mm: number, feeler_um: number): Result<Answer> {
   const bad = gapRefusal(gap);
   if (bad !== undefined) return refused(bad);
-  return computed([checkNumber(place_mm, PLACE_RULE), checkNumber(feeler_um, FEELER_RULE)], () => {
+  let error_mm = 0;
+  const along = computed([checkNumber(place_mm, PLACE_RULE), checkNumber(feeler_um, FEELER_RULE)], () => {
     const t = (place_mm - gap.leftPlace_mm) / (gap.rightPlace_mm - gap.leftPlace_mm);
     const value = lineAt(gap, place_mm);
-    const error_mm = (feeler_um / 1000) * Math.hypot(1 - t, t);
+    error_mm = (feeler_um / 1000) * Math.hypot(1 - t, t);
     return {
       value,
       unit: 'mm',
       model: 'Straight line through two measurements',
       valid: 'straight bars; a bent one shows only with a third measurement',
-      relative: value === 0 ? 0 : error_mm / Math.abs(value),
+      relative: 0,
       warnings:
         value - error_mm <= 0
           ? [{ type: 'bars-meet', words: 'By this line the bars may touch at this place.' }]
           : [],
     };
   });
+  return mapResult(along, (line) => withError(line, error_mm));
 }
 
 /** Angle between the bars, mrad; above 0 where the right end stands wider. Two feeler errors decide its band. */
 export function wedge(gap: MeasuredGap, feeler_um = 0): Result<Answer> {
   const bad = gapRefusal(gap);
   if (bad !== undefined) return refused(bad);
-  return computed([checkNumber(feeler_um, FEELER_RULE)], () => {
-    const span_mm = gap.rightPlace_mm - gap.leftPlace_mm;
+  const span_mm = gap.rightPlace_mm - gap.leftPlace_mm;
+  const error_mrad = (Math.SQRT2 * feeler_um) / Math.abs(span_mm);
+  const angle = computed([checkNumber(feeler_um, FEELER_RULE)], () => {
     const value = 1000 * Math.atan((gap.right_mm - gap.left_mm) / span_mm);
-    const error_mrad = (Math.SQRT2 * feeler_um) / Math.abs(span_mm);
     return {
       value,
       unit: 'mrad',
       model: 'Angle from two gaps',
       valid: 'straight bars',
-      relative: value === 0 ? 0 : error_mrad / Math.abs(value),
+      relative: 0,
       warnings:
         error_mrad > 0 && Math.abs(value) < 2 * error_mrad
           ? [{ type: 'within-feeler', words: 'The wedge is within what the feeler can tell.' }]
           : [],
     };
   });
+  return mapResult(angle, (one) => withError(one, error_mrad));
+}
+
+/** A band of a fixed width, which a share of the value cannot give where the value is 0. */
+function withError(one: Answer, error: number): Answer {
+  return { ...one, band: { low: one.value - error, high: one.value + error } };
 }
 
 /**

@@ -193,7 +193,7 @@ export function reboundVoltage(material: string, voltage_V: number): Result<Answ
 }
 
 function findMaterial(name: string): Result<Material> {
-  const plain = String(name).trim().toLowerCase();
+  const plain = name.trim().toLowerCase();
   const alias = ALIASES[plain] ?? plain;
   const found = MATERIALS.find((material) => material.toLowerCase() === alias.toLowerCase());
   return found === undefined

@@ -43,7 +43,7 @@ const DEEPEST = 20;
  * own figure goes before this one.
  */
 export function molarMass(formula: string): Result<Answer> {
-  const mass = massOf(String(formula));
+  const mass = massOf(formula);
   return mass.ok
     ? computed([], () => ({
         value: mass.value,

@@ -12,7 +12,7 @@ export function purgeResidual(volumes: number): Result<Answer> {
       unit: '1',
       model: 'Perfectly mixed purge',
       valid: 'inlet and outlet at opposite ends; dead corners keep more',
-      relative: { below: 0.5, above: 1 },
+      relative: { below: 0.5, above: Math.min(1, Math.exp(volumes) - 1) },
     }),
   );
 }

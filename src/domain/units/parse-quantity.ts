@@ -24,9 +24,7 @@ interface Wanted {
  * are refused like bar.
  */
 export function parseWithUnit(text: string, { dimension, field, name }: Wanted): Result<ParsedQuantity> {
-  const plain = String(text)
-    .replace(/[\u00a0\u2009\u202f]/g, ' ')
-    .trim();
+  const plain = text.replace(/[\u00a0\u2009\u202f]/g, ' ').trim();
   const split = /^([+\-\u2212\u2013]?\s?[\d.,]+(?:[eE][+\-\u2212]?\d+)?)\s*(.*)$/.exec(plain);
   if (split === null) return refused({ type: 'not-a-number', field, words: `${name}: begin with a number.` });
   const number = parseNumber((split[1] ?? '').replace(/\u2212/g, '-').replace(/\s/g, ''), field, name);
