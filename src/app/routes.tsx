@@ -63,8 +63,8 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.benchOf, screen: BenchRoute, area: 'Bench' },
   { path: patterns.face, screen: BenchFaceRoute, area: 'Bench' },
   { path: patterns.gapLookup, screen: GapRoute, area: 'Lookups' },
-  { path: patterns.checks, screen: ChecksRoute, area: 'Checks' },
-  // Making safe may be walked before any PIN; the screen itself refuses the others.
+  // Making safe may be walked before any PIN; the screens themselves refuse the others.
+  { path: patterns.checks, screen: ChecksRoute, area: 'Checks', open: true },
   { path: patterns.check, screen: CheckRoute, area: 'Checks', open: true },
   { path: patterns.openFiring, screen: OpenFiringRoute, area: 'Firings' },
   { path: patterns.firings, screen: FiringsRoute, area: 'Firings' },

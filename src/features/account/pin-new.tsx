@@ -7,6 +7,12 @@ import { PinPad } from './pin-pad';
 export function PinNew({ name, onDone }: { readonly name: string; readonly onDone: () => void }) {
   const { setPin } = useSessionActions();
   const [first, setFirst] = useState<string | null>(null);
+  const [refusal, setRefusal] = useState<string | null>(null);
+  const startAgain = (words: string): string => {
+    setFirst(null);
+    setRefusal(words);
+    return words;
+  };
   const take = async (pin: string): Promise<string | null> => {
     if (first === null) {
       if (pin.length < 6) return 'A PIN has at least 6 figures.';
@@ -14,16 +20,14 @@ export function PinNew({ name, onDone }: { readonly name: string; readonly onDon
       return null;
     }
     if (pin !== first) {
-      setFirst(null);
-      return 'The two were not the same. Choose again.';
+      return startAgain('The two were not the same. Choose again.');
     }
     const outcome = await setPin(pin);
     if (outcome.type === 'set') {
       onDone();
       return null;
     }
-    setFirst(null);
-    return outcome.words;
+    return startAgain(outcome.words);
   };
   return (
     <div className="account">
@@ -35,6 +39,7 @@ export function PinNew({ name, onDone }: { readonly name: string; readonly onDon
         key={first === null ? 'first' : 'again'}
         label={first === null ? 'New PIN, at least 6 figures' : 'The same PIN again'}
         enterLabel="Next"
+        saysFirst={first === null ? refusal : null}
         onPin={take}
       />
     </div>

@@ -5,15 +5,17 @@ interface Props {
   /** Gives back what to say when it was not right, null when it was. */
   readonly onPin: (pin: string) => Promise<string | null>;
   readonly enterLabel?: string;
+  /** Stands there before the first figure, such as why the last PIN was refused. */
+  readonly saysFirst?: string | null;
 }
 
 const MAX_DIGITS = 12;
 const FIGURES = ['1', '2', '3', '4', '5', '6', '7', '8', '9'] as const;
 
 /** Figures are never shown, only how many there are. */
-export function PinPad({ label, onPin, enterLabel = 'Open' }: Props) {
+export function PinPad({ label, onPin, enterLabel = 'Open', saysFirst = null }: Props) {
   const [pin, setPin] = useState('');
-  const [says, setSays] = useState<string | null>(null);
+  const [says, setSays] = useState(saysFirst);
   const [busy, setBusy] = useState(false);
   const root = useRef<HTMLDivElement>(null);
   useEffect(() => root.current?.focus(), []);
