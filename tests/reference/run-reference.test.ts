@@ -110,6 +110,18 @@ describe('readChecks', () => {
     expect(!result.ok && result.refusal.words).toContain(place);
   });
 
+  it('puts circuits in the place of their names', () => {
+    const named = { ...check({}), inputs: { circuit: 'T' } };
+    const given = JSON.stringify({ circuits: { T: { V0: 1 } }, checks: [named] });
+    expect(readChecks(given)).toMatchObject({ ok: true, value: [{ inputs: { circuit: { V0: 1 } } }] });
+    const first = { ...check({}), inputs: { circuit: 'T', top: 'transfer', V0: 2 } };
+    expect(readChecks(JSON.stringify({ checks: [first, named] }))).toMatchObject({
+      value: [{ inputs: { circuit: { V0: 2 } } }, { inputs: { circuit: { V0: 2, top: 'transfer' } } }],
+    });
+    const missing = evaluate(check({ fn: 'circuit.riseTime', inputs: { circuit: 'gone' } }));
+    expect(missing).toEqual({ type: 'failed', why: 'input circuit "gone" is not in the file' });
+  });
+
   it('carries on past fields that it does not know', () => {
     const text = JSON.stringify({ circuits: {}, checks: [{ ...check({}), kind: 'standard', note: 'x' }] });
     expect(readChecks(text)).toMatchObject({ ok: true, value: [{ id: 'one' }] });
