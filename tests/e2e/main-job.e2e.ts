@@ -216,7 +216,7 @@ describe('6 · handing over', () => {
       .first()
       .click();
     await page
-      .getByRole('heading', { level: 1, name: /Kettle/ })
+      .getByRole('heading', { name: /Kettle, firing of/ })
       .first()
       .waitFor();
     const text = await page.getByRole('main').innerText();
