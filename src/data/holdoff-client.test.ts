@@ -1,6 +1,7 @@
 import { describe, expect, it, vi } from 'vitest';
 import { exchange, labOf, newWorld, openTab, PIN, signIn } from './fakes/tablet';
 import { modelReading } from './fakes/model-lab';
+import { settle } from './fakes/virtual-time';
 
 vi.setConfig({ testTimeout: 30_000 });
 
@@ -83,5 +84,55 @@ describe('a tablet from its first sign-in to a handed-over firing', () => {
     expect(fourth.client.session()).toMatchObject({ state: 'open', person: { id: model.ada } });
     await fourth.client.lock();
     expect(fourth.client.session().state).toBe('open');
+  });
+});
+
+describe('one tablet in two tabs', () => {
+  it('writes under the new tablet in both once one of them was enrolled anew', async () => {
+    const { lab: model, newBrowser } = newWorld();
+    const browser = newBrowser();
+    const one = labOf(
+      await openTab(browser).then(async ({ client }) => (await signIn(client, 'Ada'), client)),
+    );
+    const second = await openTab(browser);
+    const two = labOf(second.client);
+    await one.store.setDevice({ ...one.device(), forked: true }, model.server.book.epoch);
+    await signIn(second.client, 'Ada');
+    const fresh = two.device().id;
+    const draft = { kind: 'rig.stood-down', subject: model.rig, body: { why: 'x' }, author: null } as const;
+    for (const lab of [one, two]) await lab.append(draft);
+    const rows = await two.store.allOwn();
+    expect(rows.map((row) => [row.device, row.seq])).toEqual([
+      [fresh, 1],
+      [fresh, 2],
+    ]);
+    await settle();
+    expect(one.device().id).toBe(fresh);
+    expect(await exchange(one)).toBe('quiet');
+  });
+});
+
+describe('switching person', () => {
+  it('takes a PIN and no network, and sends each one’s entries as their own', async () => {
+    const { lab: model, newBrowser } = newWorld();
+    const { client } = await openTab(newBrowser());
+    const lab = await signIn(client, 'Ada');
+    await signIn(client, 'Milo');
+    await exchange(lab);
+    model.server.fault = () => 'lose-request';
+    expect((await client.unlock(model.ada, PIN)).type).toBe('right');
+    const down = { kind: 'rig.stood-down', subject: model.rig, body: { why: 'x' } } as const;
+    await lab.append(down);
+    expect((await client.unlock(model.milo, PIN)).type).toBe('right');
+    await lab.append(down);
+    expect((await client.checkPin(model.ada, PIN)).type).toBe('right');
+    expect(client.session()).toMatchObject({ state: 'open', person: { id: model.milo } });
+    model.server.fault = () => 'none';
+    await exchange(lab);
+    const sent = model.server.book.entries.filter((one) => one.entry.device === lab.device().id);
+    expect(sent.map(({ entry }) => ('author' in entry ? entry.author : null))).toEqual([
+      model.ada,
+      model.milo,
+    ]);
   });
 });
