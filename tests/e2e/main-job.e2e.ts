@@ -222,7 +222,7 @@ describe('6 · handing over', () => {
     const text = await page.getByRole('main').innerText();
     expect(text).toMatch(/revision \d/i);
     expect(text).toMatch(/[0-9a-f]{8,}/);
-    await holdHalfSecond(page.getByRole('button', { name: 'Accept', exact: true }));
+    await holdSecond(page.getByRole('button', { name: 'Accept', exact: true }));
     await page.getByText('The server has applied it').waitFor();
     await goTo(bench.page(), 'Firings');
     await bench
@@ -286,7 +286,7 @@ describe('7 · what the server says no to, and what it never refuses', () => {
       ['irregular', 2],
     ]);
     await page.getByRole('row').filter({ hasText: 'irregular' }).nth(1).waitFor();
-    expect(await page.getByRole('banner').innerText()).toContain('stood down');
+    await page.getByRole('banner').getByText('Firing, stood down').first().waitFor();
   });
 });
 
