@@ -29,8 +29,6 @@ export function openDeskQueries(lab: LabClient): DeskQueries {
   const keeper = keepQueries({
     client,
     small: lab.small,
-    timers: lab.timers,
-    now: lab.here.bestMs,
     key: `holdoff-desk/${lab.lab.id}/${person}`,
     version: lab.app_version,
   });

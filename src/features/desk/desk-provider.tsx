@@ -3,10 +3,19 @@ import { useEffect, useState, type ReactNode } from 'react';
 import { useLabClient } from '../../data/client-context';
 import { openDeskQueries } from '../../data/desk/desk-queries';
 import { useBookState } from '../../data/use-book';
+import { useSession } from '../../data/use-session';
 import { DeskContext } from './use-desk-query';
 
-/** What the Desk fetches lives here, per lab; it comes with the Desk's own chunk and nothing of the bench needs it. */
+/** What the Desk fetches lives here, per lab and person; it comes with the Desk's own chunk and nothing of the bench needs it. */
 export function DeskProvider({ children }: { readonly children: ReactNode }) {
+  const lab = useLabClient();
+  const session = useSession();
+  const person = session.state === 'open' ? session.person.id : 'nobody';
+  // Another person never sees what the one before had fetched.
+  return <PersonsDesk key={`${lab.lab.id}/${person}`}>{children}</PersonsDesk>;
+}
+
+function PersonsDesk({ children }: { readonly children: ReactNode }) {
   const lab = useLabClient();
   const [desk] = useState(() => openDeskQueries(lab));
   const { revision } = useBookState();
