@@ -1,4 +1,5 @@
 import 'fake-indexeddb/auto';
+import fc from 'fast-check';
 import { afterEach, beforeEach, vi } from 'vitest';
 
 // What a person would see in the console is part of the behaviour: a test that means to warn stubs the
@@ -24,3 +25,6 @@ afterEach(() => {
     throw new Error(`The test wrote to the console unexpectedly:\n${unexpected.join('\n')}`);
   }
 });
+
+// The short form of every campaign runs the same draws each time; HOLDOFF_SEED gives others.
+fc.configureGlobal({ seed: Number(process.env['HOLDOFF_SEED'] ?? 20261201) });

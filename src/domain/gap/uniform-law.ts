@@ -15,6 +15,7 @@ import type { GasName } from './gas-table';
 import { AIR_CRITERION } from './streamer-criterion';
 
 const FIELD_WARNING_MV_M = 10;
+const LEAST_SLOPE_X_BAR_CM = 1e-4;
 
 /**
  * Breakdown voltage of a uniform gap, kV. Refused below the law's range (the low-pd curve holds there) and
@@ -104,6 +105,13 @@ export function gaugeMistakeRatio(
 export function gapSensitivity(pressure_bar_abs: number, gap_cm: number): Result<Answer> {
   const x = checkedSimilarity({ pressure_bar_abs, gap_cm, temperature_C: 20 });
   if (!x.ok) return x;
+  if (x.value < LEAST_SLOPE_X_BAR_CM) {
+    return refused({
+      type: 'pd-too-small',
+      field: 'pressure',
+      words: 'Pressure times gap is so small that this law has no slope to give.',
+    });
+  }
   const linear = AIR_CRITERION.Ec_kV_per_bar_cm * x.value;
   const root = Math.sqrt(AIR_CRITERION.K * x.value);
   return ok(
