@@ -38,10 +38,13 @@ export function GapFields({ lookup }: { readonly lookup: GapLookup }) {
   );
 }
 
+/** What is found stands on top, then the voltage that is wanted, then what may be set. */
 function fieldsOf({ form }: GapLookup): readonly GapField[] {
-  const asked: readonly GapField[] = form.find === 'voltage' ? [] : ['voltage_kV'];
+  const found: readonly GapField[] =
+    form.find === 'voltage' ? [] : [form.find === 'gap' ? 'gap_mm' : 'pressure', 'voltage_kV'];
   const radius: readonly GapField[] = form.values.radius_mm === null ? [] : ['radius_mm'];
-  return [...asked, 'gap_mm', 'pressure', 'temperature_C', 'ambient_bar_abs', ...radius];
+  const settable: readonly GapField[] = ['gap_mm', 'pressure', 'temperature_C', 'ambient_bar_abs', ...radius];
+  return [...found, ...settable.filter((field) => !found.includes(field))];
 }
 
 function purposeSource({ form }: GapLookup): string {

@@ -31,7 +31,7 @@ export function solvedText({ form, view }: GapLookup): string | null {
   const { value, rounding } = view.value.solution;
   const ambient = form.values.ambient_bar_abs ?? 0;
   const shown = form.find === 'pressure' && form.reference === 'g' ? value - ambient : value;
-  return formatFigure(shown, { digits: { decimals: form.find === 'gap' ? 2 : 3 }, rounding });
+  return formatFigure(shown, { digits: { decimals: 2 }, rounding });
 }
 
 export function percentText(share: number): string {
