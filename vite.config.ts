@@ -84,7 +84,22 @@ export default defineConfig({
   },
   test: {
     passWithNoTests: false,
+    pool: 'threads',
+    // One worker less than there are cores would leave half of a small machine idle.
+    maxWorkers: 2,
     projects: [
+      {
+        extends: true,
+        test: {
+          name: 'domain',
+          env: timeZoneIndependent,
+          environment: 'node',
+          include: ['{src/domain,tests/reference}/**/*.test.ts'],
+          setupFiles: ['tests/support/setup-unit.ts'],
+          // Pure code leaves nothing behind for the next file.
+          isolate: false,
+        },
+      },
       {
         extends: true,
         test: {
@@ -92,7 +107,7 @@ export default defineConfig({
           env: timeZoneIndependent,
           environment: 'node',
           include: ['{src,server,migrations,seeds,tests}/**/*.test.ts'],
-          exclude: ['**/*.api.test.ts', '**/node_modules/**'],
+          exclude: ['src/domain/**', 'tests/reference/**', '**/*.api.test.ts', '**/node_modules/**'],
           setupFiles: ['tests/support/setup-unit.ts'],
         },
       },

@@ -40,7 +40,11 @@ export const stages = [
       ['node_modules/ts7/bin/tsc', '-p', 'src/domain', '--noEmit'],
     ),
   },
-  { name: 'unit', says: 'domain, client and server by themselves', run: vitest('unit', 'unit-dom') },
+  {
+    name: 'unit',
+    says: 'domain, client and server by themselves',
+    run: vitest('domain', 'unit', 'unit-dom'),
+  },
   {
     name: 'ngspice',
     says: 'the circuit solver against another one, on circuits from a fixed seed',
