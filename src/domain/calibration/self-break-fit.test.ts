@@ -161,6 +161,21 @@ describe('calibratedSelfBreak', () => {
     expect(result.value.band.low).toBeLessThan(result.value.value);
     expect(calibratedSelfBreak(found, { ...setting, pressure_bar_abs: Number.NaN }).ok).toBe(false);
   });
+
+  // Read at 2 to 5 mm and 1 to 1.4 bar.
+  it.each([
+    [2, 1, false],
+    [5.2, 1.4, false],
+    [6, 1.2, true],
+    [1.5, 1.2, true],
+    [3, 2.5, true],
+    [3, 0.8, true],
+  ])('at %d mm and %d bar it is extrapolated: %s', (gap_mm, pressure_bar_abs, extrapolated) => {
+    const found = fit(readingsOf({ scale: 1, offset_mm: 0, scatter: 0.01 }));
+    const result = calibratedSelfBreak(found, { gap_mm, pressure_bar_abs, temperature_C: 20 });
+    if (!result.ok) throw new Error(result.refusal.words);
+    expect(result.value.warnings.some(({ type }) => type === 'extrapolated')).toBe(extrapolated);
+  });
 });
 
 describe('testDrift', () => {

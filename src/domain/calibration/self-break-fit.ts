@@ -19,6 +19,11 @@ export interface Interval {
   readonly high: number;
 }
 
+export interface SettingRange {
+  readonly gap_mm: readonly [low: number, high: number];
+  readonly pressure_bar_abs: readonly [low: number, high: number];
+}
+
 /** A reading that was left out, and how far it lies off in robust sigmas. */
 export interface Outlier {
   readonly name: string;
@@ -38,6 +43,8 @@ export interface SelfBreakFit {
   /** Relative scatter of single readings about the fit, one sigma. */
   readonly scatter: number;
   readonly used: number;
+  /** Gaps and pressures among the readings that were used. */
+  readonly read: SettingRange;
   readonly freedom: number;
   readonly outliers: readonly Outlier[];
   readonly drift: Drift;
@@ -55,6 +62,8 @@ const MOST_OUTLIERS = 0.25;
 /** A voltage is hardly read better than this, so nothing within it is an outlier. */
 const LEAST_SIGMA = 0.005;
 const SLOPE_STEP = 1e-4;
+/** Own choice. */
+const READ_MARGIN = 0.1;
 
 /**
  * Least squares on ln V. Both numbers are fitted where gaps differ enough to tell them apart, scale alone otherwise.
@@ -93,6 +102,8 @@ export function calibratedSelfBreak(fit: SelfBreakFit, setting: RigSetting): Res
   if (!law.ok) return law;
   const value = fit.scale.value * law.value;
   const half = studentQuantile(TAILS, fit.freedom) * fit.scatter * Math.sqrt(1 + 1 / fit.used);
+  const beyond = isBeyond(setting.gap_mm, fit.read.gap_mm);
+  const extrapolated = beyond || isBeyond(setting.pressure_bar_abs, fit.read.pressure_bar_abs);
   return ok(
     answer({
       value,
@@ -103,9 +114,23 @@ export function calibratedSelfBreak(fit: SelfBreakFit, setting: RigSetting): Res
           ? 'Law times the rig\u2019s scale'
           : 'Law at the rig\u2019s effective gap, times its scale',
       valid: 'settings among those that were read; the low side for hold-off stays with the law',
-      warnings: fit.warnings,
+      warnings: extrapolated ? [...fit.warnings, EXTRAPOLATED] : fit.warnings,
     }),
   );
+}
+
+const EXTRAPOLATED: Warning = {
+  type: 'extrapolated',
+  words: 'Beyond the gaps and pressures that were read: the band does not cover that.',
+};
+
+/** A little beyond is still among them: a gap is not set to the last digit. */
+function isBeyond(value: number, [low, high]: readonly [number, number]): boolean {
+  return value < (1 - READ_MARGIN) * low || value > (1 + READ_MARGIN) * high;
+}
+
+function rangeOf(values: readonly number[]): readonly [number, number] {
+  return [Math.min(...values), Math.max(...values)];
 }
 
 interface Fitted {
@@ -224,7 +249,11 @@ function finish({ rig, kept, fitted, outliers }: Finished): SelfBreakFit {
   if (drift.type === 'rising' || drift.type === 'falling')
     warnings.push({ type: 'drift', words: drift.words });
   for (const { words } of outliers) warnings.push({ type: 'outlier', words });
-  return { ...numbers, rig, used: kept.length, outliers, drift, warnings };
+  const read = {
+    gap_mm: rangeOf(kept.map(({ gap_mm }) => gap_mm)),
+    pressure_bar_abs: rangeOf(kept.map(({ pressure_bar_abs }) => pressure_bar_abs)),
+  };
+  return { ...numbers, rig, used: kept.length, read, outliers, drift, warnings };
 }
 
 function readingsRefusal(readings: readonly SelfBreakReading[]): Refusal | undefined {

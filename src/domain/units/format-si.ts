@@ -1,5 +1,6 @@
 import { formatQuantity, roundToSignificant, type Rounding } from './format-quantity';
 import type { PressureReference } from './parse-quantity';
+import { PLAIN_UNITS } from './unit-table';
 
 /** Prefixes that screens use, largest first. */
 const STEPS: readonly (readonly [power: number, sign: string])[] = [
@@ -37,14 +38,41 @@ export function formatSi(
   );
 }
 
-/** A pressure with its reference always beside it: "1.20 bar(g)". */
+/** Units a pressure is shown in. */
+export type PressureUnit = 'bar' | 'mbar' | 'kPa' | 'Torr' | 'psi' | 'atm';
+
+/** Units a length is shown in. */
+export type LengthUnit = 'm' | 'mm' | '\u00b5m' | 'in';
+
+interface Shown<Unit> {
+  readonly significant: number;
+  readonly rounding: Rounding;
+  readonly unit?: Unit;
+}
+
+/**
+ * A pressure with its reference always beside it: "1.20 bar(g)", "17.4 psi(g)". Rounded in the unit that is shown, so that a
+ * limit stays below its bar in every unit.
+ */
 export function formatPressure(
   bar: number,
   reference: PressureReference,
-  { significant, rounding }: { readonly significant: number; readonly rounding: Rounding },
+  { significant, rounding, unit = 'bar' }: Shown<PressureUnit>,
 ): string {
-  return formatQuantity(bar, reference === 'gauge' ? 'bar(g)' : 'bar(abs)', {
+  return formatQuantity(inUnit(bar, unit), `${unit}${reference === 'gauge' ? '(g)' : '(abs)'}`, {
     digits: { significant },
     rounding,
   });
+}
+
+/** A length in the unit asked for, rounded in that unit: 3.175 mm is "0.125 in". */
+export function formatLength(
+  length_mm: number,
+  { significant, rounding, unit = 'mm' }: Shown<LengthUnit>,
+): string {
+  return formatQuantity(inUnit(length_mm, unit), unit, { digits: { significant }, rounding });
+}
+
+function inUnit(value: number, unit: PressureUnit | LengthUnit): number {
+  return value / (PLAIN_UNITS[unit.toLowerCase()]?.size ?? 1);
 }

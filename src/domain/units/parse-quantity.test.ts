@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { formatPressure, formatSi } from './format-si';
+import { formatLength, formatPressure, formatSi } from './format-si';
 import { parseWithUnit, type ParsedQuantity } from './parse-quantity';
 import type { Dimension } from './unit-table';
 
@@ -128,5 +128,46 @@ describe('formatSi', () => {
   it('writes the reference beside a pressure', () => {
     expect(formatPressure(1.2, 'gauge', { significant: 3, rounding: 'nearest' })).toBe('1.20\u2009bar(g)');
     expect(formatPressure(2.2133, 'absolute', { significant: 3, rounding: 'up' })).toBe('2.22\u2009bar(abs)');
+  });
+});
+
+describe('pressures and lengths in the unit asked for', () => {
+  const plain = { significant: 4, rounding: 'nearest' } as const;
+
+  // NIST SP 811, appendix B (from memory): 1 bar is 14.5038 psi, 750.062 Torr, 0.986923 atm.
+  it.each([
+    ['bar', '1.000\u2009bar(abs)'],
+    ['mbar', '1,000\u2009mbar(abs)'],
+    ['kPa', '100.0\u2009kPa(abs)'],
+    ['Torr', '750.1\u2009Torr(abs)'],
+    ['psi', '14.50\u2009psi(abs)'],
+    ['atm', '0.9869\u2009atm(abs)'],
+  ] as const)('1 bar in %s is %s', (unit, text) => {
+    expect(formatPressure(1, 'absolute', { ...plain, unit })).toBe(text);
+  });
+
+  it.each([
+    ['mm', '3.175\u2009mm'],
+    ['in', '0.1250\u2009in'],
+    ['\u00b5m', '3,175\u2009\u00b5m'],
+    ['m', '0.003175\u2009m'],
+  ] as const)('3.175 mm in %s is %s', (unit, text) => {
+    expect(formatLength(3.175, { ...plain, unit })).toBe(text);
+  });
+
+  it('never shows a limit above itself in any unit', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 1e-3, max: 20, noNaN: true }),
+        fc.constantFrom('bar', 'kPa', 'Torr', 'psi', 'atm' as const),
+        (bar, unit) => {
+          const shown = (rounding: 'down' | 'up') => {
+            const text = formatPressure(bar, 'gauge', { significant: 3, rounding, unit });
+            return got(text.replaceAll(',', ''), 'pressure').value ?? Number.NaN;
+          };
+          return shown('down') <= bar * (1 + 1e-12) && shown('up') >= bar * (1 - 1e-12);
+        },
+      ),
+    );
   });
 });

@@ -39,7 +39,10 @@ describe('partWear', () => {
     [1, 1, ['life-used']],
     [1, 1.1, ['life-used', 'over-stressed']],
   ])('at %d of the rated shots and %d of the stress it says %j', (...[share, stress_ratio, types]) => {
-    expect(wear([{ shots: share * 100_000, stress_ratio }]).warnings.map(({ type }) => type)).toEqual(types);
+    const { warnings, remaining } = wear([{ shots: share * 100_000, stress_ratio }]);
+    expect(warnings.map(({ type }) => type)).toEqual(types);
+    // A figure that is shown alone says it too.
+    expect(remaining.warnings).toEqual(expect.arrayContaining([...warnings]));
   });
 
   it('only loses with further shots, and holds its value within its band', () => {

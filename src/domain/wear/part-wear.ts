@@ -45,6 +45,7 @@ export function partWear(
   const planned = lifeShots(law, planned_ratio);
   if (!planned.ok) return planned;
   const expected = planned.value.value;
+  const warnings = warningsOf(used, highestStress_ratio);
   const left = (share: number) => Math.max(0, 1 - share) * expected;
   const remaining: Answer = {
     ...planned.value,
@@ -52,8 +53,9 @@ export function partWear(
     // Either the law is five times too long, or five times too short.
     band: { low: left(LIFE_FACTOR * used) / LIFE_FACTOR, high: left(used / LIFE_FACTOR) * LIFE_FACTOR },
     model: 'Sum of shots over expected shots',
+    warnings: [...planned.value.warnings, ...warnings],
   };
-  return ok({ used, shots, highestStress_ratio, remaining, warnings: warningsOf(used, highestStress_ratio) });
+  return ok({ used, shots, highestStress_ratio, remaining, warnings });
 }
 
 function warningsOf(used: number, highest: number): readonly Warning[] {
