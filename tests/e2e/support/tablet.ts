@@ -7,6 +7,8 @@ import { chromium, type Browser, type BrowserContext, type Page } from 'playwrig
 
 /** A tablet is a real Chromium process on a profile of its own that outlives it. */
 export interface Tablet {
+  /** Folder of the browser's profile. */
+  readonly profile: string;
   readonly page: () => Page;
   /** `kill -9` of the whole browser, as a dying battery would. */
   kill(): Promise<void>;
@@ -65,6 +67,7 @@ export async function openTablet(url: string, size: Size = TABLET): Promise<Tabl
   };
   await open();
   return {
+    profile,
     page: () => must().page,
     kill,
     open,
