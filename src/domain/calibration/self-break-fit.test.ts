@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { testDrift } from './drift';
 import { rigLaw, type RigGap } from './rig-law';
@@ -127,6 +128,26 @@ describe('fitSelfBreak', () => {
     const [forward, backward] = [fit(readings), fit(readings.toReversed())];
     expect(backward.scale.value).toBeCloseTo(forward.scale.value, 9);
     expect(backward.offset_mm?.value).toBeCloseTo(forward.offset_mm?.value ?? Number.NaN, 9);
+  });
+
+  it('carries a meter that reads wrong by a factor into the scale, and nowhere else', () => {
+    const readings = readingsOf({ scale: 1, offset_mm: 0.1, scatter: 0.01 });
+    const plain = fit(readings);
+    fc.assert(
+      fc.property(fc.double({ min: 0.5, max: 2, noNaN: true }), (factor) => {
+        const found = fit(readings.map((one) => ({ ...one, voltage_kV: factor * one.voltage_kV })));
+        const same = (got: number | undefined, wanted: number | undefined) =>
+          Math.abs((got ?? Number.NaN) / (wanted ?? Number.NaN) - 1) < 1e-6;
+        return (
+          found.type === plain.type &&
+          same(found.scale.value, factor * plain.scale.value) &&
+          same(found.scale.high, factor * plain.scale.high) &&
+          same(found.offset_mm?.value, plain.offset_mm?.value) &&
+          same(found.scatter, plain.scatter)
+        );
+      }),
+      { numRuns: 20 },
+    );
   });
 
   it('refuses too few readings, and names the reading that is wrong', () => {
