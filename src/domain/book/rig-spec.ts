@@ -10,6 +10,9 @@ import {
   shortText,
 } from './bodies/fields';
 
+const known = z.enum(['measured', 'assumed']);
+const signed_mm = z.number().check(z.gte(-10_000), z.lte(10_000));
+
 const sheetCapacitor = z.object({
   kind: z.literal('sheet'),
   dielectric: shortText,
@@ -32,6 +35,10 @@ const bankCapacitor = z.object({
   /** Of the whole bank. */
   capacitance_nF: positive,
   rated_kV: positive_kV,
+  /** How many of the part stand in parallel; left out where the rig only says the sum. */
+  parts: z.optional(z.int().check(z.gte(1), z.lte(1000))),
+  /** Row of the part table (`capacitor/parts.ts`); left out for a part that is not in it. */
+  catalogue: z.optional(shortText),
 });
 
 export const capacitorSchema = z.discriminatedUnion('kind', [sheetCapacitor, bankCapacitor]);
@@ -45,17 +52,60 @@ export const nodeSchema = z.object({
   bleed_Mohm: z.nullable(positive),
 });
 
-/** A rig is a circuit with numbers (PRODUCT: Rig). Stored as entered, never converted. */
+/** A screw that moves one end of an electrode. Positions count from the A end of the active length. */
+export const screwSchema = z.object({
+  name: shortText,
+  position_mm: signed_mm,
+  pitch_mm: positive,
+  /** Millimetres at the electrode for one of the screw; 1 where it pushes the bar itself. */
+  lever: positive,
+  /** Which way of turning makes the gap smaller, seen from the head. */
+  closes: z.enum(['clockwise', 'anticlockwise']),
+});
+export type ScrewSpec = z.infer<typeof screwSchema>;
+
+/** Resistance of the closed spark gap, by the names of physics D; inductances stand beside it. */
+export const gapLawSchema = z.object({
+  law: z.enum(['exponential', 'rompe-weizel']),
+  end_ohm: positive,
+  start_ohm: positive,
+  /** Of the exponential law. */
+  fall_ns: z.nullable(positive),
+  /** Of Rompe and Weizel's law. */
+  constant_cm2_atm_V2s: z.nullable(positive),
+  known,
+});
+
+/** What the laser channel does once it breaks down. */
+export const channelLawSchema = z.object({
+  /** Breakdown of the channel over its static one, 1.3 for a third more. */
+  over_static: positive,
+  end_ohm: positive,
+  start_ohm: positive,
+  fall_ns: positive,
+  known,
+});
+
+/**
+ * A rig is a circuit with numbers (PRODUCT: Rig). Stored as entered, never converted. What may be left out came with
+ * version 2 of the rig's entries; `rules/rig-circuit.ts` fills what a computation needs and says that it is assumed.
+ */
 export const rigSpecSchema = z.object({
   topology: z.enum(['lc-inversion', 'charge-transfer']),
   gap: z.object({
     gas: gasName,
-    electrodes: z.enum(['domed', 'cylinder', 'plane']),
-    /** Null for plane electrodes. */
+    electrodes: z.enum(['domed', 'cylinder', 'plane', 'capped-rods', 'hex-bars']),
+    /** Of the face, the cylinder or the rod; null for plane electrodes and hexagonal bars. */
     radius_mm: z.nullable(positive),
-    radius_known: z.enum(['measured', 'assumed']),
+    radius_known: known,
     gap_mm: positive,
     gap_error_mm: atLeastZero,
+    /** Capped rods: length of the straight part. */
+    rod_length_mm: z.optional(positive),
+    /** Hexagonal bars: across the flats, radius of the rounded edges, and what faces the gap. */
+    flats_mm: z.optional(positive),
+    corner_mm: z.optional(positive),
+    facing: z.optional(z.enum(['flats', 'edges'])),
     /** UV from the gap's own corona or a lamp reaches the electrodes. */
     irradiated: z.boolean(),
     lowest_bar_g: bar_g,
@@ -80,12 +130,45 @@ export const rigSpecSchema = z.object({
     spacing_b_mm: positive,
     gas: gasName,
     across_kohm: z.nullable(positive),
+    /** Shape of the electrodes' faces, in words, and the radius of their edge. */
+    profile: z.optional(shortText),
+    edge_mm: z.optional(positive),
+    width_mm: z.optional(positive),
+    flow_L_min: z.optional(atLeastZero),
+    screws: z.optional(z.array(screwSchema).check(z.maxLength(2))),
+    /** Where the feeler gauge goes in, from the A end; the ends themselves where they are left out. */
+    feeler_a_mm: z.optional(signed_mm),
+    feeler_b_mm: z.optional(signed_mm),
+    feeler_error_mm: z.optional(atLeastZero),
   }),
-  charging: z.object({ supply_kV: positive_kV, supply_mA: positive, ballast_Mohm: positive }),
+  charging: z.object({
+    supply_kV: positive_kV,
+    supply_mA: positive,
+    ballast_Mohm: positive,
+    /** Charging inductor across the channel of an LC inversion, and its resistance. */
+    inductor_uH: z.optional(positive),
+    inductor_ohm: z.optional(positive),
+  }),
   nodes: z.array(nodeSchema).check(z.minLength(1), z.maxLength(12)),
   shorting_points: z.array(shortText).check(z.minLength(1), z.maxLength(20)),
-  beam: z.object({ pulse_energy_uJ: positive, wavelength_nm: positive }),
-  model: z.object({ gap_nH: positive, channel_nH: positive, known: z.enum(['measured', 'assumed']) }),
+  beam: z.object({
+    pulse_energy_uJ: positive,
+    wavelength_nm: positive,
+    pulse_ns: z.optional(positive),
+    width_mm: z.optional(positive),
+    height_mm: z.optional(positive),
+    /** Whole angles along the width and the height. */
+    divergence_width_mrad: z.optional(positive),
+    divergence_height_mrad: z.optional(positive),
+    stop: z.optional(shortText),
+  }),
+  model: z.object({
+    gap_nH: positive,
+    channel_nH: positive,
+    known,
+    gap_law: z.optional(gapLawSchema),
+    channel_law: z.optional(channelLawSchema),
+  }),
   envelope: z.object({ max_kV: positive_kV, max_bar_g: bar_g, max_rate_Hz: hertz }),
 });
 export type RigSpec = z.infer<typeof rigSpecSchema>;

@@ -12,7 +12,7 @@ export function gapSetupOf(spec: RigSpec, temperature_C: number): GapSetup {
   const { gas, electrodes, radius_mm, gap_mm, gap_error_mm, irradiated } = spec.gap;
   return {
     gas,
-    electrodes: { shape: electrodes, radius_mm },
+    electrodes: { shape: shapeOf(electrodes), radius_mm },
     gap_mm,
     u_gap_mm: gap_error_mm,
     u_pressure_bar: DIAL_ERRORS.pressure_bar,
@@ -20,6 +20,12 @@ export function gapSetupOf(spec: RigSpec, temperature_C: number): GapSetup {
     u_temperature_C: DIAL_ERRORS.temperature_C,
     irradiated,
   };
+}
+
+// Bars without a radius are refused in words until the gap takes their own shape.
+function shapeOf(electrodes: RigSpec['gap']['electrodes']): GapSetup['electrodes']['shape'] {
+  if (electrodes === 'hex-bars') return 'cylinder';
+  return electrodes === 'capped-rods' ? 'domed' : electrodes;
 }
 
 /** The gap at a gauge pressure and an ambient; there is no default for the ambient. */
