@@ -21,7 +21,7 @@ export const physicsOrder = [
 
 /** Folders of the domain that hold no physics, again in building order. */
 const groundOrder = ['units', 'numerics'];
-const bookOrder = ['book', 'rules', 'handover', 'report'];
+const bookOrder = ['book', 'rules', 'handover', 'lookup', 'report'];
 
 const nodeOnlyPackages = [
   'express',
