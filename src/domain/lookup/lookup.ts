@@ -60,8 +60,18 @@ export interface TextField {
 
 export type Field = NumberField | ChoiceField | TextField;
 
-/** Values by the field's key, in the field's own unit; null where none is known. */
+/**
+ * Values by the field's key, in the field's own unit; null where none is known. A key that no field names is what the rig says
+ * and nobody enters here, as the vessel's rating: an answer does without it where it is missing.
+ */
 export type Values = Readonly<Record<string, number | string | null>>;
+
+/** What there is to start from; both may be missing. `envelope` is that of the standing permit. */
+export interface StartFrom {
+  readonly spec: RigSpec | null;
+  readonly settings: LabSettings | null;
+  readonly envelope?: RigSpec['envelope'] | null;
+}
 
 /** What a lookup starts from: the rig in hand and the lab, or nothing at all. */
 export interface Start {
@@ -81,6 +91,8 @@ export interface Figure {
   readonly rounding: Rounding;
   /** Counting digits. */
   readonly digits: number;
+  /** Digits after the point instead, where other screens show this figure so. */
+  readonly decimals?: number;
   /** `answer`: the large one of the screen; at most two. */
   readonly weight: 'answer' | 'main' | 'side';
   /** Words instead of the figure, where none can be given. */
@@ -154,6 +166,13 @@ export interface Solvable {
   readonly purpose?: string;
   /** Which way the found value rounds so that the target is still met. */
   readonly rounding: Rounding;
+  /** Key of the input that holds the wanted value, where the lookup has one; screens ask for it beside the others otherwise. */
+  readonly target?: string;
+  /** The domain's own inverse, where it is better than a search; `all` in rising order, the field's own unit. */
+  readonly exact?: (
+    values: Values,
+    target: number,
+  ) => Result<{ readonly value: number; readonly all: readonly number[] }>;
 }
 
 /**
@@ -168,7 +187,9 @@ export interface Lookup {
   readonly decides: string;
   readonly fields: readonly Field[];
   /** From the rig and the lab; both may be missing. Never a made-up ambient pressure. */
-  readonly start: (from: { readonly spec: RigSpec | null; readonly settings: LabSettings | null }) => Start;
+  readonly start: (from: StartFrom) => Start;
+  /** Key of the field that is chosen first; the first number otherwise. */
+  readonly first?: string;
   /** Pure and total: any value of any field gives an answer or a refusal in words, never a throw and never a NaN. */
   readonly answer: (values: Values) => Result<LookupAnswer>;
   readonly solvable: readonly Solvable[];
