@@ -123,7 +123,8 @@ function closeEnough(value: number, decimals: number): boolean {
 
 /** One step on the grid of the field's step, in its own unit. A step out of range is refused in words. */
 export function steppedValue(field: NumberField, values: Values, direction: -1 | 1): Result<number> {
-  const now = numberAt(values, field.key) ?? (field.minExcluded === true ? field.min : Math.max(0, field.min));
+  const now =
+    numberAt(values, field.key) ?? (field.minExcluded === true ? field.min : Math.max(0, field.min));
   const next = (Math.round(now / field.step) + direction) * field.step;
   return checkField(field, Number(next.toPrecision(12)));
 }

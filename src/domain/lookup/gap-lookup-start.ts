@@ -1,0 +1,68 @@
+import { chargingOf } from '../rules/rig-figures';
+import { gapSetupOf } from '../rules/rig-gap';
+import type { Start, StartFrom } from './lookup';
+
+/** What the rig says and nobody enters here: supply, vessel, and the pressures that are allowed. */
+export function gapStart({ spec, settings, envelope = null }: StartFrom): Start {
+  const lab = {
+    temperature_C: settings?.ambient_C ?? 20,
+    ambient_bar_abs: settings?.ambient_bar_abs ?? null,
+    voltage_kV: null,
+    condition: 'pressurised-or-worn',
+  };
+  const fromLab = settings === null ? 'assumed' : 'lab';
+  const known = {
+    temperature_C: fromLab,
+    ambient_bar_abs: fromLab,
+    voltage_kV: 'assumed',
+    condition: 'assumed',
+  } as const;
+  if (spec === null) {
+    return {
+      values: {
+        ...lab,
+        gas: 'N2',
+        irradiated: 'no-uv',
+        electrodes: 'domed',
+        radius_mm: 12,
+        gap_mm: 3,
+        gap_error_mm: 0.05,
+        pressure: 0,
+      },
+      known: { ...known, ...everyOther('assumed') },
+    };
+  }
+  const { gap } = spec;
+  const setup = gapSetupOf(spec, lab.temperature_C);
+  return {
+    values: {
+      ...lab,
+      gas: gap.gas,
+      irradiated: gap.irradiated ? 'uv' : 'no-uv',
+      electrodes: setup.electrodes.shape,
+      radius_mm: gap.radius_mm,
+      gap_mm: gap.gap_mm,
+      gap_error_mm: gap.gap_error_mm,
+      pressure: (gap.lowest_bar_g + gap.highest_bar_g) / 2,
+      ...chargingOf(spec),
+      vessel_bar_g: gap.vessel?.rated_bar_g ?? null,
+      highest_bar_g: gap.highest_bar_g,
+      window_from_bar_g: envelope === null ? null : gap.lowest_bar_g,
+      window_to_bar_g: envelope?.max_bar_g ?? null,
+    },
+    known: {
+      ...known,
+      ...everyOther('rig'),
+      ...(gap.radius_known === 'assumed' ? { radius_mm: 'assumed' as const } : {}),
+    },
+  };
+}
+
+function everyOther<K>(known: K): Record<string, K> {
+  return Object.fromEntries(
+    ['gas', 'irradiated', 'electrodes', 'radius_mm', 'gap_mm', 'gap_error_mm', 'pressure'].map((key) => [
+      key,
+      known,
+    ]),
+  );
+}
