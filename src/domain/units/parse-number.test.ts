@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { formatFigure } from './format-quantity';
 import { parseNumber, parseQuantity } from './parse-number';
 
 const read = (text: string) => parseNumber(text, 'pressure', 'Pressure');
@@ -8,7 +9,15 @@ describe('parseNumber', () => {
   it.each([
     ['12.5', 12.5],
     ['12,5', 12.5],
-    ['1,013', 1.013],
+    ['1.013', 1.013],
+    ['0,125', 0.125],
+    ['\u22120,125', -0.125],
+    ['1,01', 1.01],
+    ['1,0130', 1.013],
+    ['1234,567', 1234.567],
+    ['0012,500', 12.5],
+    [',500', 0.5],
+    ['15.000', 15],
     [' 0.966 ', 0.966],
     ['\u22123', -3],
     ['-3', -3],
@@ -41,6 +50,55 @@ describe('parseNumber', () => {
     ['1e999', 'not-finite'],
   ])('refuses "%s" as %s, beside its field', (text, type) => {
     expect(read(text)).toMatchObject({ ok: false, refusal: { type, field: 'pressure' } });
+  });
+
+  it.each([
+    ['15,000', '15000 or 15.0'],
+    ['1,013', '1013 or 1.013'],
+    ['12,500', '12500 or 12.5'],
+    ['120,050', '120050 or 120.05'],
+    ['\u221215,000', '\u221215000 or \u221215.0'],
+    ['+2,500', '+2500 or +2.5'],
+    [' 15,000 ', '15000 or 15.0'],
+    ['1,500e3', '1500e3 or 1.5e3'],
+  ])('refuses "%s", which can be read two ways: write %s', (text, ways) => {
+    const result = read(text);
+    expect(result).toMatchObject({ ok: false, refusal: { type: 'ambiguous-comma', field: 'pressure' } });
+    expect(!result.ok && result.refusal.words.endsWith(`can be read two ways: write ${ways}.`)).toBe(true);
+  });
+
+  it.each([
+    ['1,234.5', '1234.5'],
+    ['1,234,567', '1234567'],
+  ])('asks to leave the commas out of "%s"', (text, plain) => {
+    expect(read(text)).toMatchObject({
+      refusal: {
+        type: 'not-a-number',
+        words: `Pressure: "${text}": leave the commas out, as ${plain}.`,
+      },
+    });
+  });
+
+  it('never reads what a screen printed with thousands a thousand times too small', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: 1000, max: 1e9, noNaN: true }),
+        fc.integer({ min: 0, max: 4 }),
+        (value, decimals) => {
+          const shown = formatFigure(value, { digits: { decimals }, rounding: 'nearest' });
+          return !read(shown).ok;
+        },
+      ),
+    );
+  });
+
+  it('takes every text that the keypad can make, which never holds a comma', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: 0, max: 999_999 }), fc.integer({ min: 0, max: 999 }), (whole, part) => {
+        const result = read(`${String(whole)}.${String(part).padStart(3, '0')}`);
+        return result.ok && Math.abs(result.value - (whole + part / 1000)) < 1e-9;
+      }),
+    );
   });
 
   it('says in words what was typed, shortened', () => {

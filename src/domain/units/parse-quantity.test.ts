@@ -30,6 +30,9 @@ describe('parseWithUnit', () => {
     ['5 ns', 'time', 5e-9],
     ['2 min', 'time', 120],
     ['1.5 MHz', 'frequency', 1.5e6],
+    ['2 TOhm', 'resistance', 2e12],
+    ['337.1 nm', 'length', 3.371e-4],
+    ['0.125 inch', 'length', 3.175],
   ])('reads %s', (text, dimension, value) => {
     expect((got(text, dimension).value ?? Number.NaN) / value).toBeCloseTo(1, 12);
   });
@@ -47,6 +50,9 @@ describe('parseWithUnit', () => {
     ['100000 Pa gauge', 1, 'gauge'],
     ['1000 mbar(g)', 1, 'gauge'],
     ['1 atm abs', 1.01325, 'absolute'],
+    ['0.2 MPa(abs)', 2, 'absolute'],
+    ['29.92126 inHg abs', 1.01325, 'absolute'],
+    ['2 BAR(G)', 2, 'gauge'],
   ])('reads %s with its reference', (text, bar, reference) => {
     const parsed = got(text, 'pressure');
     expect(parsed.value).toBeCloseTo(bar, 7);
@@ -59,12 +65,16 @@ describe('parseWithUnit', () => {
     ['101325 Pa', 'pressure', 'gauge-or-absolute'],
     ['14.7 psi', 'pressure', 'gauge-or-absolute'],
     ['15', 'voltage', 'no-unit'],
+    ['200 mPa abs', 'pressure', 'unit-unknown'],
+    ['2 MPa', 'pressure', 'gauge-or-absolute'],
     ['15 kA', 'voltage', 'unit-unknown'],
     ['15 KV', 'voltage', 'unit-unknown'],
     ['3 bar(g)', 'length', 'unit-unknown'],
     ['kV', 'voltage', 'not-a-number'],
     ['', 'voltage', 'not-a-number'],
     ['1,000,000 V', 'voltage', 'not-a-number'],
+    ['15,000 V', 'voltage', 'ambiguous-comma'],
+    ['1,013 bar(abs)', 'pressure', 'ambiguous-comma'],
     ['1e999 V', 'voltage', 'not-finite'],
     ['3 constructor', 'length', 'unit-unknown'],
   ])('refuses %j as %s: %s', (text, dimension, type) => {

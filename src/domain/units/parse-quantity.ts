@@ -20,8 +20,8 @@ interface Wanted {
 
 /**
  * Reads a typed quantity with its unit: "2,5 nF", "15kV", "0.125 in", "1.2 bar(g)", "50 psig", "760 Torr abs". Decimal point
- * or comma. A pressure must say gauge or absolute (psig and psia do); it is never guessed. Torr, atm and Pa without a word
- * are refused like bar.
+ * or comma; "15,000 V" is refused, since it can be read two ways. A pressure must say gauge or absolute (psig and psia
+ * do); it is never guessed. Torr, atm and Pa without a word are refused like bar.
  */
 export function parseWithUnit(text: string, { dimension, field, name }: Wanted): Result<ParsedQuantity> {
   const plain = text.replace(/[\u00a0\u2009\u202f]/g, ' ').trim();
@@ -61,16 +61,18 @@ function splitReference(text: string): {
   readonly unit: string;
   readonly reference: PressureReference | undefined;
 } {
-  const compact = text.toLowerCase().replace(/\s/g, '');
-  const found = /^(.*?)\(?(gauge|absolute|abs|g|a)\)?$/.exec(compact);
+  const compact = text.replace(/\s/g, '');
+  const found = /^(.*?)\(?(gauge|absolute|abs|g|a)\)?$/i.exec(compact);
   const unit = found?.[1] ?? '';
   // "pa" ends in a letter that is not a reference.
-  if (found === null || !Object.hasOwn(PLAIN_UNITS, unit)) return { unit: compact, reference: undefined };
-  return { unit, reference: (found[2] ?? '').startsWith('g') ? 'gauge' : 'absolute' };
+  if (found === null || !Object.hasOwn(PLAIN_UNITS, unit.toLowerCase()))
+    return { unit: compact, reference: undefined };
+  return { unit, reference: /^g/i.test(found[2] ?? '') ? 'gauge' : 'absolute' };
 }
 
 function sizeOf(unit: string, dimension: Dimension): number | undefined {
-  const lower = unit.toLowerCase();
+  // Lower case would make megapascal of millipascal.
+  const lower = unit === 'mPa' ? unit : unit.toLowerCase();
   const plain = Object.hasOwn(PLAIN_UNITS, lower) ? PLAIN_UNITS[lower] : undefined;
   if (plain !== undefined && plain.dimension === dimension) return plain.size;
   for (const [sign, of] of Object.entries(PREFIXED)) {

@@ -30,6 +30,7 @@ export const SI_PREFIXES: Readonly<Record<string, number>> = {
   k: 3,
   M: 6,
   G: 9,
+  T: 12,
 };
 
 /** Units that take a prefix, by sign. */
@@ -41,6 +42,7 @@ export const PREFIXED: Readonly<Record<string, Dimension>> = {
   '\u2126': 'resistance',
   '\u03a9': 'resistance',
   ohm: 'resistance',
+  Ohm: 'resistance',
   J: 'energy',
   W: 'power',
   s: 'time',
@@ -57,7 +59,9 @@ export const PLAIN_UNITS: Readonly<Record<string, { readonly dimension: Dimensio
     um: { dimension: 'length', size: 1e-3 },
     '\u00b5m': { dimension: 'length', size: 1e-3 },
     '\u03bcm': { dimension: 'length', size: 1e-3 },
+    nm: { dimension: 'length', size: 1e-6 },
     in: { dimension: 'length', size: 25.4 },
+    inch: { dimension: 'length', size: 25.4 },
     '"': { dimension: 'length', size: 25.4 },
     mil: { dimension: 'length', size: 0.0254 },
     thou: { dimension: 'length', size: 0.0254 },
@@ -66,9 +70,11 @@ export const PLAIN_UNITS: Readonly<Record<string, { readonly dimension: Dimensio
     pa: { dimension: 'pressure', size: 1e-5 },
     hpa: { dimension: 'pressure', size: 1e-3 },
     kpa: { dimension: 'pressure', size: 1 / KPA_PER_BAR },
+    mpa: { dimension: 'pressure', size: 10 },
     torr: { dimension: 'pressure', size: 1 / TORR_PER_BAR },
     mmhg: { dimension: 'pressure', size: 1 / TORR_PER_BAR },
     atm: { dimension: 'pressure', size: BAR_PER_ATM },
+    inhg: { dimension: 'pressure', size: 25.4 / TORR_PER_BAR },
     psi: { dimension: 'pressure', size: psiToBar(1) },
     min: { dimension: 'time', size: 60 },
     h: { dimension: 'time', size: 3600 },
