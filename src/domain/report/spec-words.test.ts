@@ -83,6 +83,77 @@ describe('words for a change of a rig', () => {
     for (const { field } of everything) expect(specFieldWords(field, 'lc-inversion').label).not.toBe(field);
   });
 
+  it('has words for what came with version 2, and for codes', () => {
+    const after: RigSpec = {
+      ...spec,
+      gap: {
+        ...spec.gap,
+        electrodes: 'hex-bars',
+        flats_mm: 12,
+        corner_mm: 1,
+        facing: 'edges',
+        rod_length_mm: 4,
+      },
+      first: {
+        kind: 'bank',
+        part: 'Ceramic',
+        capacitance_nF: 5,
+        rated_kV: 30,
+        parts: 5,
+        catalogue: 'polypropylene film',
+      },
+      channel: {
+        ...spec.channel,
+        profile: 'half round',
+        edge_mm: 2,
+        width_mm: 3,
+        flow_L_min: 4,
+        feeler_a_mm: 10,
+        feeler_b_mm: 230,
+        feeler_error_mm: 0.02,
+        screws: [{ name: 'A', position_mm: 20, pitch_mm: 0.5, lever: 1, closes: 'clockwise' }],
+      },
+      charging: { ...spec.charging, inductor_uH: 10, inductor_ohm: 1 },
+      beam: {
+        ...spec.beam,
+        pulse_ns: 5,
+        width_mm: 3,
+        height_mm: 20,
+        divergence_width_mrad: 2,
+        divergence_height_mrad: 10,
+        stop: 'Brick',
+      },
+      model: {
+        ...spec.model,
+        gap_law: {
+          law: 'rompe-weizel',
+          end_ohm: 0.1,
+          start_ohm: 100,
+          fall_ns: null,
+          constant_cm2_atm_V2s: 1,
+          known: 'assumed',
+        },
+        channel_law: { over_static: 1.3, end_ohm: 0.2, start_ohm: 100, fall_ns: 2, known: 'assumed' },
+      },
+    };
+    const found = specChanges(spec, after);
+    expect(found).toHaveLength(37);
+    for (const { field } of found) {
+      const { label } = specFieldWords(field, 'lc-inversion');
+      expect(label, field).toMatch(/^[A-Z]/);
+      expect(label, field).not.toMatch(/[._]/);
+    }
+    const said = changesIn(after);
+    expect(said).toContain('Gap electrodes: hexagonal bars, was domed');
+    expect(said).toContain('Beam stop: Brick, was none');
+    expect(said).toContain('Gap resistance law: after Rompe and Weizel, was not known');
+    expect(said).toContain('Screw 1, pitch: 0.5\u2009mm, was not known');
+  });
+
+  it('says none where a thing was taken out', () => {
+    expect(changesIn({ ...spec, shorting_points: [] })).toEqual(['Shorting point 1: none, was C1']);
+  });
+
   it('keeps the name of a field that a newer app added', () => {
     expect(specFieldWords('gap.trigger', 'lc-inversion')).toEqual({ label: 'gap.trigger', unit: '' });
   });

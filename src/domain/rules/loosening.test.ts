@@ -52,7 +52,48 @@ describe('what a revision loosens', () => {
     expect(specChanges(spec, after)).toEqual([
       { field: 'gap.gap_mm', before: 3, after: 3.2, safety: true, loosens: false },
       { field: 'gap.irradiated', before: 'no', after: 'yes', safety: true, loosens: false },
-      { field: 'beam.pulse_energy_uJ', before: 150, after: 200, safety: false, loosens: false },
+      // The eyewear is asked for by it.
+      { field: 'beam.pulse_energy_uJ', before: 150, after: 200, safety: true, loosens: false },
+    ]);
+  });
+
+  it('knows what no permit leans on', () => {
+    const screw = { name: 'A', position_mm: 0, pitch_mm: 0.5, lever: 1, closes: 'clockwise' } as const;
+    const with_screw: RigSpec = { ...spec, channel: { ...spec.channel, screws: [screw] } };
+    const turned = { ...screw, closes: 'anticlockwise' } as const;
+    const after: RigSpec = {
+      ...with_screw,
+      gap: { ...spec.gap, radius_known: 'assumed' },
+      channel: { ...spec.channel, screws: [turned], profile: 'half round', feeler_a_mm: 10 },
+      beam: { ...spec.beam, stop: 'Brick' },
+    };
+    expect(specChanges(with_screw, after).map(({ field, safety }) => [field, safety])).toEqual([
+      ['gap.radius_known', false],
+      ['channel.screws.0.closes', false],
+      ['channel.profile', false],
+      ['channel.feeler_a_mm', false],
+      ['beam.stop', true],
+    ]);
+    expect(isLoosening(after, with_screw)).toBe(true);
+  });
+
+  it('holds a list against the names before it: taking the first out is one change', () => {
+    const three: RigSpec = { ...spec, shorting_points: ['dump', 'peaking', 'gap node'] };
+    const two: RigSpec = { ...spec, shorting_points: ['peaking', 'gap node'] };
+    expect(specChanges(three, two)).toEqual([
+      { field: 'shorting_points.0', before: 'dump', after: null, safety: true, loosens: true },
+    ]);
+    expect(specChanges(three, { ...spec, shorting_points: ['gap node', 'dump', 'peaking'] })).toEqual([]);
+    expect(specChanges(two, three)).toEqual([
+      { field: 'shorting_points.2', before: null, after: 'dump', safety: true, loosens: false },
+    ]);
+  });
+
+  it('never hides a bleed that went behind a new name', () => {
+    const renamed: RigSpec = { ...spec, nodes: [{ name: 'C1', holds: 'first', bleed_Mohm: null }] };
+    expect(specChanges(spec, renamed)).toEqual([
+      { field: 'nodes.0.name', before: 'dump capacitor', after: 'C1', safety: true, loosens: false },
+      { field: 'nodes.0.bleed_Mohm', before: 400, after: null, safety: true, loosens: true },
     ]);
   });
 });
