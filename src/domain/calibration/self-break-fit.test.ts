@@ -2,7 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { testDrift } from './drift';
 import { rigLaw, type RigGap } from './rig-law';
-import { calibratedSelfBreak, fitSelfBreak, type SelfBreakReading } from './self-break-fit';
+import type { SelfBreakReading } from './fit-kept';
+import { calibratedSelfBreak, fitSelfBreak } from './self-break-fit';
 
 const RIG: RigGap = { gas: 'air', electrodes: { shape: 'sphere', radius_mm: 12 }, irradiated: true };
 
