@@ -85,7 +85,7 @@ function choose(field: string, name: string, what: string): Refusal {
   return { type: 'unknown-choice', field, words: `${name}: ${what}.` };
 }
 
-function answer(values: Values): Result<LookupAnswer> {
+function answer(values: Values, wants = { plot: true }): Result<LookupAnswer> {
   const setup = gapSetupAt(values);
   if (!setup.ok) return named(setup);
   const ambient = ambientAt(values);
@@ -98,7 +98,8 @@ function answer(values: Values): Result<LookupAnswer> {
   if (!broken.ok) return named(broken);
   const held = heldAt(values, broken.value);
   if (!held.ok) return held;
-  return ok(answerOf({ values, input, ambient_bar_abs: ambient.value, gap: broken.value, held: held.value }));
+  const parts = { values, input, ambient_bar_abs: ambient.value, gap: broken.value, held: held.value };
+  return ok(answerOf(parts, wants));
 }
 
 interface Parts {
@@ -109,7 +110,8 @@ interface Parts {
   readonly held: WorkingPoint | null;
 }
 
-function answerOf({ values, input, ambient_bar_abs, gap, held }: Parts): LookupAnswer {
+function answerOf(parts: Parts, wants: { readonly plot: boolean }): LookupAnswer {
+  const { values, input, ambient_bar_abs, gap, held } = parts;
   const charging = chargingAt(values);
   const reachable = charging === null ? null : reachableVoltage(charging);
   const reach = charging === null ? null : supplyReach(charging, gap);
@@ -124,7 +126,7 @@ function answerOf({ values, input, ambient_bar_abs, gap, held }: Parts): LookupA
       'With a person near, no gas gap is a barrier.',
     ],
     lean: 'high',
-    plot: gapPlot({ values, input, ambient_bar_abs, gap, reachable_kV }),
+    ...(wants.plot ? { plot: gapPlot({ values, input, ambient_bar_abs, gap, reachable_kV }) } : {}),
   };
 }
 

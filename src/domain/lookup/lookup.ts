@@ -190,8 +190,11 @@ export interface Lookup {
   readonly start: (from: StartFrom) => Start;
   /** Key of the field that is chosen first; the first number otherwise. */
   readonly first?: string;
-  /** Pure and total: any value of any field gives an answer or a refusal in words, never a throw and never a NaN. */
-  readonly answer: (values: Values) => Result<LookupAnswer>;
+  /**
+   * Pure and total: any value of any field gives an answer or a refusal in words, never a throw and never a NaN. A search or a
+   * sweep wants no plot; a lookup whose plot takes time leaves it out then.
+   */
+  readonly answer: (values: Values, wants?: { readonly plot: boolean }) => Result<LookupAnswer>;
   readonly solvable: readonly Solvable[];
   /** Takes longer than a frame: screens ask a worker. */
   readonly slow?: true;
