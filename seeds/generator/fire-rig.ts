@@ -2,7 +2,7 @@ import type { ReadingValues } from '../../src/domain/book/bodies/firing-bodies';
 import { latestRevision } from '../../src/domain/book/documents/rig';
 import { firingNumber } from '../../src/domain/book/ids';
 import { missingToFire, standingPermit } from '../../src/domain/rules/readiness';
-import { BENCH_TABLET, type DemoTablet } from '../lab';
+import { BENCH_TABLET, DEMO_LAB, type DemoTablet } from '../lab';
 import { ADA, MILO } from '../people';
 import type { DemoRig } from '../rigs/demo-rig';
 import { DEMO_SHEETS } from '../sheets/demo-sheets';
@@ -100,6 +100,7 @@ function unreadyNote(bench: Bench, { rig, tablet, by, why }: Opening & { readonl
   const missing = missingToFire({
     rig: rigDoc(bench, rig),
     person: bench.book.doc('person', by),
+    lab: bench.book.doc('lab', DEMO_LAB.id),
     device: tablet.id,
     stamp,
     now_ms: bench.now(),

@@ -13,7 +13,7 @@ import { declaredView } from '../../src/domain/rules/declared-view';
 import { checkLapse } from '../../src/domain/rules/check-validity';
 import { missingToFire, standingPermit } from '../../src/domain/rules/readiness';
 import { readingPlausibility } from '../../src/domain/rules/rig-gap';
-import { BENCH_TABLET } from '../lab';
+import { BENCH_TABLET, DEMO_LAB } from '../lab';
 import { must } from '../must';
 import { ADA, MILO } from '../people';
 import { HERON } from '../rigs/heron';
@@ -250,16 +250,17 @@ describe('where the month leaves the lab', () => {
     }
   });
 
-  it('keeps only the check between Ada or Milo and firing Kettle on a fresh tablet', () => {
+  it('keeps only the check, with its second person, between Ada or Milo and firing Kettle on a fresh tablet', () => {
     for (const { id } of [ADA, MILO]) {
       const missing = missingToFire({
         ...freshTablet,
         rig: rig(KETTLE.id),
         person: month.book.doc('person', id),
+        lab: month.book.doc('lab', DEMO_LAB.id),
         now_ms: NOW_MS,
         filling: false,
       });
-      expect(missing.map(({ code }) => code)).toEqual(['check-made-safe']);
+      expect(missing.map(({ code }) => code)).toEqual(['check-made-safe', 'working-alone']);
     }
   });
 

@@ -77,7 +77,7 @@ function rigOf(
 function idsBehind(doc: Document): readonly string[] {
   const parent = doc.parent === null ? [] : [doc.parent];
   if (doc.kind === 'check') return [...parent, doc.sheet];
-  if (doc.kind === 'correction') return [...parent, doc.reading];
+  if (doc.kind === 'correction') return [...parent, doc.corrected];
   if (doc.kind === 'held') return [...parent, ...idsOf(doc.entry)];
   return parent;
 }

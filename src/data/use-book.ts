@@ -1,14 +1,18 @@
 import { useMemo, useSyncExternalStore } from 'react';
+import type { AlignmentDoc } from '../domain/book/documents/alignment';
 import type { CheckDoc } from '../domain/book/documents/check';
 import type { DocKind, DocOf } from '../domain/book/documents/document';
 import type { FiringDoc } from '../domain/book/documents/firing';
 import type { HeldDoc } from '../domain/book/documents/held';
 import type { IncidentDoc } from '../domain/book/documents/incident';
+import type { KitDoc } from '../domain/book/documents/kit';
 import type { LabDoc } from '../domain/book/documents/lab';
 import type { LookupDoc } from '../domain/book/documents/lookup';
+import type { NoteDoc, PhotoDoc, TraceDoc } from '../domain/book/documents/note';
+import type { PartDoc } from '../domain/book/documents/part';
 import type { PersonDoc } from '../domain/book/documents/person';
 import type { ReadingDoc } from '../domain/book/documents/reading';
-import type { RigDoc } from '../domain/book/documents/rig';
+import type { Guest, RigDoc } from '../domain/book/documents/rig';
 import type { SheetDoc } from '../domain/book/documents/sheet';
 import type { Trace } from '../domain/book/documents/trace';
 import { listenToNothing, useMaybeLab } from './client-context';
@@ -82,6 +86,66 @@ export function useIncidents(rig: string): readonly IncidentDoc[] {
 export function useLookups(rig: string): readonly LookupDoc[] {
   const { documents } = useChildren('lookup', rig);
   return useMemo(() => documents.toSorted((a, b) => newestFirst(a.trace, b.trace)), [documents]);
+}
+
+/** The register without what was taken out of it, by number. */
+export function useKit(): readonly KitDoc[] {
+  const kit = useList('kit');
+  return useMemo(
+    () =>
+      kit
+        .filter((one) => one.state !== 'retired')
+        .sort((a, b) => a.number.localeCompare(b.number, 'en', { numeric: true })),
+    [kit],
+  );
+}
+
+/** Parts of a rig, retired ones too, newest first. */
+export function useParts(rig: string): readonly PartDoc[] {
+  const { documents } = useChildren('part', rig);
+  return useMemo(() => documents.toSorted((a, b) => newestFirst(a.trace, b.trace)), [documents]);
+}
+
+export interface AlignmentHistory {
+  readonly state: 'loading' | 'ready';
+  /** Oldest first, struck ones too. */
+  readonly steps: readonly AlignmentDoc[];
+}
+
+export function useAlignment(rig: string): AlignmentHistory {
+  const { state, documents } = useChildren('alignment', rig);
+  return useMemo(
+    () => ({ state, steps: documents.toSorted((a, b) => -newestFirst(a.logged, b.logged)) }),
+    [state, documents],
+  );
+}
+
+/** Who is checked in at a rig. */
+export function useGuests(rig: string): readonly Guest[] {
+  return useRig(rig)?.guests ?? NONE;
+}
+
+export interface Attached {
+  readonly state: 'loading' | 'ready';
+  readonly notes: readonly NoteDoc[];
+  readonly photos: readonly PhotoDoc[];
+  readonly traces: readonly TraceDoc[];
+}
+
+/** Notes, photos and traces about one thing, newest first, struck ones too. */
+export function useNotes(about: string): Attached {
+  const notes = useChildren('note', about);
+  const photos = useChildren('photo', about);
+  const traces = useChildren('trace', about);
+  return useMemo(
+    () => ({
+      state: [notes, photos, traces].every((one) => one.state === 'ready') ? 'ready' : 'loading',
+      notes: notes.documents.toSorted((a, b) => newestFirst(written(a), written(b))),
+      photos: photos.documents.toSorted((a, b) => newestFirst(a.attached, b.attached)),
+      traces: traces.documents.toSorted((a, b) => newestFirst(a.attached, b.attached)),
+    }),
+    [notes, photos, traces],
+  );
 }
 
 export function usePerson(id: string | null): PersonDoc | undefined {
@@ -197,4 +261,10 @@ function newestFirst(a: Trace, b: Trace): number {
   if (a.at !== null && b.at !== null) return b.at - a.at;
   if (a.at === null && b.at === null) return b.stamp.wall_ms - a.stamp.wall_ms;
   return a.at === null ? -1 : 1;
+}
+
+function written(note: NoteDoc): Trace {
+  const [first] = note.versions;
+  if (first === undefined) throw new Error(`note ${note.id} has no version`);
+  return first;
 }

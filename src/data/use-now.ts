@@ -3,7 +3,7 @@ import type { Stamp } from '../domain/book/stamp';
 import { declaredView, type DeclaredView } from '../domain/rules/declared-view';
 import { missingToFire, type Missing } from '../domain/rules/readiness';
 import { useClient, useMaybeLab } from './client-context';
-import { useBookState, useFiring, usePerson, useRig } from './use-book';
+import { useBookState, useFiring, useLab, usePerson, useRig } from './use-book';
 import { useSession } from './use-session';
 
 export interface Now {
@@ -35,14 +35,15 @@ export function useReadiness(rig: string): readonly Missing[] | undefined {
   const doc = useRig(rig);
   const session = useSession();
   const person = usePerson(session.state === 'open' ? session.person.id : null);
+  const lab = useLab();
   const { device, filling } = useBookState();
   const { stamp, best_ms } = useNow();
   return useMemo(
     () =>
       doc === undefined
         ? undefined
-        : missingToFire({ rig: doc, person, device, stamp, now_ms: best_ms, filling }),
-    [doc, person, device, stamp, best_ms, filling],
+        : missingToFire({ rig: doc, person, lab, device, stamp, now_ms: best_ms, filling }),
+    [doc, person, lab, device, stamp, best_ms, filling],
   );
 }
 

@@ -3,7 +3,15 @@ import { versionOf, type BodyOf, type Kind } from '../../domain/book/kinds';
 import { checkBody } from '../../domain/book/read-body';
 
 /** Entries that are their own subject. */
-type OwnSubject = 'rig.created' | 'sheet.published' | 'check.opened' | 'firing.opened';
+type OwnSubject =
+  | 'rig.created'
+  | 'sheet.published'
+  | 'check.opened'
+  | 'firing.opened'
+  | 'kit.added'
+  | 'note.written'
+  | 'photo.attached'
+  | 'trace.attached';
 /** Kinds whose running number is taken in the transaction that appends them (protocol 1.5). */
 type Numbered = 'firing.opened' | 'rig.created' | 'rig.revised';
 
@@ -46,6 +54,10 @@ const ITS_OWN_SUBJECT: ReadonlySet<Kind> = new Set<OwnSubject>([
   'sheet.published',
   'check.opened',
   'firing.opened',
+  'kit.added',
+  'note.written',
+  'photo.attached',
+  'trace.attached',
 ]);
 /** Room for the salt and the longest number. */
 const ENVELOPE_CHARS = 100;

@@ -1,7 +1,16 @@
 import { docKey, type DocKind, type DocOf, type Document } from '../../domain/book/documents/document';
 
 /** Kinds of which there are thousands: they are loaded by parent when somebody looks, and not at the start. */
-const COLD: ReadonlySet<DocKind> = new Set(['reading', 'correction', 'claim', 'lookup']);
+const COLD: ReadonlySet<DocKind> = new Set([
+  'reading',
+  'correction',
+  'claim',
+  'lookup',
+  'alignment',
+  'note',
+  'photo',
+  'trace',
+]);
 export const HOT_KINDS: readonly DocKind[] = [
   'lab',
   'crew',
@@ -11,6 +20,8 @@ export const HOT_KINDS: readonly DocKind[] = [
   'check',
   'firing',
   'incident',
+  'part',
+  'kit',
   'held',
 ];
 

@@ -1,3 +1,4 @@
+import { foldAlignment } from './documents/alignment';
 import { foldCheck } from './documents/check';
 import { foldClaim } from './documents/claim';
 import { getDoc, type Effect } from './documents/effect';
@@ -5,8 +6,11 @@ import { foldCorrection, foldStrike } from './documents/entries-about-entries';
 import { foldFiring } from './documents/firing';
 import { holdBack, markHeld } from './documents/held';
 import { foldIncident } from './documents/incident';
+import { foldKit } from './documents/kit';
 import { foldLab } from './documents/lab';
 import { foldLookup } from './documents/lookup';
+import { foldNote, settleNote } from './documents/note';
+import { foldPart } from './documents/part';
 import { foldPerson } from './documents/person';
 import { foldRig, updateRig } from './documents/rig';
 import { foldSheet } from './documents/sheet';
@@ -15,7 +19,7 @@ import type { Reason, SealedEntry, Verdict } from './entry';
 import { readEntry, type EntryOf, type ReadableEntry } from './read-body';
 
 /** Raised whenever a fold gives other documents from the same entries: every store then refolds (protocol 1.9). */
-export const FOLD_VERSION = 1;
+export const FOLD_VERSION = 2;
 
 export interface Judgement {
   readonly verdict: Verdict;
@@ -83,6 +87,25 @@ export function* foldReadable(entry: ReadableEntry, standing: Standing): Effect 
       return yield* foldClaim(entry, standing);
     case 'lookup.kept':
       return yield* foldLookup(entry, standing);
+    case 'part.fitted':
+    case 'part.retired':
+      return yield* foldPart(entry, standing);
+    case 'kit.added':
+    case 'kit.inspected':
+    case 'kit.issued':
+    case 'kit.returned':
+      return yield* foldKit(entry, standing);
+    case 'alignment.measured':
+    case 'alignment.adjusted':
+    case 'alignment.arc-seen':
+      return yield* foldAlignment(entry, standing);
+    case 'note.written':
+    case 'note.amended':
+    case 'photo.attached':
+    case 'trace.attached':
+      return yield* foldNote(entry, standing);
+    case 'parting.settled':
+      return (yield* settleNote(entry)) ? undefined : yield* foldRig(entry, standing);
     case 'noise.counted':
       return;
     default:

@@ -1,11 +1,26 @@
 import type * as z from 'zod/mini';
+import { alignmentBodies } from './bodies/alignment-bodies';
 import { bookBodies } from './bodies/book-bodies';
 import { checkBodies } from './bodies/check-bodies';
 import { firingBodies } from './bodies/firing-bodies';
+import { guestBodies } from './bodies/guest-bodies';
+import { kitBodies, partBodies } from './bodies/kit-bodies';
+import { noteBodies } from './bodies/note-bodies';
 import { peopleBodies } from './bodies/people-bodies';
 import { rigBodies } from './bodies/rig-bodies';
 
-const bodies = { ...rigBodies, ...checkBodies, ...firingBodies, ...peopleBodies, ...bookBodies } as const;
+const bodies = {
+  ...rigBodies,
+  ...partBodies,
+  ...alignmentBodies,
+  ...guestBodies,
+  ...checkBodies,
+  ...firingBodies,
+  ...noteBodies,
+  ...kitBodies,
+  ...peopleBodies,
+  ...bookBodies,
+} as const;
 
 export type Kind = keyof typeof bodies;
 export type BodyOf<K extends Kind> = z.infer<(typeof bodies)[K]>;
@@ -15,6 +30,8 @@ const WRITTEN_VERSION: Partial<Record<Kind, number>> = {
   // 2: screws, laws of gap and channel, shapes of rods and bars, size of the beam. All may be left out, so 1 reads as 2.
   'rig.created': 2,
   'rig.revised': 2,
+  // 2: kit that the step names, such as the eyewear put on. May be left out, so 1 reads as 2.
+  'check.step-done': 2,
 };
 
 export const KINDS = Object.keys(bodies) as readonly Kind[];

@@ -4,6 +4,7 @@ import { readEntry, type ReadableEntry } from '../book/read-body';
 import { formatQuantity } from '../units/format-quantity';
 import { envelopeWords } from './permit-words';
 import { dayWords } from './time-words';
+import { alignmentWords, kitWords, partWords } from './kit-words';
 import { LOOK_WORDS, ROLE_WORDS } from './words';
 
 /** What each kind of entry is called where entries stand in a list. */
@@ -17,6 +18,21 @@ export const KIND_WORDS: Readonly<Record<Kind, string>> = {
   'hands.in': 'Hands in',
   'hands.out': 'Hands out',
   'gas.changed': 'Gas changed',
+  'guest.in': 'Guest in',
+  'guest.out': 'Guest out',
+  'part.fitted': 'Part fitted',
+  'part.retired': 'Part retired',
+  'alignment.measured': 'Gaps measured',
+  'alignment.adjusted': 'Screws turned',
+  'alignment.arc-seen': 'Arcs seen',
+  'kit.added': 'Kit added',
+  'kit.inspected': 'Kit inspected',
+  'kit.issued': 'Kit issued',
+  'kit.returned': 'Kit returned',
+  'note.written': 'Note written',
+  'note.amended': 'Note amended',
+  'photo.attached': 'Photo attached',
+  'trace.attached': 'Trace attached',
   'permit.asked': 'Permit asked',
   'permit.granted': 'Permit granted',
   'permit.withdrawn': 'Permit withdrawn',
@@ -111,6 +127,23 @@ function substance(entry: ReadableEntry, zone: string): string {
       return `${entry.body.name}, ${ROLE_WORDS[entry.body.role]}`;
     case 'person.role-set':
       return ROLE_WORDS[entry.body.role];
+    case 'part.fitted':
+      return partWords(entry.body);
+    case 'kit.added':
+    case 'kit.inspected':
+    case 'kit.issued':
+    case 'kit.returned':
+      return kitWords(entry, zone);
+    case 'alignment.measured':
+    case 'alignment.adjusted':
+    case 'alignment.arc-seen':
+      return alignmentWords(entry);
+    case 'guest.in':
+      return entry.body.name;
+    case 'photo.attached':
+      return entry.body.caption === '' ? entry.body.name : entry.body.caption;
+    case 'trace.attached':
+      return entry.body.name;
     case 'noise.counted':
       return `${plain(entry.body.touches_ignored, '')} touches`;
     default:

@@ -48,10 +48,12 @@ function* openingObjection(entry: EntryOf<'firing.opened'>, context: JudgeContex
   // Recorded as unready: it says itself what was missing, and the reviewer sees it as such.
   if (unready !== null) return null;
   const person = entry.meta.author === null ? undefined : yield* getDoc('person', entry.meta.author);
+  const lab = yield* getDoc('lab', entry.meta.lab);
   const { device, stamp } = entry.meta;
   const [first] = missingToFire({
     rig: rigDoc,
     person,
+    lab,
     device,
     stamp,
     now_ms: momentOf(stamp, context),

@@ -10,6 +10,7 @@ import {
 import type { EntryOf } from '../book/read-body';
 import { elapsedMs, type StampPoint } from '../book/stamp';
 import { anotherReviewerExists, type JudgeContext } from './judge-context';
+import { noteParting } from './judge-notes';
 import { objection, type Objection } from './objection';
 
 /** How long an accidental stand-down may be taken back by its author, in the same page life (protocol 1.4). */
@@ -32,6 +33,8 @@ type RigEntry = EntryOf<
   | 'rig.returned'
   | 'hands.in'
   | 'hands.out'
+  | 'guest.in'
+  | 'guest.out'
   | 'gas.changed'
   | 'permit.asked'
   | 'permit.granted'
@@ -44,6 +47,10 @@ export function* rigObjection(entry: RigEntry, context: JudgeContext): Effect<Ob
     return entry.meta.subject === entry.meta.id
       ? null
       : objection('subject', 'A new rig is its own subject.');
+  }
+  if (entry.kind === 'parting.settled') {
+    const ofNote = yield* noteParting(entry);
+    if (ofNote !== 'not-a-note') return ofNote;
   }
   const rig = yield* getDoc('rig', entry.meta.subject);
   if (rig === undefined) return objection('unknown-rig', 'This rig is not in the Book.');
@@ -60,6 +67,12 @@ export function* rigObjection(entry: RigEntry, context: JudgeContext): Effect<Ob
       return rig.hands.some((tag) => tag.entry === entry.body.tag)
         ? null
         : objection('unknown-tag', 'This hands-in tag is not on the rig.');
+    case 'guest.in':
+      return yield* guestObjection(entry);
+    case 'guest.out':
+      return rig.guests.some((guest) => guest.entry === entry.body.guest)
+        ? null
+        : objection('unknown-guest', 'This guest is not at the rig.');
     case 'permit.asked':
       return headObjection(rig, entry.body.rig_revision);
     case 'permit.granted':
@@ -73,6 +86,15 @@ export function* rigObjection(entry: RigEntry, context: JudgeContext): Effect<Ob
     default:
       return null;
   }
+}
+
+function* guestObjection(entry: EntryOf<'guest.in'>): Effect<Objection | null> {
+  const { person } = entry.body;
+  if (person === null) return null;
+  if (person === entry.meta.author) return objection('own-company', 'Nobody keeps themselves company.');
+  return (yield* getDoc('person', person)) === undefined
+    ? objection('unknown-person', 'This person is not in the Book.')
+    : null;
 }
 
 function* grantObjection(

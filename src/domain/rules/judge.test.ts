@@ -34,13 +34,15 @@ describe('observations and acts', () => {
     );
   });
 
-  it('lets a reader append nothing but what anybody may: stand down, report, claim, keep a lookup', () => {
+  it('lets a reader append nothing but what anybody may: stand down, report and show, claim, keep a lookup', () => {
     const may = KINDS.filter((kind) => mayAppend('reader', kind)).toSorted();
     expect(may).toEqual([
       'entry.claimed',
       'incident.reported',
       'lookup.kept',
       'noise.counted',
+      'note.written',
+      'photo.attached',
       'rig.stand-down-retracted',
       'rig.stood-down',
     ]);

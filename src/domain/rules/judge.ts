@@ -8,6 +8,9 @@ import { bookObjection } from './judge-book';
 import { checkObjection } from './judge-checks';
 import { firingObjection } from './judge-firings';
 import { incidentObjection } from './judge-incidents';
+import { kitObjection } from './judge-kit';
+import { noteObjection } from './judge-notes';
+import { partObjection } from './judge-parts';
 import { peopleObjection } from './judge-people';
 import { rigObjection } from './judge-rigs';
 import type { Judged, JudgeContext } from './judge-context';
@@ -130,6 +133,22 @@ function* kindObjection(entry: ReadableEntry, context: JudgeContext): Effect<Obj
     case 'entry.struck':
     case 'entry.claimed':
       return yield* bookObjection(entry);
+    case 'part.fitted':
+    case 'part.retired':
+    case 'alignment.measured':
+    case 'alignment.adjusted':
+    case 'alignment.arc-seen':
+      return yield* partObjection(entry);
+    case 'kit.added':
+    case 'kit.inspected':
+    case 'kit.issued':
+    case 'kit.returned':
+      return yield* kitObjection(entry, context);
+    case 'note.written':
+    case 'note.amended':
+    case 'photo.attached':
+    case 'trace.attached':
+      return yield* noteObjection(entry);
     case 'lookup.kept':
     case 'noise.counted':
       return null;

@@ -19,6 +19,7 @@ function missing(bench: PureBench, more: Partial<ReadinessInput> = {}) {
   return missingToFire({
     rig: bench.book.doc('rig', bench.rig),
     person: bench.book.doc('person', ADA),
+    lab: undefined,
     device: TABLET_A,
     stamp: at(1),
     now_ms: MORNING_MS + 60_000,

@@ -1,7 +1,11 @@
+import type { KitNote } from '../book/documents/kit';
+import type { LabDoc } from '../book/documents/lab';
 import type { PersonDoc } from '../book/documents/person';
 import { latestRevision, unliftedStandDowns, type Permit, type RigDoc } from '../book/documents/rig';
 import type { StampPoint } from '../book/stamp';
 import { checkLapse } from './check-validity';
+import { hasCompany } from './company';
+import { kitFault } from './kit-fitness';
 import { isRole } from './roles';
 
 export type Mender = 'you' | 'reviewer' | 'lead' | 'whoever has hands in' | 'a newer app';
@@ -18,6 +22,8 @@ export interface Missing {
 export interface ReadinessInput {
   readonly rig: RigDoc;
   readonly person: PersonDoc | undefined;
+  /** Whose settings say whether somebody may work alone. */
+  readonly lab: LabDoc | undefined;
   readonly device: string;
   /** Now, or the moment that the entry was written. */
   readonly stamp: StampPoint;
@@ -37,6 +43,8 @@ export function missingToFire(input: ReadinessInput): readonly Missing[] {
       ? [missing('parting', 'Two revisions of this rig stand against each other.', 'reviewer')]
       : missingPermit(input)),
     ...missingCheck(input),
+    ...missingKit(input),
+    ...missingCompany(input),
   ];
 }
 
@@ -108,6 +116,34 @@ function missingPermit({ rig, now_ms }: ReadinessInput): Missing[] {
 function missingCheck({ rig, device, stamp }: ReadinessInput): Missing[] {
   const lapse = checkLapse(rig, device, stamp);
   return lapse === null ? [] : [since(missing(lapse.code, lapse.words, 'you'), lapse.since)];
+}
+
+/** Kit that stays with the rig, that the person holds, or that the standing check named. */
+function missingKit({ rig, person, now_ms }: ReadinessInput): Missing[] {
+  const held = person?.kit ?? [];
+  const known = new Set([...rig.kit, ...held].map((note) => note.kit));
+  const named = (rig.ready_check?.kit ?? []).filter((note) => !known.has(note.kit));
+  return [
+    ...rig.kit.map((note) => kitWords(note, now_ms, 'which stays with this rig')),
+    ...held.map((note) => kitWords(note, now_ms, 'which you hold')),
+    ...named.map((note) => kitWords(note, now_ms, 'which the check names')),
+  ].filter((one) => one !== null);
+}
+
+function kitWords(note: KitNote, now_ms: number, where: string): Missing | null {
+  const fault = kitFault(note, now_ms);
+  if (fault === null) return null;
+  const what = `${note.name} ${note.number}, ${where},`;
+  return fault === 'failed'
+    ? missing('kit-failed', `${what} did not pass and must not be relied on.`, 'you')
+    : missing('kit-expired', `${what} is past its inspection or calibration date.`, 'you');
+}
+
+function missingCompany({ rig, person, lab, device, stamp }: ReadinessInput): Missing[] {
+  if (lab?.settings.working_alone !== 'forbidden' || person === undefined) return [];
+  if (hasCompany(rig, person.id, { device, stamp })) return [];
+  const words = 'This lab forbids working alone: have a second person in the check, or check somebody in.';
+  return [missing('working-alone', words, 'you')];
 }
 
 function permitsOfHead(rig: RigDoc): readonly Permit[] {

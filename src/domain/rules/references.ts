@@ -15,6 +15,28 @@ function idsInBody(entry: ReadableEntry): readonly string[] {
       return entry.body.lifts;
     case 'hands.out':
       return [entry.body.tag];
+    case 'guest.out':
+      return [entry.body.guest];
+    case 'part.fitted':
+      return entry.body.replaces === null ? [] : [entry.body.replaces];
+    case 'part.retired':
+      return [entry.body.part];
+    case 'alignment.measured':
+    case 'alignment.arc-seen':
+      return [entry.body.rig_revision];
+    case 'alignment.adjusted':
+      return [entry.body.rig_revision, entry.body.based_on].filter((id) => id !== null);
+    case 'kit.issued':
+      return [entry.body.to.id];
+    case 'note.written':
+    case 'photo.attached':
+      return [entry.body.about.id];
+    case 'note.amended':
+      return [entry.body.based_on];
+    case 'trace.attached':
+      return [entry.body.about.id, entry.body.reading].filter((id) => id !== null);
+    case 'check.step-done':
+      return entry.body.kit ?? [];
     case 'permit.asked':
     case 'permit.granted':
       return [entry.body.rig_revision];

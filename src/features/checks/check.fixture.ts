@@ -72,6 +72,8 @@ export const RIG: RigDoc = {
   last_short: null,
   stand_downs: [],
   hands: [],
+  guests: [],
+  kit: [],
   permits: [
     {
       ...trace('permit'),
@@ -88,6 +90,8 @@ export const RIG: RigDoc = {
     closed: trace('closing', 10),
     active: trace('closing', 10).stamp,
     voided: null,
+    present: [],
+    kit: [],
   },
   open_checks: [],
   open_firings: [],
@@ -116,6 +120,7 @@ export function stepRecord(parts: Partial<StepRecord>): StepRecord {
     result: null,
     words: '',
     witness: null,
+    kit: [],
     irregular: null,
     ...parts,
   };

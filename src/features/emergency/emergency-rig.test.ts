@@ -13,6 +13,8 @@ const rig = (id: string, open_firings: readonly string[] = []): RigDoc => ({
   last_short: null,
   stand_downs: [],
   hands: [],
+  guests: [],
+  kit: [],
   permits: [],
   permits_asked: [],
   ready_check: null,

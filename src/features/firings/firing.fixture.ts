@@ -134,6 +134,8 @@ export const RIG: RigDoc = {
   last_short: null,
   stand_downs: [],
   hands: [],
+  guests: [],
+  kit: [],
   permits: [
     {
       ...trace(IDS.permit),

@@ -10,6 +10,8 @@ const ready_check = {
   closed: trace('check'),
   active: trace('check').stamp,
   voided: null,
+  present: [],
+  kit: [],
 };
 const rig = { ...RIG, ready_check };
 const missing = (code: string): Missing => ({

@@ -81,6 +81,8 @@ describe('revising a rig', () => {
       closed: revision,
       active: revision.stamp,
       voided: null,
+      present: [],
+      kit: [],
     };
     const rig = { ...HERON_RIG, permits: [permit], ready_check };
     expect(voidedBy(rig, 500)).toEqual({ permit, check: true, parting: false });

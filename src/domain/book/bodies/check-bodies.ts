@@ -32,7 +32,13 @@ export const checkBodies = {
   'sheet.retired': z.object({ why: words }),
   /** Pins the sheet and the rig revision that it was opened on (protocol 1.5). */
   'check.opened': z.object({ rig: uuid, rig_revision: uuid, sheet: uuid }),
-  'check.step-done': z.object({ step: stepKey, result: stepResultSchema, note: optionalWords }),
+  'check.step-done': z.object({
+    step: stepKey,
+    result: stepResultSchema,
+    note: optionalWords,
+    /** Pieces of the register that the step was done with: eyewear put on, the stick, the meter. */
+    kit: z.optional(z.array(uuid).check(z.maxLength(20))),
+  }),
   'check.step-waived': z.object({ step: stepKey, why: words }),
   'check.closed': z.object({}),
   'check.abandoned': z.object({ why: words }),

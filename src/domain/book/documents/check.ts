@@ -2,6 +2,7 @@ import type { StepResult } from '../bodies/check-bodies';
 import type { EntryOf } from '../read-body';
 import type { SheetSpec } from '../sheet-spec';
 import { getDoc, putDoc, type Effect } from './effect';
+import { kitNote, type KitNote } from './kit';
 import { declare, updateRig } from './rig';
 import { traceOf, type Standing, type Trace } from './trace';
 
@@ -10,6 +11,8 @@ export interface StepRecord extends Trace {
   readonly result: StepResult | null;
   readonly words: string;
   readonly witness: string | null;
+  /** Pieces of the register that the step named. */
+  readonly kit: readonly string[];
   readonly irregular: string | null;
 }
 
@@ -52,6 +55,7 @@ export function* foldCheck(entry: CheckEntry, standing: Standing): Effect {
           state: 'done',
           result: entry.body.result,
           words: entry.body.note,
+          kit: entry.body.kit ?? [],
           ...seen(entry, standing),
         }),
       );
@@ -63,6 +67,7 @@ export function* foldCheck(entry: CheckEntry, standing: Standing): Effect {
           state: 'waived',
           result: null,
           words: entry.body.why,
+          kit: [],
           ...seen(entry, standing),
         }),
       );
@@ -110,6 +115,7 @@ function* openCheck(entry: EntryOf<'check.opened'>, trace: Trace): Effect {
 function* closeCheck(check: CheckDoc, trace: Trace, standing: Standing): Effect {
   if (check.ended !== null) return;
   yield* putDoc({ ...check, ended: { ...trace, how: 'closed', irregular: standing.irregular, words: '' } });
+  const kit = yield* namedKit(check);
   yield* updateRig(check.parent, (rig) => {
     const without = { ...rig, open_checks: rig.open_checks.filter((id) => id !== check.id) };
     if (check.purpose === 'make-safe')
@@ -122,9 +128,27 @@ function* closeCheck(check: CheckDoc, trace: Trace, standing: Standing): Effect 
       closed: trace,
       active: trace.stamp,
       voided: null,
+      present: presentAt(check, trace),
+      kit,
     };
     return { ...declared, ready_check };
   });
+}
+
+/** Who was there: whoever walked the check, and the second person of its steps. */
+function presentAt(check: CheckDoc, closed: Trace): readonly string[] {
+  const steps = Object.values(check.steps).filter((step) => step.irregular === null);
+  const people = [closed.by, ...steps.flatMap((step) => [step.by, step.witness])];
+  return [...new Set(people.filter((id) => id !== null))];
+}
+
+function* namedKit(check: CheckDoc): Effect<readonly KitNote[]> {
+  const notes: KitNote[] = [];
+  for (const id of new Set(Object.values(check.steps).flatMap((step) => step.kit))) {
+    const kit = yield* getDoc('kit', id);
+    if (kit !== undefined) notes.push(kitNote(kit));
+  }
+  return notes;
 }
 
 function withStep(check: CheckDoc, key: string, record: StepRecord): CheckDoc {

@@ -1,6 +1,7 @@
 import type { Role } from '../bodies/people-bodies';
 import type { EntryOf } from '../read-body';
 import { setCrewRole } from './crew';
+import type { KitNote } from './kit';
 import { getDoc, putDoc, type Effect } from './effect';
 import { traceOf, type Standing, type Trace } from './trace';
 
@@ -20,6 +21,8 @@ export interface PersonDoc {
   readonly role: Role | null;
   readonly role_set: Trace;
   readonly authorisations: readonly Authorisation[];
+  /** What the register has them holding. */
+  readonly kit: readonly KitNote[];
 }
 
 type PersonEntry = EntryOf<
@@ -32,8 +35,9 @@ export function* foldPerson(entry: PersonEntry, standing: Standing): Effect {
   const person = yield* getDoc('person', id);
   if (entry.kind === 'person.joined') {
     const authorisations = person?.authorisations ?? [];
+    const kit = person?.kit ?? [];
     const { name, role } = entry.body;
-    yield* putDoc({ kind: 'person', id, parent: null, name, role, role_set: trace, authorisations });
+    yield* putDoc({ kind: 'person', id, parent: null, name, role, role_set: trace, authorisations, kit });
     yield* setCrewRole(entry.meta.lab, id, role);
     return;
   }

@@ -2,12 +2,9 @@ import type { ReadingValues } from '../bodies/firing-bodies';
 import type { Effect } from './effect';
 import { getDoc, putDoc } from './effect';
 import type { Trace } from './trace';
+import { pointBack, standingValues, type Correction, type StandingValues } from './versions';
 
-export interface ReadingCorrection extends Trace {
-  readonly replaces: string;
-  readonly values: ReadingValues;
-  readonly why: string;
-}
+export type ReadingCorrection = Correction<ReadingValues>;
 
 export interface ReadingDoc {
   readonly kind: 'reading';
@@ -24,46 +21,18 @@ export interface ReadingDoc {
   readonly struck: (Trace & { readonly why: string }) | null;
 }
 
-export type StandingReading =
-  | {
-      readonly type: 'stands';
-      readonly values: ReadingValues;
-      readonly version: string;
-      readonly corrected: boolean;
-    }
-  | { readonly type: 'struck' }
-  /** Two corrections replace the same: both shown, plots leave it out until settled. */
-  | { readonly type: 'parted'; readonly versions: readonly ReadingCorrection[] };
+export type StandingReading = StandingValues<ReadingValues>;
 
 /** What the reading says now: the end of its chain of corrections. */
 export function standingReading(reading: ReadingDoc): StandingReading {
-  if (reading.struck !== null) return { type: 'struck' };
-  let version = reading.id;
-  let values = reading.original;
-  for (;;) {
-    const next = reading.corrections.filter((one) => one.replaces === version);
-    const [only] = next;
-    if (only === undefined) return { type: 'stands', values, version, corrected: version !== reading.id };
-    if (next.length > 1) return { type: 'parted', versions: next };
-    version = only.entry;
-    values = only.values;
-  }
-}
-
-/** From a correction's entry id to the reading that it changed, so that a later correction can name it. */
-export interface CorrectionDoc {
-  readonly kind: 'correction';
-  readonly id: string;
-  /** The firing. */
-  readonly parent: string;
-  readonly reading: string;
+  return standingValues(reading);
 }
 
 /** Corrects a reading and keeps the firing's count of shots in step. */
 export function* correctReading(reading: ReadingDoc, correction: ReadingCorrection): Effect {
   const corrected = { ...reading, corrections: [...reading.corrections, correction] };
   yield* putDoc(corrected);
-  yield* putDoc({ kind: 'correction', id: correction.entry, parent: reading.parent, reading: reading.id });
+  yield* pointBack(correction.entry, reading.parent, reading.id);
   yield* recountShots(reading, corrected);
 }
 

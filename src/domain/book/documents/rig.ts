@@ -3,6 +3,7 @@ import type { EntryOf } from '../read-body';
 import type { RigSpec } from '../rig-spec';
 import type { StampPoint } from '../stamp';
 import { getDoc, putDoc, type Effect } from './effect';
+import type { KitNote } from './kit';
 import { traceOf, type Standing, type Trace } from './trace';
 
 export interface RigRevision extends Trace {
@@ -33,6 +34,19 @@ export interface ReadyCheck {
   /** Last activity on the rig from the same tablet: the 30 min of idling count from here. */
   readonly active: StampPoint;
   readonly voided: { readonly code: string; readonly words: string; readonly at: number | null } | null;
+  /** People who were there when it was walked. */
+  readonly present: readonly string[];
+  /** Pieces of the register that its steps named, as they stood when it was closed. */
+  readonly kit: readonly KitNote[];
+}
+
+/** Somebody at the rig beside the person who works it, until they are checked out. */
+export interface Guest extends Trace {
+  readonly person: string | null;
+  readonly name: string;
+  readonly knows_isolator: boolean;
+  readonly eyewear: string | null;
+  readonly irregular: string | null;
 }
 
 export interface Declaration extends Trace {
@@ -51,6 +65,9 @@ export interface RigDoc {
   readonly last_short: Trace | null;
   readonly stand_downs: readonly StandDown[];
   readonly hands: readonly (Trace & { readonly where: string })[];
+  readonly guests: readonly Guest[];
+  /** Kit that the register has staying with the rig. */
+  readonly kit: readonly KitNote[];
   readonly permits: readonly Permit[];
   readonly permits_asked: readonly (Trace & {
     readonly rig_revision: string;
@@ -106,6 +123,8 @@ type RigEntry = EntryOf<
   | 'rig.returned'
   | 'hands.in'
   | 'hands.out'
+  | 'guest.in'
+  | 'guest.out'
   | 'gas.changed'
   | 'permit.asked'
   | 'permit.granted'
@@ -121,7 +140,9 @@ export function* foldRig(entry: RigEntry, standing: Standing): Effect {
   }
   if (standing.irregular !== null && PERMITS.has(entry.kind)) return;
   if (entry.kind === 'rig.declared' && entry.body.state === 'shorted' && standing.irregular !== null) return;
-  yield* updateRig(entry.meta.subject, (rig) => changed(rig, entry, trace));
+  yield* updateRig(entry.meta.subject, (rig) =>
+    changed(rig, entry, { ...trace, irregular: standing.irregular }),
+  );
 }
 
 /** What eases something: without effect when irregular, since that never counts as a permission (protocol 1.2). */
@@ -140,6 +161,8 @@ function newRig(entry: EntryOf<'rig.created'>, trace: Trace): RigDoc {
     last_short: null,
     stand_downs: [],
     hands: [],
+    guests: [],
+    kit: [],
     permits: [],
     permits_asked: [],
     ready_check: null,
@@ -152,7 +175,11 @@ function newRig(entry: EntryOf<'rig.created'>, trace: Trace): RigDoc {
   };
 }
 
-function changed(rig: RigDoc, entry: Exclude<RigEntry, EntryOf<'rig.created'>>, trace: Trace): RigDoc {
+function changed(
+  rig: RigDoc,
+  entry: Exclude<RigEntry, EntryOf<'rig.created'>>,
+  { irregular, ...trace }: Trace & { readonly irregular: string | null },
+): RigDoc {
   switch (entry.kind) {
     case 'rig.revised':
       return revise(rig, entry.body, trace);
@@ -171,6 +198,13 @@ function changed(rig: RigDoc, entry: Exclude<RigEntry, EntryOf<'rig.created'>>, 
       });
     case 'hands.out':
       return { ...rig, hands: rig.hands.filter((tag) => tag.entry !== entry.body.tag) };
+    case 'guest.in': {
+      const { person, name, knows_isolator, eyewear } = entry.body;
+      const guest = { ...trace, person, name, knows_isolator, eyewear, irregular };
+      return { ...rig, guests: [...rig.guests, guest] };
+    }
+    case 'guest.out':
+      return { ...rig, guests: rig.guests.filter((guest) => guest.entry !== entry.body.guest) };
     case 'gas.changed':
       return voidCheck({ ...rig, gas_changed: trace }, trace, {
         code: 'gas-changed',
