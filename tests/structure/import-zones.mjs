@@ -17,6 +17,7 @@ export const physicsOrder = [
   'dye',
   'wear',
   'calibration',
+  'oscillogram',
 ];
 
 /** Folders of the domain that hold no physics, again in building order. */
