@@ -6,12 +6,8 @@ import { areaStrengthRatio, punctureProbability } from '../../src/domain/capacit
 import { bleedPower, bleedTime } from '../../src/domain/capacitor/bleed';
 import { sheetCapacitance } from '../../src/domain/capacitor/capacitance';
 import { shotCharge, storedEnergy } from '../../src/domain/capacitor/energy';
-import {
-  arcThreshold,
-  exceedsTouchLimit,
-  reflexThreshold,
-  shockThreshold,
-} from '../../src/domain/capacitor/hazard';
+import { arcThreshold, reflexThreshold, shockThreshold } from '../../src/domain/capacitor/hazard';
+import { exceedsTouchLimit } from '../../src/domain/capacitor/touch';
 import {
   airFilmField,
   dielectricStress,

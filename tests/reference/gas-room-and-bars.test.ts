@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { screwTurns } from '../../src/domain/alignment/screws';
-import { exceedsTouchLimit } from '../../src/domain/capacitor/hazard';
+import { exceedsTouchLimit } from '../../src/domain/capacitor/touch';
 import { timeToSelfBreak } from '../../src/domain/charging/rate-limits';
 import { repetitionRate } from '../../src/domain/charging/relaxation';
 import { oxygenAfterDumpDisplaced, oxygenSealed, timeToOxygenLimit } from '../../src/domain/gas/room-oxygen';

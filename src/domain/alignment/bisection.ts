@@ -1,25 +1,31 @@
-import type { Answer } from '../units/answer';
+import { answer, type Answer, type Basis } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { computed } from '../units/computed';
 import { firstRefusal, ok, refused, type Refusal, type Result } from '../units/result';
 
-/** Where the arcs of a run of shots sat: the left is tight, or the right. */
-export type ArcSide = 'L' | 'R';
+/** Where the arcs of a run of shots sat: the left is tight, or the right, or both alike. */
+export type ArcSide = 'L' | 'R' | 'B';
 
 /** Shots that one judgement of a side should rest on; common practice, no source. */
 export const SHOTS_PER_JUDGEMENT = 10;
 
 /** How far a search by arcs has come. Turns above 0 open the left end. */
-export interface ArcSearch {
+export interface ArcSearch extends Basis {
   readonly turned_turns: number;
   readonly next_turns: number;
   readonly done: boolean;
   readonly words: string;
+  /** Where the left screw stands after these turns, as far as the evidence tells: within a step either side. */
+  readonly turned: Answer;
 }
+
+const MODEL = 'Step halving on arc evidence';
+const VALID = 'straight bars, ten shots or more to a judgement, no arcs counted at the bar ends';
 
 /**
  * Turns of the left screw after a run of judgements: open by the step while arcs sit left, halve it and go the other way
- * at each change of side. Arcs follow a sharp bar end too: count none at the ends.
+ * at each change of side. "B" is a streak on both sides alike, which ends the search. Arcs follow a sharp bar end too:
+ * count none at the ends.
  */
 export function bisectionTurns(firstStep_turns: number, sides: string): Result<Answer> {
   const bad = searchRefusal(firstStep_turns, sides);
@@ -27,8 +33,8 @@ export function bisectionTurns(firstStep_turns: number, sides: string): Result<A
   return computed([], () => ({
     value: walk(firstStep_turns, sides).turned_turns,
     unit: 'turns',
-    model: 'Step halving on arc evidence',
-    valid: 'ten shots or more a judgement; arcs at the very ends do not count',
+    model: MODEL,
+    valid: VALID,
     relative: 0,
   }));
 }
@@ -52,17 +58,28 @@ export function searchByArcs(
     ]);
   if (bad !== undefined) return refused(bad);
   const { turned_turns, step_turns } = walk(search.firstStep_turns, search.sides);
-  const done = step_turns * screw.pitch_mm * 1000 < screw.feeler_um;
   const last = search.sides.at(-1);
+  const done = last === 'B' || step_turns * screw.pitch_mm * 1000 < screw.feeler_um;
   const next_turns = done || last === undefined ? 0 : last === 'L' ? step_turns : -step_turns;
   return ok({
     turned_turns,
     next_turns,
     done,
+    turned: turnedAnswer(turned_turns, step_turns),
+    model: MODEL,
+    valid: VALID,
+    warnings: [],
     words: done
-      ? 'Done: a further step is less than the feeler can tell.'
+      ? last === 'B'
+        ? 'Done: arcs sit on both sides alike.'
+        : 'Done: a further step is less than the feeler can tell.'
       : `Fire at least ${String(SHOTS_PER_JUDGEMENT)} shots and judge the side again; leave arcs at the bar ends out.`,
   });
+}
+
+function turnedAnswer(value: number, step_turns: number): Answer {
+  const one = answer({ value, unit: 'turns', model: MODEL, valid: VALID, relative: 0 });
+  return { ...one, band: { low: value - step_turns, high: value + step_turns } };
 }
 
 function walk(firstStep_turns: number, sides: string) {
@@ -70,6 +87,7 @@ function walk(firstStep_turns: number, sides: string) {
   let turned_turns = 0;
   let before: string | undefined;
   for (const side of sides) {
+    if (side === 'B') continue;
     if (before !== undefined && side !== before) step_turns /= 2;
     turned_turns += side === 'L' ? step_turns : -step_turns;
     before = side;
@@ -87,11 +105,11 @@ function searchRefusal(firstStep_turns: number, sides: string): Refusal | undefi
     max: 10,
   });
   if (!step.ok) return step.refusal;
-  return typeof sides === 'string' && sides.length <= 200 && /^[LR]*$/.test(sides)
+  return typeof sides === 'string' && sides.length <= 200 && /^[LRB]*$/.test(sides)
     ? undefined
     : {
         type: 'unknown-choice',
         field: 'sides',
-        words: 'Sides: give L or R for each judgement, at most 200.',
+        words: 'Sides: give L, R or B for each judgement, at most 200.',
       };
 }

@@ -1,4 +1,4 @@
-import type { Answer, Warning } from '../units/answer';
+import { answer, withBand, type Answer, type Basis, type Warning } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { computed } from '../units/computed';
 import { firstRefusal, ok, refused, type Refusal, type Result } from '../units/result';
@@ -21,15 +21,21 @@ export interface TwoScrews {
 }
 
 /** Turns of both screws, and what the gap will be once they are rounded to what a hand can turn. */
-export interface ScrewPlan {
+export interface ScrewPlan extends Basis {
   readonly exact_turns: readonly [number, number];
   /** In eighths of a turn. */
   readonly rounded_turns: readonly [number, number];
   readonly predicted: { readonly left_mm: number; readonly right_mm: number };
   /** Error of each predicted end from the feeler alone, mm. */
   readonly feeler_mm: number;
-  readonly warnings: readonly Warning[];
+  /** Exact turns of both screws with what the feeler leaves open of each. */
+  readonly turns: readonly [Answer, Answer];
+  /** Gaps that the rounded turns will give, with the feeler's error and half an eighth of a turn as their band. */
+  readonly ends: { readonly left: Answer; readonly right: Answer };
 }
+
+const MODEL = 'Two screws, straight bar';
+const VALID = 'the bar turns about nothing but the two screws; take up the play first';
 
 const EIGHTHS = 8;
 
@@ -40,8 +46,8 @@ export function screwTurns(setting: TwoScrews, which: 0 | 1): Result<Answer> {
   return computed([], () => ({
     value: turnsOf(setting)[which],
     unit: 'turns',
-    model: 'Two screws, straight bar',
-    valid: 'the bar turns about nothing but the two screws; take up the play first',
+    model: MODEL,
+    valid: VALID,
     relative: 0.05,
   }));
 }
@@ -82,8 +88,34 @@ export function planScrews(setting: TwoScrews, feeler_um: number): Result<ScrewP
     rounded_turns: rounded,
     predicted,
     feeler_mm,
+    turns: [turnsAnswer(setting, 0, feeler_mm), turnsAnswer(setting, 1, feeler_mm)],
+    ends: {
+      left: endAnswer(setting, predicted.left_mm, feeler_mm),
+      right: endAnswer(setting, predicted.right_mm, feeler_mm),
+    },
+    model: MODEL,
+    valid: VALID,
     warnings: warningsOf(setting, rounded, feeler_mm),
   });
+}
+
+/** The feeler's error of both measured gaps, carried to the place of the screw; 5 % of pitch and lever with it. */
+function turnsAnswer(setting: TwoScrews, which: 0 | 1, feeler_mm: number): Answer {
+  const value = turnsOf(setting)[which];
+  const screw = setting.screws[which];
+  const { leftPlace_mm, rightPlace_mm } = setting.gap;
+  const t = (screw.place_mm - leftPlace_mm) / (rightPlace_mm - leftPlace_mm);
+  const open = (feeler_mm * Math.hypot(1 - t, t)) / Math.abs(travelPerTurn(screw));
+  const error = Math.hypot(open, 0.05 * value);
+  const exact = answer({ value, unit: 'turns', model: MODEL, valid: VALID, relative: 0 });
+  return withBand(exact, { low: value - error, high: value + error });
+}
+
+function endAnswer({ screws }: TwoScrews, value: number, feeler_mm: number): Answer {
+  const turned_mm = Math.hypot(...screws.map((screw) => travelPerTurn(screw) / (2 * EIGHTHS)));
+  const error = Math.hypot(feeler_mm, turned_mm);
+  const end = answer({ value, unit: 'mm', model: MODEL, valid: VALID, relative: 0 });
+  return withBand(end, { low: Math.max(0, value - error), high: value + error });
 }
 
 function warningsOf(

@@ -1,6 +1,7 @@
 import { gapFor, pressureFor } from '../gap/gap-solve';
 import type { GapInput } from '../gap/gap-input';
 import { selfBreak } from '../gap/self-break';
+import { answer, withBand, type Answer, type Basis, type Warning } from '../units/answer';
 import { formatFigure } from '../units/format-quantity';
 import { ok, refused, type Result } from '../units/result';
 
@@ -25,7 +26,7 @@ export interface RankedCause {
   readonly errors: number;
 }
 
-export interface Plausibility {
+export interface Plausibility extends Basis {
   readonly expected_kV: number;
   readonly low_kV: number;
   readonly high_kV: number;
@@ -38,7 +39,14 @@ export interface Plausibility {
   readonly words: string;
   /** Likeliest first; empty when the reading fits. */
   readonly causes: readonly RankedCause[];
+  /** What the law expects, with one sigma either side as its band. */
+  readonly expected: Answer;
+  /** Deviation of a measured self-break in sigmas; null as `sigma` is. */
+  readonly deviation: Answer | null;
 }
+
+const MODEL = 'Reading against the law, sigma of law, settings and scatter together';
+const VALID = 'where the gap\u2019s law holds; a rig\u2019s own fit knows its scatter better';
 
 /** Speaks at 3 sigma, or at two of three beyond 2 sigma on the same side. */
 const ALONE_SIGMA = 3;
@@ -53,11 +61,22 @@ const SCATTER_SHARE = 0.02;
  * words outside. Without a calibration of the rig's own the sigma is that of the law.
  */
 export function plausibility(input: PlausibilityInput): Result<Plausibility> {
-  const answer = selfBreak(input.gap);
-  if (!answer.ok) return refused(answer.refusal);
-  const { law_kV, low_kV, high_kV } = answer.value;
+  const sides = selfBreak(input.gap);
+  if (!sides.ok) return refused(sides.refusal);
+  const { law_kV, low_kV, high_kV } = sides.value;
   const sigma_kV = law_kV * relativeSigma(input.gap);
-  const common = { expected_kV: law_kV, low_kV, high_kV, sigma_kV };
+  const common = {
+    expected_kV: law_kV,
+    low_kV,
+    high_kV,
+    sigma_kV,
+    expected: withBand(answer({ value: law_kV, unit: 'kV', relative: 0, model: MODEL, valid: VALID }), {
+      low: law_kV - sigma_kV,
+      high: law_kV + sigma_kV,
+    }),
+    model: MODEL,
+    valid: VALID,
+  };
   if (input.how === 'self-break' && input.broke) {
     const sigma = (input.voltage_kV - law_kV) / sigma_kV;
     const speaks = Math.abs(sigma) >= ALONE_SIGMA || repeats(sigma, input.before);
@@ -68,9 +87,33 @@ export function plausibility(input: PlausibilityInput): Result<Plausibility> {
       fits: !speaks,
       words: selfBreakWords(sigma, input.voltage_kV / law_kV - 1, speaks),
       causes,
+      deviation: deviationOf(sigma),
+      warnings: speaks ? [DOES_NOT_FIT] : [],
     });
   }
-  return ok({ ...common, sigma: null, ...withoutSelfBreak(input, low_kV, high_kV) });
+  const said = withoutSelfBreak(input, low_kV, high_kV);
+  return ok({
+    ...common,
+    sigma: null,
+    deviation: null,
+    ...said,
+    warnings: [...(said.fits ? [] : [DOES_NOT_FIT]), ...(input.broke ? [] : [MAY_SIT_CHARGED])],
+  });
+}
+
+const DOES_NOT_FIT: Warning = {
+  type: 'does-not-fit',
+  words: 'The reading does not fit the gap as it is declared: find out why before firing on.',
+};
+const MAY_SIT_CHARGED: Warning = {
+  type: 'may-sit-charged',
+  words: 'A gap that did not break may leave the rig charged.',
+};
+
+/** A reading a sigma off its own scatter shifts the count by one. */
+function deviationOf(sigma: number): Answer {
+  const one = answer({ value: sigma, unit: 'sigma', relative: 0, model: MODEL, valid: VALID });
+  return withBand(one, { low: sigma - 1, high: sigma + 1 });
 }
 
 function relativeSigma({
@@ -163,8 +206,8 @@ const WARM_GAS_K = 15;
 const SURFACE_ERRORS = 3;
 
 function selfBreakOf(gap: GapInput): number {
-  const answer = selfBreak(gap);
-  return answer.ok ? answer.value.law_kV : 0;
+  const sides = selfBreak(gap);
+  return sides.ok ? sides.value.law_kV : 0;
 }
 
 function cause(words: string, errors: number): RankedCause {

@@ -1,5 +1,5 @@
 import { studentQuantile } from '../numerics/student-t';
-import { answer, type Answer, type Warning } from '../units/answer';
+import { answer, withBand, type Answer, type Basis, type Warning } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { ok, refused, type Refusal, type Result } from '../units/result';
 import { testDrift, type Drift } from './drift';
@@ -23,7 +23,7 @@ export interface Outlier {
  * A rig's own self-break: scale times the law at the set gap plus an offset. All intervals at 95 %. `offset_mm` is null
  * where the readings cannot tell an offset of the gap from a scale.
  */
-export interface SelfBreakFit {
+export interface SelfBreakFit extends Basis {
   readonly type: 'gap-and-scale' | 'scale-alone';
   readonly rig: RigGap;
   readonly scale: Interval;
@@ -36,8 +36,12 @@ export interface SelfBreakFit {
   readonly freedom: number;
   readonly outliers: readonly Outlier[];
   readonly drift: Drift;
-  readonly warnings: readonly Warning[];
+  /** The fitted numbers as answers, intervals at 95 % as their bands. */
+  readonly figures: { readonly scale: Answer; readonly offset: Answer | null; readonly scatter: Answer };
 }
+
+const MODEL = 'Least squares on the logarithm of the voltage';
+const VALID = 'gaps and pressures among the readings; the low side for hold-off stays with the law';
 
 const MOST = 5000;
 const OUTLIER_SIGMAS = 4;
@@ -137,7 +141,30 @@ function finish({ rig, kept, fitted, outliers }: Finished): SelfBreakFit {
     gap_mm: rangeOf(kept.map(({ gap_mm }) => gap_mm)),
     pressure_bar_abs: rangeOf(kept.map(({ pressure_bar_abs }) => pressure_bar_abs)),
   };
-  return { ...numbers, rig, used: kept.length, read, outliers, drift, warnings };
+  return {
+    ...numbers,
+    rig,
+    used: kept.length,
+    read,
+    outliers,
+    drift,
+    figures: figuresOf(fitted),
+    model: MODEL,
+    valid: VALID,
+    warnings,
+  };
+}
+
+function figuresOf({ scale, offset_mm, scatter, freedom }: Fitted): SelfBreakFit['figures'] {
+  const intervalAnswer = (interval: Interval, unit: string): Answer =>
+    withBand(answer({ value: interval.value, unit, relative: 0, model: MODEL, valid: VALID }), interval);
+  // The spread of a standard deviation itself, to first order.
+  const share = Math.min(1, 1 / Math.sqrt(2 * freedom));
+  return {
+    scale: intervalAnswer(scale, '1'),
+    offset: offset_mm === null ? null : intervalAnswer(offset_mm, 'mm'),
+    scatter: answer({ value: scatter, unit: '1', relative: share, model: MODEL, valid: VALID }),
+  };
 }
 
 function readingsRefusal(readings: readonly SelfBreakReading[]): Refusal | undefined {

@@ -1,4 +1,4 @@
-import { answer, type Answer } from '../units/answer';
+import { answer, type Answer, type Basis, type Warning } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { firstRefusal, ok, refused, type Refusal, type Result } from '../units/result';
 import { CAPACITANCE_RULE, VOLTAGE_RULE } from './energy';
@@ -66,16 +66,30 @@ export function bleedPower(resistance_ohm: number, voltage_V: number): Result<An
 }
 
 /** The wait before the stick, or the reason why there is no number. */
-export type BleedWait =
-  | {
-      readonly type: 'known';
-      /** Whole seconds, rounded up, at least 60. Ends in "voltage not proven: short now". */
-      readonly wait_s: number;
-      readonly computed_s: number;
-      readonly slowest: string;
-      readonly nodes: readonly { readonly name: string; readonly computed_s: number }[];
-    }
-  | { readonly type: 'unknown'; readonly nodes: readonly string[]; readonly words: string };
+export type BleedWait = Basis &
+  (
+    | {
+        readonly type: 'known';
+        /** Whole seconds, rounded up, at least 60. Ends in "voltage not proven: short now". */
+        readonly wait_s: number;
+        readonly computed_s: number;
+        readonly slowest: string;
+        /** Of the slowest node, with what the bleed resistor leaves open. */
+        readonly slowestTime: Answer;
+        readonly nodes: readonly { readonly name: string; readonly computed_s: number }[];
+      }
+    | { readonly type: 'unknown'; readonly nodes: readonly string[]; readonly words: string }
+  );
+
+const NOT_PROVEN: Warning = {
+  type: 'not-proven',
+  words: 'A wait proves nothing: measure, short with the stick, and leave the short on.',
+};
+const WAIT_BASIS: Basis = {
+  model: 'Slowest node through its own bleed, from the supply\u2019s limit',
+  valid: 'every bleed whole; never under 60\u2009s',
+  warnings: [NOT_PROVEN],
+};
 
 /**
  * How long every charged node needs, taken from the supply's limit. One unknown bleed leaves no number at all:
@@ -93,7 +107,7 @@ export function bleedWait(
     });
   }
   const unknown = nodes.filter(({ bleed_ohm }) => bleed_ohm === null).map(({ name }) => name);
-  const computed: { readonly name: string; readonly computed_s: number }[] = [];
+  const computed: { readonly name: string; readonly computed_s: number; readonly time: Answer }[] = [];
   for (const { name, capacitance_F, bleed_ohm } of nodes) {
     // An unknown bleed still has its other figures checked, so that a bad one is not hidden behind it.
     const time = bleedTime(
@@ -102,10 +116,11 @@ export function bleedWait(
       from.discharged_below_V,
     );
     if (!time.ok) return refused(named(time.refusal, name));
-    computed.push({ name, computed_s: time.value.value });
+    computed.push({ name, computed_s: time.value.value, time: time.value });
   }
   if (unknown.length > 0) {
     return ok({
+      ...WAIT_BASIS,
       type: 'unknown',
       nodes: unknown,
       words: `No wait can be computed: the bleed of ${unknown.join(', ')} is not known. Treat it as charged and short it with the stick.`,
@@ -113,11 +128,13 @@ export function bleedWait(
   }
   const slowest = computed.reduce((worst, node) => (node.computed_s > worst.computed_s ? node : worst));
   return ok({
+    ...WAIT_BASIS,
     type: 'known',
     wait_s: Math.max(SHORTEST_WAIT_S, Math.ceil(slowest.computed_s)),
     computed_s: slowest.computed_s,
     slowest: slowest.name,
-    nodes: computed,
+    slowestTime: slowest.time,
+    nodes: computed.map(({ name, computed_s }) => ({ name, computed_s })),
   });
 }
 

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { arcThreshold, exceedsTouchLimit, hazardBand, reflexThreshold, shockThreshold } from './hazard';
+import { arcThreshold, hazardBand, heatThreshold, reflexThreshold, shockThreshold } from './hazard';
+import { exceedsTouchLimit, touchVerdict } from './touch';
 
 describe('exceedsTouchLimit', () => {
   // IEC 60335-1, 8.1.4: 45 uC from 450 V to 15 kV, 350 mJ above (read in quotation); 0.1 uF below (from memory).
@@ -88,5 +89,33 @@ describe('hazardBand', () => {
     [1e-9, 1e9, 'supply_kV'],
   ])('refuses %d F at %d kV beside %s', (C, kV, field) => {
     expect(hazardBand(C, { kV, mA: 1 })).toMatchObject({ refusal: { field } });
+  });
+});
+
+describe('what a verdict rests on', () => {
+  it('gives the touch limit with what it is on', () => {
+    expect(touchVerdict(2e-9, 20_000)).toMatchObject({
+      ok: true,
+      value: { exceeds: true, measured: { unit: 'J' }, limit: { value: 0.35 }, model: 'IEC 60335-1, 8.1.4' },
+    });
+    expect(touchVerdict(2e-9, 10_000)).toMatchObject({
+      value: { exceeds: false, measured: { unit: 'C' }, warnings: [{ type: 'still-painful' }] },
+    });
+    expect(touchVerdict(1e-6, 42)).toMatchObject({ value: { exceeds: false } });
+    expect(touchVerdict(1e-6, 43)).toMatchObject({ value: { exceeds: true, limit: { unit: 'F' } } });
+  });
+
+  it('carries energy and limit beside the band, and speaks of X-rays above 30 kV', () => {
+    const low = hazardBand(2e-9, { kV: 20, mA: 1 });
+    expect(low.ok && low.value.energy.value).toBeCloseTo(0.4, 12);
+    expect(low.ok && low.value.valid).not.toBe('');
+    expect(low.ok && low.value.warnings.map(({ type }) => type)).toEqual(['over-touch-limit']);
+    const high = hazardBand(2e-9, { kV: 31, mA: 1 });
+    expect(high.ok && high.value.warnings.map(({ type }) => type)).toContain('x-rays');
+  });
+
+  it('keeps the heat line for low voltages', () => {
+    expect(heatThreshold(48)).toMatchObject({ value: { value: 100, unit: 'J' } });
+    expect(heatThreshold(101)).toMatchObject({ ok: false });
   });
 });

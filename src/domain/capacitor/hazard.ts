@@ -1,27 +1,9 @@
 import { checkNumber } from '../units/check-number';
 import { formatFigure } from '../units/format-quantity';
 import { firstRefusal, ok, refused, type Result } from '../units/result';
-import { answer, type Answer } from '../units/answer';
-import { CAPACITANCE_RULE, VOLTAGE_RULE } from './energy';
-
-const TOUCH_CHARGE_C = 45e-6;
-const TOUCH_ENERGY_J = 0.35;
-const TOUCH_CAPACITANCE_F = 0.1e-6;
-
-/**
- * Whether an accessible part exceeds the touch limit of IEC 60335-1, 8.1.4: 45 uC from 450 V to 15 kV, 350 mJ above
- * (read in quotation), 0.1 uF below 450 V (from memory). Under the limit it is still painful.
- */
-export function exceedsTouchLimit(capacitance_F: number, voltage_V: number): Result<boolean> {
-  const bad = firstRefusal([
-    checkNumber(capacitance_F, CAPACITANCE_RULE),
-    checkNumber(voltage_V, VOLTAGE_RULE),
-  ]);
-  if (bad !== undefined) return refused(bad);
-  if (voltage_V > 15_000) return ok(0.5 * capacitance_F * voltage_V ** 2 > TOUCH_ENERGY_J);
-  if (voltage_V > 450) return ok(capacitance_F * voltage_V > TOUCH_CHARGE_C);
-  return ok(voltage_V > 42.4 && capacitance_F > TOUCH_CAPACITANCE_F);
-}
+import { answer, type Answer, type Basis, type Warning } from '../units/answer';
+import { CAPACITANCE_RULE, storedEnergy, VOLTAGE_RULE } from './energy';
+import { touchVerdict, type TouchVerdict } from './touch';
 
 /** Energy from which a touch makes a person start, J: 0.25 above 400 V (NFPA 70E, read), 1 from 100 V (from memory). */
 export function reflexThreshold(voltage_V: number): Result<Answer> {
@@ -36,21 +18,34 @@ export function shockThreshold(voltage_V: number): Result<Answer> {
   return voltage.ok ? ok(threshold(10, 'Administrative shock line')) : voltage;
 }
 
-/** Arc line, J, from 100 V. Source: the same page, read. */
+/** Arc line, J, from 100 V. Source: the same table, read. */
 export function arcThreshold(voltage_V: number): Result<Answer> {
   const voltage = hazardVoltage(voltage_V);
   return voltage.ok ? ok(threshold(10_000, 'Arc line')) : voltage;
 }
 
+/** Heat line, J, under 100 V: a short burns. Source: the same table, read. */
+export function heatThreshold(voltage_V: number): Result<Answer> {
+  const voltage = checkNumber(voltage_V, {
+    ...VOLTAGE_RULE,
+    max: 100,
+    maxReason: 'the other lines hold from there',
+  });
+  return voltage.ok ? ok(threshold(100, 'Heat line')) : voltage;
+}
+
 export type HazardType = 'below-reflex' | 'reflex' | 'serious-injury' | 'may-kill' | 'blast';
 
 /** What stored energy can do to a person, and the sentence for it with the supply beside it. */
-export interface HazardBand {
+export interface HazardBand extends Basis {
   readonly type: HazardType;
   readonly words: string;
   /** The effect alone, for places that show energy and supply beside it already. */
   readonly effect: string;
   readonly exceedsTouchLimit: boolean;
+  /** At the supply's limit; round it up. */
+  readonly energy: Answer;
+  readonly touch: TouchVerdict;
 }
 
 /**
@@ -68,19 +63,35 @@ export function hazardBand(
   ]);
   if (bad !== undefined) return refused(bad);
   const voltage_V = supply.kV * 1000;
-  const energy_J = 0.5 * capacitance_F * voltage_V ** 2;
+  const stored = storedEnergy(capacitance_F, voltage_V);
+  if (!stored.ok) return stored;
+  const energy_J = stored.value.value;
   const reflex = reflexThreshold(voltage_V);
   if (!reflex.ok) return reflex;
-  const touch = exceedsTouchLimit(capacitance_F, voltage_V);
+  const touch = touchVerdict(capacitance_F, voltage_V);
   if (!touch.ok) return touch;
   const type = bandOf(energy_J, reflex.value.value);
   const energy = formatFigure(energy_J, { digits: { significant: 2 }, rounding: 'up' });
   return ok({
     type,
     effect: BAND_WORDS[type],
-    exceedsTouchLimit: touch.value,
+    exceedsTouchLimit: touch.value.exceeds,
+    energy: stored.value,
+    touch: touch.value,
+    model: 'Stored energy against the lines of DOE-HDBK-1092',
+    valid: 'a capacitor alone, from 100\u2009V; lines for sorting hazards, the supply counts for itself',
+    warnings: warningsOf(voltage_V, touch.value),
     words: `${energy}\u2009J at the supply\u2019s ${String(supply.kV)}\u2009kV and ${String(supply.mA)}\u2009mA: ${BAND_WORDS[type]}`,
   });
+}
+
+/** Any vacuum part gives X-rays at such voltages, and glass lets them out from here on; from memory. */
+const X_RAY_V = 30_000;
+
+function warningsOf(voltage_V: number, touch: TouchVerdict): readonly Warning[] {
+  if (voltage_V <= X_RAY_V) return touch.warnings;
+  const words = 'Above 30\u2009kV a vacuum part in the set-up gives X-rays that pass through glass.';
+  return [...touch.warnings, { type: 'x-rays', words }];
 }
 
 const BAND_WORDS: Readonly<Record<HazardType, string>> = {

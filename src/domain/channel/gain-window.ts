@@ -1,3 +1,4 @@
+import { answer, withBand, type Answer, type Basis, type Warning } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { firstRefusal, ok, refused, type Result } from '../units/result';
 import { CHANNEL_PRESSURE_RULE, reducedField } from './reduced-field';
@@ -25,14 +26,25 @@ export interface GainReason {
 }
 
 /** How far the conditions for gain are met. A score with its reasons, weakest first; never a promise of light. */
-export interface GainVerdict {
+export interface GainVerdict extends Basis {
   /** From 0 to 100. */
   readonly score: number;
   readonly lifetime_ns: number;
   readonly field_Td: number;
   readonly reasons: readonly GainReason[];
   readonly words: string;
+  /** The score with the band that lifetime and field leave open; the marks themselves have none. */
+  readonly rating: Answer;
+  readonly lifetime: Answer;
+  readonly field: Answer;
 }
+
+const MODEL = 'Geometric mean of four marks';
+const VALID = 'nitrogen and air; practice and not kinetics: it orders settings and predicts no output';
+const NO_PROMISE: Warning = {
+  type: 'no-promise',
+  words: 'A score for comparing settings of one rig, not a forecast of light.',
+};
 
 /** From memory: over-voltage 1.3 to 1.5 of the static break, 150 to 300 Td, under 0.5 % oxygen. */
 const OVER_VOLTAGE = { poor: 1, good: 1.4 };
@@ -75,15 +87,49 @@ export function gainWindow(input: GainInput): Result<GainVerdict> {
   if (!field.ok) return field;
   const lifetime_ns = lifetime.value.value;
   const field_Td = field.value.value;
-  const reasons = [
+  const reasons = reasonsOf(input, lifetime_ns, field_Td).toSorted((a, b) => a.mark - b.mark);
+  const score = scoreOf(reasons);
+  return ok({
+    score,
+    lifetime_ns,
+    field_Td,
+    reasons,
+    words: verdictWords(score, reasons[0]),
+    rating: ratingOf(input, score, { lifetime: lifetime.value.band, field: field.value.band }),
+    lifetime: lifetime.value,
+    field: field.value,
+    model: MODEL,
+    valid: VALID,
+    warnings: [NO_PROMISE, ...lifetime.value.warnings],
+  });
+}
+
+function reasonsOf(input: GainInput, lifetime_ns: number, field_Td: number): readonly GainReason[] {
+  return [
     riseReason(input.currentRise_ns / lifetime_ns),
     overVoltageReason(input.peak_kV / input.staticBreak_kV),
     fieldReason(field_Td),
     oxygenReason(input.oxygen_share),
-  ].toSorted((a, b) => a.mark - b.mark);
+  ];
+}
+
+function scoreOf(reasons: readonly GainReason[]): number {
   const product = reasons.reduce((sofar, { mark }) => sofar * mark, 1);
-  const score = Math.floor(100 * product ** (1 / reasons.length));
-  return ok({ score, lifetime_ns, field_Td, reasons, words: verdictWords(score, reasons[0]) });
+  return Math.floor(100 * product ** (1 / reasons.length));
+}
+
+/** The field helps up to a point and hinders beyond it, so all corners are asked and not the ends alone. */
+function ratingOf(
+  input: GainInput,
+  score: number,
+  bands: { readonly lifetime: Answer['band']; readonly field: Answer['band'] },
+): Answer {
+  const { lifetime, field } = bands;
+  const corners = [lifetime.low, lifetime.high].flatMap((ns) =>
+    [field.low, field.high].map((Td) => scoreOf(reasonsOf(input, ns, Td))),
+  );
+  const one = answer({ value: score, unit: 'points', model: MODEL, valid: VALID, relative: 0 });
+  return withBand(one, { low: Math.min(...corners), high: Math.max(...corners) });
 }
 
 function verdictWords(score: number, weakest: GainReason | undefined): string {

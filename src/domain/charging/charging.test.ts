@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { repetitionRate, supplyPower } from './relaxation';
+import { ballastHeat, repetitionRate, supplyPower } from './relaxation';
 import { highestRate, reachableVoltage, supplyReach, type Charging } from './supply-reach';
 
 /** Charging of the demo lab's rigs. Heron's two bleeds are counted as one. */
@@ -140,5 +140,36 @@ describe('highestRate', () => {
       refusal: { type: 'never-fires' },
     });
     expect(highestRate(KETTLE, { capacitance_F: 5e-9, break_kV: Number.NaN }).ok).toBe(false);
+  });
+});
+
+describe('ballastHeat', () => {
+  // Half of the energy goes into the ballast where the gap breaks at the supply; more where it breaks lower: by hand.
+  it.each([
+    [10_000, 10_000, 0.5],
+    [10_000, 5000, 0.75],
+    [20_000, 1000, 0.975],
+  ])('a supply of %d V and a break of %d V: %d of the power', (supply_V, break_V, share) => {
+    const shot = { capacitance_F: 2e-9, break_V, supply_V, rate_Hz: 10 };
+    const power = supplyPower(shot);
+    const heat = ballastHeat(shot);
+    expect(heat.ok && power.ok && heat.value.value / power.value.value).toBeCloseTo(share, 12);
+  });
+
+  it('refuses a break above the supply', () => {
+    expect(ballastHeat({ capacitance_F: 2e-9, break_V: 11e3, supply_V: 1e4, rate_Hz: 1 })).toMatchObject({
+      refusal: { field: 'break_V' },
+    });
+  });
+});
+
+describe('supplyReach', () => {
+  it('carries both voltages as answers and what it rests on', () => {
+    const verdict = supplyReach(HERON, { law_kV: 12, high_kV: 20 });
+    expect(verdict).toMatchObject({
+      ok: true,
+      value: { type: 'may-not-fire', needed: { unit: 'kV', band: { low: 12 } }, reachable: { unit: 'kV' } },
+    });
+    expect(verdict.ok && verdict.value.warnings).toHaveLength(1);
   });
 });

@@ -11,6 +11,12 @@ describe('planRate', () => {
     ['supply-current', { ...CHARGING, supply_mA: 0.1 }, GAP],
     ['gap-recovery', { ...CHARGING, ballast_Mohm: 2 }, GAP],
     ['charging', { ...CHARGING, ballast_Mohm: 10 }, { ...GAP, blown: true }],
+    ['supply-power', { ...CHARGING, supply_W: 1 }, GAP],
+    [
+      'purge-flow',
+      { ...CHARGING, ballast_Mohm: 2 },
+      { ...GAP, blown: true, purge: { flow_L_min: 0.2, volume_cm3: 0.5 } },
+    ],
   ] as const)('is held by %s', (limitedBy, charging, gap) => {
     const plan = planRate(charging, gap);
     if (!plan.ok) throw new Error('refused');
@@ -18,6 +24,34 @@ describe('planRate', () => {
     expect(plan.value.limitedBy).toBe(limitedBy);
     expect(plan.value.rate.value).toBeLessThanOrEqual(highest.ok ? highest.value.value : 0);
     expect(plan.value.rate.value).toBeLessThanOrEqual(gap.blown ? Infinity : 10);
+  });
+
+  it('lists every limit, lowest first, each with its law', () => {
+    const plan = planRate({ ...CHARGING, supply_W: 30 }, GAP);
+    const limits = plan.ok ? plan.value.limits : [];
+    expect(limits.map(({ type }) => type).toSorted()).toEqual([
+      'charging',
+      'gap-recovery',
+      'supply-current',
+      'supply-power',
+    ]);
+    expect(limits.map(({ rate }) => rate.value)).toEqual(
+      limits.map(({ rate }) => rate.value).toSorted((a, b) => a - b),
+    );
+    expect(limits[0]?.rate).toEqual(plan.ok ? plan.value.rate : undefined);
+  });
+
+  // 1.8 L/min for 0.5 cm3 and three volumes a shot: 20 Hz, worked by hand.
+  it('turns a purge flow into the rate that it serves', () => {
+    const purge = { flow_L_min: 1.8, volume_cm3: 0.5 };
+    const plan = planRate({ ...CHARGING, ballast_Mohm: 0.5, supply_mA: 50 }, { ...GAP, blown: true, purge });
+    expect(plan.ok && plan.value.rate.value).toBeCloseTo(20, 9);
+    expect(planRate(CHARGING, { ...GAP, purge: { ...purge, volume_cm3: 0 } }).ok).toBe(false);
+  });
+
+  it('asks for the flow of a blown gap above 10 Hz', () => {
+    const plan = planRate({ ...CHARGING, ballast_Mohm: 1, supply_mA: 50 }, { ...GAP, blown: true });
+    expect(plan.ok && plan.value.warnings.map(({ type }) => type)).toEqual(['flow-unknown']);
   });
 
   it('is refused where the gap never fires', () => {

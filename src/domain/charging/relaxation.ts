@@ -2,7 +2,8 @@ import { answer, type Answer } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { RESISTANCE_RULE } from '../capacitor/bleed';
 import { CAPACITANCE_RULE, VOLTAGE_RULE } from '../capacitor/energy';
-import { firstRefusal, ok, refused, type Result } from '../units/result';
+import { computed } from '../units/computed';
+import { andThen, firstRefusal, ok, refused, type Result } from '../units/result';
 
 /** A capacitor charged through a ballast from a steady voltage until its gap breaks. */
 export interface Relaxation {
@@ -75,5 +76,34 @@ export function supplyPower(shot: {
       model: 'Charge a shot times supply voltage and rate',
       valid: 'a steady supply behind a ballast',
     }),
+  );
+}
+
+/** Heat in the ballast, W: what the supply gives less what the capacitor takes, C Vb (Vs - Vb/2) f. It wants a rating for it. */
+export function ballastHeat(shot: {
+  readonly capacitance_F: number;
+  readonly break_V: number;
+  readonly supply_V: number;
+  readonly rate_Hz: number;
+}): Result<Answer> {
+  return andThen(supplyPower(shot), ({ value }) =>
+    computed(
+      [
+        checkNumber(shot.break_V, {
+          ...VOLTAGE_RULE,
+          field: 'break_V',
+          name: 'Self-break voltage',
+          max: shot.supply_V,
+          maxReason: 'what the supply gives',
+        }),
+      ],
+      () => ({
+        value: value - 0.5 * shot.capacitance_F * shot.break_V ** 2 * shot.rate_Hz,
+        unit: 'W',
+        relative: 0.1,
+        model: 'Supply power less what the capacitor takes',
+        valid: 'a steady supply behind a ballast; while a gap sits shut the bleed heats it too',
+      }),
+    ),
   );
 }

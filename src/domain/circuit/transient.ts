@@ -1,4 +1,4 @@
-import { lumpedVerdict, type LumpedVerdict } from '../line/lumped-verdict';
+import { lumpedVerdict, withoutSheet, type LumpedVerdict } from '../line/lumped-verdict';
 import type { Warning } from '../units/answer';
 import { ok, refused, type Refusal, type Result } from '../units/result';
 import type { Circuit } from './circuit-input';
@@ -85,7 +85,7 @@ function travelling(words: string): Refusal {
 }
 
 function verdictOn({ gap_H, feed }: Circuit, rise_s: number | null): Result<LumpedVerdict> {
-  if (feed === undefined || feed === null) return ok({ type: 'lumped', loop_H: gap_H, words: '' });
+  if (feed === undefined || feed === null) return ok(withoutSheet(gap_H));
   return lumpedVerdict(gap_H, feed, rise_s);
 }
 

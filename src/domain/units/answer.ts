@@ -17,6 +17,16 @@ export interface Answer {
   readonly warnings: readonly Warning[];
 }
 
+/**
+ * What a result of several figures rests on as a whole: the law or practice, where it holds, and what to read beside it.
+ * Figures that matter stand in such a result as answers of their own.
+ */
+export interface Basis {
+  readonly model: string;
+  readonly valid: string;
+  readonly warnings: readonly Warning[];
+}
+
 /** What an answer is built from. */
 export interface AnswerParts {
   readonly value: number;
@@ -41,4 +51,9 @@ export function answer(parts: AnswerParts): Answer {
     warnings,
     band: { low: value - size * below, high: value + size * above },
   };
+}
+
+/** The answer with a band of its own, for where a share of the value cannot give it. */
+export function withBand(one: Answer, band: Answer['band']): Answer {
+  return { ...one, band: { low: Math.min(band.low, one.value), high: Math.max(band.high, one.value) } };
 }

@@ -1,7 +1,7 @@
 import { LIFE_FACTOR, lifeShots, type LifeLaw } from '../capacitor/life';
 import { checkNumber } from '../units/check-number';
 import { ok, refused, type Result } from '../units/result';
-import type { Answer, Warning } from '../units/answer';
+import { answer, type Answer, type Basis, type Warning } from '../units/answer';
 
 /** Shots that a part endured at one stress. */
 export interface EnduredShots {
@@ -10,15 +10,19 @@ export interface EnduredShots {
   readonly stress_ratio: number;
 }
 
-export interface PartWear {
+export interface PartWear extends Basis {
   /** Life used up: 1 is the expected life, by the sum of shots over expected shots. */
   readonly used: number;
   readonly shots: number;
   readonly highestStress_ratio: number;
   /** Shots left at the planned stress, with the band of the life law. Round it down. */
   readonly remaining: Answer;
-  readonly warnings: readonly Warning[];
+  /** Life used up, with the band of the life law. Round it up. */
+  readonly usedLife: Answer;
 }
+
+const MODEL = 'Sum of shots over expected shots (Miner)';
+const VALID = 'within a factor of 5; a part that was once punctured or overheated is outside it';
 
 /**
  * Wear of a part from what it endured: each shot counts as one over the shots expected at its stress (Miner 1945, from
@@ -52,10 +56,27 @@ export function partWear(
     value: left(used),
     // Either the law is five times too long, or five times too short.
     band: { low: left(LIFE_FACTOR * used) / LIFE_FACTOR, high: left(used / LIFE_FACTOR) * LIFE_FACTOR },
-    model: 'Sum of shots over expected shots',
+    model: MODEL,
     warnings: [...planned.value.warnings, ...warnings],
   };
-  return ok({ used, shots, highestStress_ratio, remaining, warnings });
+  const usedLife = answer({
+    value: used,
+    unit: '1',
+    relative: { below: 1 - 1 / LIFE_FACTOR, above: LIFE_FACTOR - 1 },
+    model: MODEL,
+    valid: VALID,
+    warnings,
+  });
+  return ok({
+    used,
+    shots,
+    highestStress_ratio,
+    remaining,
+    usedLife,
+    model: MODEL,
+    valid: VALID,
+    warnings,
+  });
 }
 
 function warningsOf(used: number, highest: number): readonly Warning[] {
