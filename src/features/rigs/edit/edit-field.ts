@@ -85,7 +85,8 @@ function readNumber(field: NumberEdit, text: string, ambient_bar_abs: number | n
     return refused({ type: 'unit-unknown', field: key, words: `${label}: choose its unit again.` });
   const number = parseNumber(typed.number, key, label);
   if (!number.ok) return number;
-  const value = unit.size === 1 && unit.shift === 0 ? number.value : toOwn(number.value, unit);
+  const own = unit.size === 1 && unit.shift === 0 ? number.value : toOwn(number.value, unit);
+  const value = own === 0 ? 0 : own; // "-0" is no figure of its own
   const checked = checkNumber(value, {
     field: key,
     name: label,
