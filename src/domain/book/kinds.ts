@@ -32,6 +32,8 @@ const WRITTEN_VERSION: Partial<Record<Kind, number>> = {
   'rig.revised': 2,
   // 2: kit that the step names, such as the eyewear put on. May be left out, so 1 reads as 2.
   'check.step-done': 2,
+  // 2: words, for a tag that somebody else hung. May be left out, so 1 reads as 2.
+  'hands.out': 2,
 };
 
 export const KINDS = Object.keys(bodies) as readonly Kind[];

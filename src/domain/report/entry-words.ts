@@ -140,6 +140,10 @@ function substance(entry: ReadableEntry, zone: string): string {
       return alignmentWords(entry);
     case 'guest.in':
       return entry.body.name;
+    case 'hands.in':
+      return entry.body.where;
+    case 'hands.out':
+      return entry.body.words ?? '';
     case 'photo.attached':
       return entry.body.caption === '' ? entry.body.name : entry.body.caption;
     case 'trace.attached':
@@ -152,7 +156,7 @@ function substance(entry: ReadableEntry, zone: string): string {
 }
 
 function wordsOf(body: ReadableEntry['body']): string {
-  if ('words' in body && body.words !== '') return body.words;
+  if ('words' in body && body.words !== undefined && body.words !== '') return body.words;
   if ('why' in body) return body.why;
   return '';
 }

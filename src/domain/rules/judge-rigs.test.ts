@@ -33,6 +33,42 @@ describe('objections to entries about a rig', () => {
   });
 });
 
+describe('taking a hands-in tag out', () => {
+  const tagged = () => {
+    const bench = new PureBench();
+    return { bench, tag: bench.book.write('hands.in', bench.rig, { where: 'C2' }).entry.id };
+  };
+  const tags = (bench: PureBench) => bench.book.doc('rig', bench.rig).hands.length;
+
+  it('asks no words of whoever hung it', () => {
+    const { bench, tag } = tagged();
+    expect(bench.book.write('hands.out', bench.rig, { tag }).verdict).toBe('applied');
+    expect(tags(bench)).toBe(0);
+  });
+
+  it('asks words of everybody else, and leaves the tag on without them', () => {
+    const { bench, tag } = tagged();
+    for (const words of [undefined, '  ']) {
+      const body = words === undefined ? { tag } : { tag, words };
+      const out = bench.book.write('hands.out', bench.rig, body, { by: MILO });
+      expect([out.verdict, out.reason?.code]).toEqual(['irregular', 'another-tag']);
+      expect(tags(bench)).toBe(1);
+    }
+    const said = { tag, words: 'Ada went home; I looked, no hands are in' };
+    expect(bench.book.write('hands.out', bench.rig, said, { by: MILO, version: 2 }).verdict).toBe('applied');
+    expect(tags(bench)).toBe(0);
+  });
+
+  it('keeps several tags apart', () => {
+    const { bench, tag } = tagged();
+    bench.book.write('hands.in', bench.rig, { where: 'Channel' }, { by: MILO });
+    bench.book.write('hands.out', bench.rig, { tag });
+    expect(bench.book.doc('rig', bench.rig).hands.map((one) => [one.by, one.where])).toEqual([
+      [MILO, 'Channel'],
+    ]);
+  });
+});
+
 describe('granting a permit', () => {
   const grant = (
     bench: PureBench,

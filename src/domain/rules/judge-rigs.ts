@@ -64,9 +64,7 @@ export function* rigObjection(entry: RigEntry, context: JudgeContext): Effect<Ob
     case 'rig.returned':
       return returnObjection(rig, entry);
     case 'hands.out':
-      return rig.hands.some((tag) => tag.entry === entry.body.tag)
-        ? null
-        : objection('unknown-tag', 'This hands-in tag is not on the rig.');
+      return tagObjection(rig, entry);
     case 'guest.in':
       return yield* guestObjection(entry);
     case 'guest.out':
@@ -86,6 +84,18 @@ export function* rigObjection(entry: RigEntry, context: JudgeContext): Effect<Ob
     default:
       return null;
   }
+}
+
+/** Somebody else's tag comes off only with words: a tag that vanishes without a reason protects nobody. */
+function tagObjection(rig: RigDoc, entry: EntryOf<'hands.out'>): Objection | null {
+  const tag = rig.hands.find((one) => one.entry === entry.body.tag);
+  if (tag === undefined) return objection('unknown-tag', 'This hands-in tag is not on the rig.');
+  if (tag.by === entry.meta.author || (entry.body.words ?? '').trim() !== '') return null;
+  return objection(
+    'another-tag',
+    'Taking out somebody else’s tag needs words: say why it may come off.',
+    tag.at,
+  );
 }
 
 function* guestObjection(entry: EntryOf<'guest.in'>): Effect<Objection | null> {

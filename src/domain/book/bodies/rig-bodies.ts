@@ -20,7 +20,8 @@ export const rigBodies = {
   /** Names every stand-down and incident that it lifts. */
   'rig.returned': z.object({ lifts: z.array(uuid).check(z.minLength(1), z.maxLength(50)), words }),
   'hands.in': z.object({ where: optionalWords }),
-  'hands.out': z.object({ tag: uuid }),
+  /** Taking out a tag that somebody else hung needs words: why, and how it was made sure that no hands are in. */
+  'hands.out': z.object({ tag: uuid, words: z.optional(optionalWords) }),
   'gas.changed': z.object({ words }),
   'permit.asked': z.object({ rig_revision: uuid, words }),
   'permit.granted': z.object({
