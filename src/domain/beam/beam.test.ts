@@ -17,15 +17,18 @@ import {
   eyewearFor,
   opticalDensity,
   timeToDayDose,
+  type BeamLine,
 } from './eyewear';
 import {
   diffuseViewingDistance,
   hazardDistancePulse,
   hazardDistanceRectangular,
   hazardDistanceRound,
+  hazardDistanceTrain,
 } from './hazard-distance';
 import { apertureDivergence, dyeHazardOutput, hazardOutput } from './output';
 import { peakPower, photonCount, photonEnergy } from './photon';
+import { visibleSumLimit } from './visible-sum';
 
 const value = (result: Result<Answer>) => (result.ok ? result.value.value : Number.NaN);
 const NITROGEN = 337.1;
@@ -242,5 +245,68 @@ describe('light', () => {
     expect(photonCount(NITROGEN, bad).ok).toBe(false);
     expect(hazardOutput(bad).ok).toBe(false);
     expect(peakPower(1, bad).ok).toBe(false);
+  });
+});
+
+describe('visible trains', () => {
+  // 18 T^0.75 up to 10 s, 10 W/m2 beyond, 100 C_B J/m2 from 10 s up to 600 nm: worked by hand from 2006/25/EC.
+  it.each([
+    [532, 1e-6, 2e-3],
+    [532, 0.25, 6.364],
+    [632.8, 10, 101.22],
+    [632.8, 100, 1000],
+    [440, 100, 100],
+    [440, 1000, 1000],
+    [480, 100, 398.1],
+    [550, 30, 300],
+  ])('%d nm for %d s add up to %d J/m2 at most', (nm, s, J_m2) => {
+    expect(Math.abs(value(visibleSumLimit(nm, s)) / J_m2 - 1)).toBeLessThan(2e-4);
+  });
+
+  it.each([
+    [390, 1, 'wavelength_nm'],
+    [710, 1, 'wavelength_nm'],
+    [532, 0, 'exposure_s'],
+    [532, Number.NaN, 'exposure_s'],
+  ])('refuses %d nm for %d s', (nm, s, field) => {
+    expect(visibleSumLimit(nm, s)).toMatchObject({ ok: false, refusal: { field } });
+  });
+
+  it('hold each pulse to the least of its rules', () => {
+    const train = { rate_Hz: 20, pulse_s: 5e-9, exposure_s: 0.25, wavelength_nm: 460 };
+    // Five pulses: number of pulses, 2e-3/5^0.25.
+    expect(value(perPulseLimit(train))).toBeCloseTo(2e-3 * 5 ** -0.25, 9);
+    expect(value(perPulseLimit({ ...train, exposure_s: 0.01 }))).toBe(2e-3);
+  });
+
+  it('ask for denser glasses and more distance than one pulse', () => {
+    const dye: BeamLine = {
+      name: 'dye',
+      wavelength_nm: 460,
+      energy_J: 2e-5,
+      pulse_s: 1e-9,
+      width_mm: 2,
+      height_mm: 2,
+    };
+    const train = { rate_Hz: 20, exposure_s: 10 };
+    const once = eyewearFor([dye]);
+    const many = eyewearFor([{ ...dye, train }]);
+    const density = (advice: typeof once) => (advice.ok ? advice.value.lines[0]?.density : undefined) ?? NaN;
+    expect(density(once)).toBeCloseTo(2.5, 9);
+    expect(density(many)).toBeGreaterThan(density(once));
+    expect(many).toMatchObject({
+      value: { lines: [{ asked: { model: expect.stringContaining('three rules') } }] },
+    });
+    const beam = {
+      energy_J: 2e-5,
+      width_mm: 2,
+      height_mm: 2,
+      divergenceWidth_mrad: 5,
+      divergenceHeight_mrad: 5,
+    };
+    const single = value(hazardDistancePulse(beam, 1e-9, 460));
+    expect(value(hazardDistanceTrain(beam, { ...train, pulse_s: 1e-9, wavelength_nm: 460 }))).toBeGreaterThan(
+      single,
+    );
   });
 });

@@ -1,7 +1,8 @@
 import { answer, type Answer, type Warning } from '../units/answer';
 import { checkNumber } from '../units/check-number';
-import { andThen, ok, refused, type Refusal, type Result } from '../units/result';
+import { andThen, mapResult, ok, refused, type Refusal, type Result } from '../units/result';
 import { PULSE_TIME_RULE, WAVELENGTH_RULE } from './photon';
+import { visibleSumLimit } from './visible-sum';
 
 /** Most UV-A that skin and eye may take in a day, J/m2: ICNIRP's wording, seen in a secondary note (physics K8). */
 export const UVA_DAY_J_M2 = 1e4;
@@ -84,12 +85,12 @@ export interface PulseTrain {
   readonly wavelength_nm?: number;
 }
 
-/** Limit for each pulse of a train, J/m2: the least of single pulse, share of the sum, and number of pulses. UV-A only. */
+/** Limit for each pulse of a train, J/m2: the least of single pulse, share of the sum, and number of pulses. */
 export function perPulseLimit(train: PulseTrain): Result<Answer> {
   const { rate_Hz, pulse_s, exposure_s, wavelength_nm = NITROGEN_LINE_NM } = train;
   const rate = checkNumber(rate_Hz, { field: 'rate_Hz', name: 'Rate', unit: 'Hz', min: 1e-6, max: 1e9 });
   if (!rate.ok) return rate;
-  const sum = cumulative(wavelength_nm, exposure_s);
+  const sum = sumLimit(wavelength_nm, exposure_s);
   if (!sum.ok) return sum;
   const single = singleLimit(wavelength_nm, pulse_s);
   if (!single.ok) return single;
@@ -127,6 +128,12 @@ function singleLimit(wavelength_nm: number, pulse_s: number): Result<number> {
     field: 'wavelength_nm',
     words: 'Wavelength: limits are kept here from 315 to 700\u2009nm only.',
   });
+}
+
+function sumLimit(wavelength_nm: number, exposure_s: number): Result<number> {
+  if (!(wavelength_nm >= UVA.to && wavelength_nm <= VISIBLE_TO_NM))
+    return cumulative(wavelength_nm, exposure_s);
+  return mapResult(visibleSumLimit(wavelength_nm, exposure_s), ({ value }) => value);
 }
 
 function cumulative(wavelength_nm: number, exposure_s: number): Result<number> {

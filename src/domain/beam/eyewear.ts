@@ -1,8 +1,8 @@
-import type { Answer, Warning } from '../units/answer';
+import { withBand, type Answer, type Basis } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { computed } from '../units/computed';
-import { ok, refused, type Result } from '../units/result';
-import { singlePulseLimit, UVA_DAY_J_M2 } from './exposure-limit';
+import { mapResult, ok, refused, type Result } from '../units/result';
+import { perPulseLimit, singlePulseLimit, UVA_DAY_J_M2 } from './exposure-limit';
 import { LIMIT_RULE } from './hazard-distance';
 import { PULSE_ENERGY_RULE, WAVELENGTH_RULE } from './photon';
 
@@ -98,6 +98,8 @@ export interface BeamLine {
   readonly pulse_s: number;
   readonly width_mm: number;
   readonly height_mm: number;
+  /** Where a person may stand in it for more than one pulse. */
+  readonly train?: { readonly rate_Hz: number; readonly exposure_s: number };
 }
 
 /** What eyewear must do at one wavelength. `density` is rounded up to a tenth and never below 0. */
@@ -105,15 +107,21 @@ export interface EyewearLine {
   readonly name: string;
   readonly wavelength_nm: number;
   readonly density: number;
+  /** What the sum asks for before rounding, with the limit it was held against as its law. */
+  readonly asked: Answer;
+}
+
+/** Optical densities for every line that is present. */
+export interface EyewearAdvice extends Basis {
+  readonly lines: readonly EyewearLine[];
 }
 
 /**
- * Optical density asked for at every wavelength present: glasses against one do not stop another. Refused as a whole
- * when one line has no limit, since a list with a hole would be read as complete.
+ * Optical density asked for at every wavelength present: glasses against one do not stop another. A line with a train is
+ * held against the limit for each of its pulses. Refused as a whole when one line has no limit, since a list with a hole
+ * would be read as complete.
  */
-export function eyewearFor(
-  lines: readonly BeamLine[],
-): Result<{ readonly lines: readonly EyewearLine[]; readonly warnings: readonly Warning[] }> {
+export function eyewearFor(lines: readonly BeamLine[]): Result<EyewearAdvice> {
   if (lines.length === 0) {
     return refused({ type: 'empty', field: 'lines', words: 'Wavelengths: name every one that is present.' });
   }
@@ -121,11 +129,15 @@ export function eyewearFor(
   for (const line of lines) {
     const density = densityOf(line);
     if (!density.ok) return refused({ ...density.refusal, words: `${line.name}: ${density.refusal.words}` });
-    const tenths = Math.ceil(Number((10 * Math.max(0, density.value)).toPrecision(12)));
-    done.push({ name: line.name, wavelength_nm: line.wavelength_nm, density: tenths / 10 });
+    const asked = density.value;
+    const tenths = Math.ceil(Number((10 * Math.max(0, asked.value)).toPrecision(12)));
+    done.push({ name: line.name, wavelength_nm: line.wavelength_nm, density: tenths / 10, asked });
   }
   return ok({
     lines: done,
+    model: 'Exposure over limit at each wavelength',
+    valid:
+      'densities stated by the maker at these very wavelengths; a beam spread evenly, hot spots ask for more',
     warnings: [
       {
         type: 'every-wavelength',
@@ -136,8 +148,12 @@ export function eyewearFor(
   });
 }
 
-function densityOf(line: BeamLine): Result<number> {
-  const limit = singlePulseLimit(line.wavelength_nm, line.pulse_s);
+function densityOf(line: BeamLine): Result<Answer> {
+  const { pulse_s, wavelength_nm, train } = line;
+  const limit =
+    train === undefined
+      ? singlePulseLimit(wavelength_nm, pulse_s)
+      : perPulseLimit({ ...train, pulse_s, wavelength_nm });
   if (!limit.ok) return limit;
   const area = averagingArea(line);
   if (!area.ok) return area;
@@ -146,8 +162,16 @@ function densityOf(line: BeamLine): Result<number> {
     area_m2: area.value.value,
     limit_J_m2: limit.value.value,
   });
-  return density.ok ? ok(density.value.value) : density;
+  return mapResult(density, (one) =>
+    // Hot spots reach three times the mean, as a hazard distance allows for.
+    withBand(
+      { ...one, model: limit.value.model },
+      { low: one.value, high: one.value + Math.log10(HOT_SPOT) },
+    ),
+  );
 }
+
+const HOT_SPOT = 3;
 
 /** A UV beam that falls on a person again and again. */
 export interface DayExposure {

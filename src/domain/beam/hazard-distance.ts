@@ -2,7 +2,7 @@ import type { Answer, Warning } from '../units/answer';
 import { checkNumber, type NumberRule } from '../units/check-number';
 import { computed } from '../units/computed';
 import { refused, type Result } from '../units/result';
-import { NITROGEN_LINE_NM, singlePulseLimit } from './exposure-limit';
+import { NITROGEN_LINE_NM, perPulseLimit, singlePulseLimit, type PulseTrain } from './exposure-limit';
 import { PULSE_ENERGY_RULE } from './photon';
 
 export const LIMIT_RULE: NumberRule = {
@@ -90,6 +90,12 @@ export function hazardDistancePulse(
   wavelength_nm = NITROGEN_LINE_NM,
 ): Result<Answer> {
   const limit = singlePulseLimit(wavelength_nm, pulse_s);
+  return limit.ok ? hazardDistanceRectangular(beam, limit.value.value) : refused(limit.refusal);
+}
+
+/** The same for somebody in the beam of a train of pulses, by the limit that each of its pulses has. */
+export function hazardDistanceTrain(beam: RectangularBeam, train: PulseTrain): Result<Answer> {
+  const limit = perPulseLimit(train);
   return limit.ok ? hazardDistanceRectangular(beam, limit.value.value) : refused(limit.refusal);
 }
 

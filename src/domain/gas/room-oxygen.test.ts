@@ -9,6 +9,7 @@ import {
   oxygenTransient,
   oxygenVentilated,
   oxygenWords,
+  roomForDump,
   timeToOxygenLimit,
 } from './room-oxygen';
 
@@ -23,6 +24,12 @@ describe('oxygen in a room', () => {
   it('lasts 7.2 h in a sealed room', () => {
     expect(value(timeToOxygenLimit(LEAK)) / 60).toBeCloseTo(7.17, 2);
     expect(value(oxygenSealed(LEAK, value(timeToOxygenLimit(LEAK))))).toBeCloseTo(19.5, 9);
+  });
+
+  it('stays at the limit in just the room that a release asks for', () => {
+    const room_m3 = value(roomForDump(9.22));
+    expect(room_m3).toBeCloseTo(133.2, 1);
+    expect(value(oxygenAfterDumpDisplaced(9.22, room_m3))).toBeCloseTo(19.5, 9);
   });
 
   it('is plain air without gas and without time', () => {

@@ -107,6 +107,17 @@ export function oxygenAfterDumpDisplaced(gas_m3: number, room_m3: number): Resul
   );
 }
 
+/** Room that keeps 19.5 % after such a release, m3, air pushed out first: Vg/(1 - 19.5/20.95). Round it up. */
+export function roomForDump(gas_m3: number): Result<Answer> {
+  return computed([checkNumber(gas_m3, RELEASE_RULE)], () => ({
+    value: gas_m3 / (1 - OXYGEN_LIMIT / AIR_OXYGEN),
+    unit: 'm\u00b3',
+    model: 'Whole cylinder, air pushed out first',
+    valid: 'well mixed; near the outlet there is less oxygen in any room',
+    relative: { below: 0, above: 0.1 },
+  }));
+}
+
 /** What an oxygen content does to a person; the words are common safety practice, figures from memory save 19.5. */
 export function oxygenWords(oxygen_percent: number): string {
   if (oxygen_percent >= OXYGEN_LIMIT) return 'Above the limit when well mixed; near the outlet it is lower.';

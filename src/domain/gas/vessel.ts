@@ -1,7 +1,7 @@
-import type { Answer } from '../units/answer';
+import { withBand, type Answer } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { computed } from '../units/computed';
-import type { Result } from '../units/result';
+import { andThen, mapResult, type Result } from '../units/result';
 
 const BAR_TO_MPA = 0.1;
 /** Acrylic carries at most this, shock included; from memory. */
@@ -91,13 +91,23 @@ export function storedEnergyIsothermal(gas: PressedGas): Result<Answer> {
   }));
 }
 
+/** Energy of the gas to show, J: the larger of Brode's and the isothermal one, with the smaller as the low end of its band. */
+export function storedGasEnergy(gas: PressedGas): Result<Answer> {
+  return andThen(storedEnergyBrode(gas), (brode) =>
+    mapResult(storedEnergyIsothermal(gas), (isothermal) => {
+      const [larger, smaller] = brode.value >= isothermal.value ? [brode, isothermal] : [isothermal, brode];
+      return withBand(larger, { low: Math.min(smaller.value, larger.band.low), high: larger.value });
+    }),
+  );
+}
+
 function pressedChecks({ pressure_bar_abs, ambient_bar_abs, volume_L }: PressedGas) {
   return [
     checkNumber(ambient_bar_abs, {
       field: 'ambient',
       name: 'Ambient pressure',
       unit: 'bar(abs)',
-      min: 0.5,
+      min: 0.3,
       max: 1.1,
     }),
     checkNumber(pressure_bar_abs, {
