@@ -20,3 +20,10 @@ export interface Standing {
 export function traceOf(meta: EntryMeta, standing: Standing): Trace {
   return { entry: meta.id, by: meta.author, device: meta.device, stamp: meta.stamp, at: standing.at };
 }
+
+/** Whether one entry came before another: by revision; what has none yet is newer, and by its tablet's clock. */
+export function precedes(one: Trace, other: Trace): boolean {
+  if (one.at !== null && other.at !== null) return one.at < other.at;
+  if (one.at === null && other.at === null) return one.stamp.wall_ms < other.stamp.wall_ms;
+  return one.at !== null;
+}
