@@ -12,6 +12,8 @@ export interface Tablet {
   readonly page: () => Page;
   /** `kill -9` of the whole browser, as a dying battery would. */
   kill(): Promise<void>;
+  /** Stops every process of the browser where it stands, as the instant before a power cut. */
+  freeze(): void;
   /** Opens the browser again on the same profile. */
   open(url?: string): Promise<void>;
   cutNetwork(cut: boolean): Promise<void>;
@@ -48,8 +50,13 @@ interface Running {
   readonly page: Page;
 }
 
-export async function openTablet(url: string, size: Size = TABLET): Promise<Tablet> {
-  const profile = await mkdtemp(path.join(tmpdir(), 'holdoff-tablet-'));
+/** `within` is the folder in which the profile is made: a disk of its own, for a test that cuts its power. */
+export async function openTablet(
+  url: string,
+  size: Size = TABLET,
+  within: string = tmpdir(),
+): Promise<Tablet> {
+  const profile = await mkdtemp(path.join(within, 'holdoff-tablet-'));
   const errors: string[] = [];
   let running: Running | undefined;
   const must = (): Running => {
@@ -70,6 +77,10 @@ export async function openTablet(url: string, size: Size = TABLET): Promise<Tabl
     profile,
     page: () => must().page,
     kill,
+    freeze: () => {
+      const { child } = must();
+      if (child.pid !== undefined) process.kill(-child.pid, 'SIGSTOP');
+    },
     open,
     errors,
     cutNetwork: (cut) => must().context.setOffline(cut),
