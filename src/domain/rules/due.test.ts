@@ -9,7 +9,7 @@ import { dueItems, type DueFacts, type DueItem } from './due';
 
 const HOUR_MS = 3_600_000;
 const DAY_MS = 24 * HOUR_MS;
-const proved: RigSpec['gap']['vessel'] = {
+const proved: NonNullable<RigSpec['gap']['vessel']> = {
   material: 'PMMA tube',
   rated_bar_g: 3,
   relief_bar_g: 2,
@@ -45,7 +45,10 @@ function facts(bench: PureBench, more: Partial<DueFacts> = {}, minutes = 1): Due
   };
 }
 
-const withVessel = (vessel: typeof proved): RigSpec => ({ ...testSpec, gap: { ...testSpec.gap, vessel } });
+const withVessel = (vessel: RigSpec['gap']['vessel']): RigSpec => ({
+  ...testSpec,
+  gap: { ...testSpec.gap, vessel },
+});
 const withSpec = (of: DueFacts, spec: RigSpec): DueFacts => ({
   ...of,
   rig: { ...of.rig, revisions: of.rig.revisions.map((one) => ({ ...one, spec })) },
@@ -197,7 +200,7 @@ describe('gas that is left', () => {
     name: 'Bottle',
     note: '',
     item: { type: 'cylinder', gas, water_L: 10, pressure_bar_g },
-    added: { entry: idOf(11), at: 1, by: ADA, device: TABLET_A, stamp: facts(long()).stamp },
+    added: long().book.doc('person', ADA).role_set,
     due_ms: null,
     state: 'fit',
     holder: held ? { type: 'rig', id: idOf(5) } : null,

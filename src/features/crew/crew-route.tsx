@@ -1,9 +1,6 @@
-import { QueryClientProvider } from '@tanstack/react-query';
-import { useState } from 'react';
 import { Screen } from '../../components/frame';
 import { Table, type Column } from '../../components/table';
-import { useLabClient } from '../../data/client-context';
-import { openDeskQueries } from '../../data/desk/desk-queries';
+import { DeskProvider } from '../../data/desk/desk-provider';
 import { useLab, usePerson } from '../../data/use-book';
 import { useNow } from '../../data/use-now';
 import { useSession } from '../../data/use-session';
@@ -13,20 +10,16 @@ import { ROLE_WORDS } from '../../domain/report/words';
 import { isRole } from '../../domain/rules/roles';
 import { TabletRow } from './tablet-row';
 import { inUseFirst } from './crew-rows';
-import { CrewContext, useCrew } from './use-crew';
+import { useCrew } from './use-crew';
 import './crew.css';
 
 export function CrewRoute() {
-  const lab = useLabClient();
-  const [desk] = useState(() => openDeskQueries(lab));
   return (
-    <CrewContext value={desk}>
-      <QueryClientProvider client={desk.client}>
-        <Screen>
-          <CrewPage />
-        </Screen>
-      </QueryClientProvider>
-    </CrewContext>
+    <DeskProvider>
+      <Screen>
+        <CrewPage />
+      </Screen>
+    </DeskProvider>
   );
 }
 

@@ -1,13 +1,9 @@
-import { useQuery, useQueryClient } from '@tanstack/react-query';
-import { createContext, use } from 'react';
+import { useQueryClient } from '@tanstack/react-query';
 import type { HoldOutcome } from '../../components/hold';
-import type { DeskQueries } from '../../data/desk/desk-queries';
+import { useDeskQueries, useDeskQuery } from '../../data/desk/use-desk-query';
 import { crewAnswerSchema, type CrewAnswer } from '../../domain/report/desk-shapes';
 
-export const CrewContext = createContext<DeskQueries | null>(null);
-
 const PATH = '/api/crew';
-const OFTEN_MS = 15_000;
 
 export interface Crew {
   readonly crew: CrewAnswer | undefined;
@@ -18,23 +14,13 @@ export interface Crew {
 }
 
 export function useCrew(): Crew {
-  const desk = use(CrewContext);
-  if (desk === null) throw new Error('useCrew needs its provider above it');
+  const desk = useDeskQueries();
   const client = useQueryClient();
-  const query = useQuery({
-    queryKey: [PATH],
-    refetchInterval: OFTEN_MS,
-    networkMode: 'always',
-    queryFn: async () => {
-      const outcome = await desk.get(PATH, crewAnswerSchema);
-      if (outcome.type === 'ok') return outcome.value;
-      throw new Error(outcome.type === 'problem' ? outcome.problem.detail : outcome.words);
-    },
-  });
+  const { data, fetched_ms, words } = useDeskQuery(PATH, crewAnswerSchema);
   return {
-    crew: query.data,
-    fetched_ms: query.dataUpdatedAt,
-    words: query.error === null ? null : query.error.message,
+    crew: data,
+    fetched_ms,
+    words,
     revoke: async (tablet) => {
       const outcome = await desk.post(`/api/crew/tablets/${tablet}/revoke`, {}, crewAnswerSchema);
       if (outcome.type === 'ok') {

@@ -15,7 +15,7 @@ import { FiringFigures } from './firing-figures';
 import { FiringPlots } from './firing-plots';
 import { ReadingsTable } from './readings-table';
 import { revisionWords, spanWords, standingWords } from './firing-words';
-import { useDeskQuery } from './use-desk-query';
+import { useDeskQuery } from '../../data/desk/use-desk-query';
 
 /** One firing, opened at full width below what waits. */
 export function DeskFiringRoute() {

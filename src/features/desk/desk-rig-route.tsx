@@ -10,7 +10,7 @@ import { IncidentSection } from './incident-section';
 import { PartingSection } from './parting-section';
 import { PermitSection, WithdrawSection } from './permit-section';
 import { StandDownSection } from './stand-down-section';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 /** What a reviewer decides about one rig: permit, stand-downs, incidents, partings. */
 export function DeskRigRoute() {

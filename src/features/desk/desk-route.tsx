@@ -8,7 +8,7 @@ import { momentWords } from '../../domain/report/time-words';
 import { formatFigure } from '../../domain/units/format-quantity';
 import { DeskScreen } from './desk-screen';
 import { Fetched } from './fetched';
-import { useDeskQuery } from './use-desk-query';
+import { useDeskQuery } from '../../data/desk/use-desk-query';
 
 const WHOLE = { digits: { decimals: 0 }, rounding: 'nearest' } as const;
 

@@ -1,6 +1,6 @@
 import { useNow } from '../../data/use-now';
 import { agoWords } from '../../domain/report/time-words';
-import type { DeskAnswer } from './use-desk-query';
+import type { DeskAnswer } from '../../data/desk/use-desk-query';
 
 interface FetchedProps {
   readonly answer: DeskAnswer<unknown>;

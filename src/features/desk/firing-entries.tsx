@@ -3,7 +3,7 @@ import type { FiringAnswer, FiringEntry } from '../../domain/report/desk-shapes'
 import { kindWords } from '../../domain/report/entry-words';
 import { momentWords } from '../../domain/report/time-words';
 import { VERDICT_WORDS } from '../../domain/report/words';
-import { reasonWords } from './firing-words';
+import { reasonWords } from '../../domain/report/reason-words';
 
 /** Enough of a hash to tell two apart at a glance; the whole stands in the tooltip and in exports. */
 const HASH_SHOWN = 16;

@@ -4,7 +4,7 @@ import type { FiringDoc } from '../../domain/book/documents/firing';
 import type { ReadingDoc } from '../../domain/book/documents/reading';
 import type { FiringAnswer } from '../../domain/report/desk-shapes';
 import type { FiringRow } from '../../domain/report/firing-rows';
-import { asEntered, originalWords, reasonWords, sigmaWords, spanWords, standingWords } from './firing-words';
+import { asEntered, originalWords, sigmaWords, spanWords, standingWords } from './firing-words';
 
 const trace = (wall_ms: number) => ({
   entry: 'e',
@@ -83,17 +83,6 @@ describe('words over a firing', () => {
     const row = { values, reading: { original } as ReadingDoc } as FiringRow;
     expect(originalWords(row)).toBe('kV 81.1, looked arc, mid');
     expect(originalWords({ ...row, values: original })).toBe('');
-  });
-
-  it('says what the tablet knew', () => {
-    const reason = {
-      cause: 'rule',
-      code: 'stood-down',
-      words: 'The rig was stood down.',
-      knew: true,
-    } as const;
-    expect(reasonWords(reason)).toBe('The rig was stood down. The tablet knew.');
-    expect(reasonWords(null)).toBe('');
   });
 
   it('shows figures as they were entered, and dashes where there are none', () => {

@@ -1,6 +1,5 @@
 import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import type { FiringDoc } from '../../domain/book/documents/firing';
-import type { Reason } from '../../domain/book/entry';
 import type { FiringAnswer, FiringEntry } from '../../domain/report/desk-shapes';
 import type { FiringRow } from '../../domain/report/firing-rows';
 import { HOW_WORDS, LOOK_WORDS } from '../../domain/report/words';
@@ -39,12 +38,6 @@ export function revisionWords({ firing, rig }: FiringAnswer): string {
 /** Verdict and reason of each entry, by its id. */
 export function entriesById(entries: readonly FiringEntry[]): ReadonlyMap<string, FiringEntry> {
   return new Map(entries.map((entry) => [entry.id, entry]));
-}
-
-export function reasonWords(reason: Reason | null): string {
-  if (reason === null) return '';
-  if (reason.knew === null) return reason.words;
-  return `${reason.words} ${reason.knew ? 'The tablet knew.' : 'The tablet could not know.'}`;
 }
 
 /** What a corrected reading said before, field by field: "kV 17.6, bar(g) 1.00". Empty where nothing differs. */

@@ -7,9 +7,9 @@ import { momentWords } from '../../domain/report/time-words';
 import { heldOptions } from '../../domain/rules/held-options';
 import { ActForm } from './act-form';
 import { ActOutcome, ForecastWords } from './act-outcome';
-import { reasonWords } from './firing-words';
+import { reasonWords } from '../../domain/report/reason-words';
 import { useAct, useForecast } from './use-act';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 export function HeldEntry({ held, zone }: { readonly held: HeldDoc; readonly zone: string }) {
   const nameOf = useNames();

@@ -6,7 +6,7 @@ import { ActForm } from './act-form';
 import { ActOutcome } from './act-outcome';
 import { useAct } from './use-act';
 import { useMay } from './use-may';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 /** Incidents of the rig, the open ones first with what can be answered. */
 export function IncidentSection({ rig, zone }: { readonly rig: RigDoc; readonly zone: string }) {

@@ -8,7 +8,7 @@ import { ActForm } from './act-form';
 import { ActOutcome, ForecastWords } from './act-outcome';
 import { useAct, useForecast } from './use-act';
 import { useMay } from './use-may';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 /** Two revisions made apart from each other: both stand until somebody names both and keeps one. */
 export function PartingSection({ rig }: { readonly rig: RigDoc }) {

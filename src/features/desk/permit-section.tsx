@@ -10,7 +10,7 @@ import { ActOutcome } from './act-outcome';
 import { PermitGrant } from './permit-grant';
 import { useAct } from './use-act';
 import { useMay } from './use-may';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 interface Props {
   readonly rig: RigDoc;

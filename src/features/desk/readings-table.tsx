@@ -4,7 +4,8 @@ import type { FiringAnswer } from '../../domain/report/desk-shapes';
 import type { FiringRow } from '../../domain/report/firing-rows';
 import { clockWords } from '../../domain/report/time-words';
 import { HOW_WORDS, LOOK_WORDS } from '../../domain/report/words';
-import { asEntered, entriesById, originalWords, reasonWords, sigmaWords } from './firing-words';
+import { reasonWords } from '../../domain/report/reason-words';
+import { asEntered, entriesById, originalWords, sigmaWords } from './firing-words';
 
 interface Props {
   readonly answer: FiringAnswer;

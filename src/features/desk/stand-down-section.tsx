@@ -5,7 +5,7 @@ import { ActForm } from './act-form';
 import { ActOutcome, ForecastWords } from './act-outcome';
 import { useAct, useForecast } from './use-act';
 import { useMay } from './use-may';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 interface Props {
   readonly rig: RigDoc;

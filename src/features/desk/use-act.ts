@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import type { HoldOutcome } from '../../components/hold';
 import { useAppend, useJudge } from '../../data/use-append';
 import { useSession } from '../../data/use-session';
@@ -40,18 +40,23 @@ export function useForecast(draft: Draft | null, key: string): Forecast {
   const judge = useJudge();
   const session = useSession();
   const [said, setSaid] = useState<{ readonly key: string; readonly reason: Reason | null } | null>(null);
+  const latest = useRef(draft);
+  // Before the one that asks, so that it always reads the draft of this render.
+  useEffect(() => {
+    latest.current = draft;
+  });
+  const asks = draft !== null;
   useEffect(() => {
     let stale = false;
-    if (draft === null) return undefined;
-    void judge(draft).then((judged) => {
+    const asked = latest.current;
+    if (!asks || asked === null) return undefined;
+    void judge(asked).then((judged) => {
       if (!stale) setSaid({ key, reason: judged.verdict === 'applied' ? null : judged.reason });
     });
     return () => {
       stale = true;
     };
-    // The key stands for the draft, which is a new object at every render.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-  }, [judge, key]);
+  }, [judge, key, asks]);
   const reason = draft !== null && said?.key === key ? said.reason : null;
   return {
     against: reason?.cause === 'confirm' ? null : reason,

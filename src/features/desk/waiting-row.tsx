@@ -4,7 +4,7 @@ import { SaysBlock } from '../../components/says-block';
 import { useNow } from '../../data/use-now';
 import { waitingAnswerSchema } from '../../domain/report/desk-shapes';
 import { Fetched } from './fetched';
-import { useDeskQuery } from './use-desk-query';
+import { useDeskQuery } from '../../data/desk/use-desk-query';
 import { inOrder, waitingPair } from './waiting-words';
 
 const SHOWN = 12;

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { bodyText, sealEntry } from '../../domain/book/entry';
-import { bytesWords, entryRow, reasonWords, type EntryOfTablet } from './entry-row';
+import { bytesWords, entryRow, type EntryOfTablet } from './entry-row';
 
 const id = (last: number): string => `00000000-0000-4000-8000-00000000000${last}`;
 
@@ -62,12 +62,6 @@ describe('a row of the Handover', () => {
   it('says when the clock was not to be believed', () => {
     const stamp = { ...own.entry.stamp, time_uncertain: true };
     expect(entryRow({ ...own, entry: { ...own.entry, stamp } }, 'UTC').when).toContain('time uncertain');
-  });
-
-  it('leaves the knowing out where it has no meaning', () => {
-    expect(reasonWords({ cause: 'confirm', code: 'confirm', words: 'Sign in.', knew: null })).toBe(
-      'Sign in.',
-    );
   });
 
   it('rounds what is used up', () => {

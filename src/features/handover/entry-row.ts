@@ -1,5 +1,6 @@
 import type { Reason, SealedEntry } from '../../domain/book/entry';
 import { entrySubstance, kindWords } from '../../domain/report/entry-words';
+import { reasonWords } from '../../domain/report/reason-words';
 import { momentWords } from '../../domain/report/time-words';
 
 type Place = 'on this tablet' | 'sent' | 'backed up';
@@ -47,13 +48,6 @@ export function entryRow(own: EntryOfTablet, zone: string): EntryRow {
     verdict: `${VERDICTS[verdict]}${at}`,
     reason: reasonWords(own.reason),
   };
-}
-
-/** A reason with whether the tablet could have known it when the entry was written (protocol 1.3). */
-export function reasonWords(reason: Reason | null): string {
-  if (reason === null) return '';
-  if (reason.knew === null) return reason.words;
-  return `${reason.words} ${reason.knew ? 'The tablet knew.' : 'The tablet could not know.'}`;
 }
 
 /** Bytes as people read them: "3.4 MB". Rounded up, since it is what is used. */

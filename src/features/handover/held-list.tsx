@@ -4,7 +4,7 @@ import { useHeldBack, usePerson } from '../../data/use-book';
 import { useSession } from '../../data/use-session';
 import { entrySubstance, kindWords } from '../../domain/report/entry-words';
 import { heldOptions } from '../../domain/rules/held-options';
-import { reasonWords } from './entry-row';
+import { reasonWords } from '../../domain/report/reason-words';
 
 /** What the server did not apply: never lost, always with its reason and with what can be done. */
 export function HeldList({ zone }: { readonly zone: string }) {

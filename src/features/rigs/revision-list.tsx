@@ -2,7 +2,7 @@ import { revisionById, type RigDoc, type RigRevision } from '../../domain/book/d
 import { specChangeWords } from '../../domain/report/spec-words';
 import { momentWords } from '../../domain/report/time-words';
 import { specChanges } from '../../domain/rules/loosening';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 /** Every revision, newest first, with what it changed and what it cost. */
 export function RevisionList({ rig, zone }: { readonly rig: RigDoc; readonly zone: string }) {

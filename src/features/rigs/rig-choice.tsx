@@ -9,7 +9,7 @@ import { agoWords, momentWords } from '../../domain/report/time-words';
 import { DECLARED_WORDS, TOPOLOGY_WORDS } from '../../domain/report/words';
 import type { DeclaredState, DeclaredView } from '../../domain/rules/declared-view';
 import { standingPermit } from '../../domain/rules/readiness';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 const MARKS: Readonly<Record<DeclaredState, GapState>> = {
   shorted: 'bridged',

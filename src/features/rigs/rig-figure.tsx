@@ -14,7 +14,7 @@ import { Gas } from './gas';
 import { NodeList } from './node-list';
 import { RevisionList } from './revision-list';
 import { RigCircuit } from './rig-circuit';
-import { useNames } from './use-names';
+import { useNames } from '../../data/use-names';
 
 interface Props {
   readonly rig: RigDoc;

@@ -1,12 +1,12 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { useEffect, useState, type ReactNode } from 'react';
-import { useLabClient } from '../../data/client-context';
-import { openDeskQueries } from '../../data/desk/desk-queries';
-import { useBookState } from '../../data/use-book';
-import { useSession } from '../../data/use-session';
+import { useLabClient } from '../client-context';
+import { openDeskQueries } from './desk-queries';
+import { useBookState } from '../use-book';
+import { useSession } from '../use-session';
 import { DeskContext } from './use-desk-query';
 
-/** What the Desk fetches lives here, per lab and person; it comes with the Desk's own chunk and nothing of the bench needs it. */
+/** What Desk and Crew fetch lives here, per lab and person; it comes with their own chunks and nothing of the bench needs it. */
 export function DeskProvider({ children }: { readonly children: ReactNode }) {
   const lab = useLabClient();
   const session = useSession();

@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { createContext, use } from 'react';
 import type * as z from 'zod/mini';
-import type { DeskQueries } from '../../data/desk/desk-queries';
+import type { DeskQueries } from './desk-queries';
 
 export const DeskContext = createContext<DeskQueries | null>(null);
 
@@ -16,10 +16,16 @@ export interface DeskAnswer<T> {
 
 const OFTEN_MS = 15_000;
 
-/** One answer of the Desk: fetched while there is a network, kept readable with its age when there is none. */
-export function useDeskQuery<T>(path: string, schema: z.ZodMiniType<T>): DeskAnswer<T> {
+/** What is fetched for whoever is open; only below a DeskProvider. */
+export function useDeskQueries(): DeskQueries {
   const desk = use(DeskContext);
   if (desk === null) throw new Error('a Desk query needs the DeskProvider above it');
+  return desk;
+}
+
+/** One answer of the Desk: fetched while there is a network, kept readable with its age when there is none. */
+export function useDeskQuery<T>(path: string, schema: z.ZodMiniType<T>): DeskAnswer<T> {
+  const desk = useDeskQueries();
   const query = useQuery({
     queryKey: [path],
     refetchInterval: OFTEN_MS,
