@@ -150,7 +150,9 @@ function judgeDomain(from, to) {
       `domain/${from} may build only on physics folders that stand before it`,
     );
   }
-  if (toKind === 'physics') return allow(from === 'rules', 'of the Book only a rule may ask physics');
+  if (toKind === 'physics') {
+    return allow(['rules', 'lookup'].includes(from), 'of the Book only a rule or a lookup may ask physics');
+  }
   return allow(stands(bookOrder, to, from), 'leftward only: book, rules, handover, report');
 }
 

@@ -1,8 +1,16 @@
+import { ALIGNMENT_LOOKUP } from './alignment-lookup';
+import { CLEARANCE_LOOKUP } from './clearance-lookup';
 import { GAP_LOOKUP } from './gap-lookup';
+import { GAS_LOOKUP } from './gas-lookup';
 import type { Lookup } from './lookup';
 
 /** Every lookup, in the order of use. */
-export const LOOKUPS: readonly Lookup[] = [GAP_LOOKUP];
+export const LOOKUPS: readonly Lookup[] = [
+  GAP_LOOKUP,
+  ALIGNMENT_LOOKUP,
+  GAS_LOOKUP,
+  CLEARANCE_LOOKUP,
+];
 
 export function lookupOf(key: string): Lookup | undefined {
   return LOOKUPS.find((lookup) => lookup.key === key);
