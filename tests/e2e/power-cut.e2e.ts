@@ -60,8 +60,8 @@ it(
       expect(kept.slice(0, acknowledged.length)).toEqual(acknowledged);
       control.kept += await countControl(tablet.page(), cut);
     }
-    console.info(
-      `emulated power cuts: ${String(CUTS)}; entries acknowledged ${String(acknowledged.length)}, lost 0; control rows ${String(control.written)}, lost ${String(control.written - control.kept)}`,
+    process.stdout.write(
+      `emulated power cuts: ${String(CUTS)}; entries acknowledged ${String(acknowledged.length)}, lost 0; control rows ${String(control.written)}, lost ${String(control.written - control.kept)}\n`,
     );
     expect(acknowledged).toHaveLength(CUTS * ACTS_A_CUT);
     expect(control.kept).toBeLessThan(control.written);
