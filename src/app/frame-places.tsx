@@ -30,7 +30,7 @@ function placesOf(rig: string | undefined): readonly Place[] {
   return [
     { key: 'bench', label: 'Bench', href: paths.benchOf(rig) },
     { key: 'firings', label: 'Firings', href: paths.firings(rig) },
-    { key: 'lookups', label: 'Lookups', href: paths.gapLookup(rig) },
+    { key: 'lookups', label: 'Lookups', href: paths.lookupsOf(rig) },
     { key: 'checks', label: 'Checks', href: paths.checks(rig) },
     { key: 'rigs', label: 'Rigs', href: paths.rigs() },
   ];

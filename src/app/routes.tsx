@@ -11,7 +11,12 @@ const SettingsRoute = lazy(() =>
 const BenchFaceRoute = lazy(() =>
   import('../features/bench/bench-face-route').then((m) => ({ default: m.BenchFaceRoute })),
 );
-const GapRoute = lazy(() => import('../features/lookups/gap-route').then((m) => ({ default: m.GapRoute })));
+const LookupsRoute = lazy(() =>
+  import('../features/lookups/lookups-route').then((m) => ({ default: m.LookupsRoute })),
+);
+const LookupRoute = lazy(() =>
+  import('../features/lookups/lookup-route').then((m) => ({ default: m.LookupRoute })),
+);
 const ChecksRoute = lazy(() =>
   import('../features/checks/checks-route').then((m) => ({ default: m.ChecksRoute })),
 );
@@ -31,6 +36,12 @@ const RigsRoute = lazy(() => import('../features/rigs/rigs-route').then((m) => (
 const RigRoute = lazy(() => import('../features/rigs/rig-route').then((m) => ({ default: m.RigRoute })));
 const ReviseRigRoute = lazy(() =>
   import('../features/rigs/revise-rig-route').then((m) => ({ default: m.ReviseRigRoute })),
+);
+const NewRigRoute = lazy(() =>
+  import('../features/rigs/new-rig-route').then((m) => ({ default: m.NewRigRoute })),
+);
+const RigPartsRoute = lazy(() =>
+  import('../features/rigs/parts/rig-parts-route').then((m) => ({ default: m.RigPartsRoute })),
 );
 const HandoverRoute = lazy(() =>
   import('../features/handover/handover-route').then((m) => ({ default: m.HandoverRoute })),
@@ -62,7 +73,9 @@ export interface AppRoute {
 export const ROUTES: readonly AppRoute[] = [
   { path: patterns.benchOf, screen: BenchRoute, area: 'Bench' },
   { path: patterns.face, screen: BenchFaceRoute, area: 'Bench' },
-  { path: patterns.gapLookup, screen: GapRoute, area: 'Lookups' },
+  { path: patterns.lookupsOf, screen: LookupsRoute, area: 'Lookups' },
+  { path: patterns.lookup, screen: LookupRoute, area: 'Lookups' },
+  { path: patterns.lookupWithoutRig, screen: LookupRoute, area: 'Lookups' },
   // Making safe may be walked before any PIN; the screens themselves refuse the others.
   { path: patterns.checks, screen: ChecksRoute, area: 'Checks', open: true },
   { path: patterns.check, screen: CheckRoute, area: 'Checks', open: true },
@@ -70,6 +83,8 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.firings, screen: FiringsRoute, area: 'Firings' },
   { path: patterns.firing, screen: FiringRoute, area: 'Firings' },
   { path: patterns.rigs, screen: RigsRoute, area: 'Rigs' },
+  { path: patterns.newRig, screen: NewRigRoute, area: 'Rigs' },
+  { path: patterns.rigParts, screen: RigPartsRoute, area: 'Rigs' },
   { path: patterns.reviseRig, screen: ReviseRigRoute, area: 'Rigs' },
   { path: patterns.rig, screen: RigRoute, area: 'Rigs' },
   { path: patterns.desk, screen: DeskRoute, area: 'Desk' },

@@ -45,7 +45,10 @@ export function Shell() {
               <Route key={route.path} path={route.path} element={<Guarded route={route} />} />
             ))}
             <Route path={patterns.bench} element={<FrontDoor cameBack={cameBack} />} />
-            <Route path={patterns.lookups} element={<ToRig to={paths.gapLookup} />} />
+            <Route
+              path={patterns.lookups}
+              element={<ToRig to={paths.lookupsOf} otherwise={paths.lookupsOf('none')} />}
+            />
             <Route path="/" element={<Navigate to={paths.bench()} replace />} />
             <Route path="*" element={<Nowhere />} />
           </Routes>
@@ -81,12 +84,20 @@ function FrontDoor({ cameBack }: { readonly cameBack: boolean }) {
 }
 
 /** A place without a rig in its path goes to the rig in hand. */
-function ToRig({ to }: { readonly to: (rig: string) => string }) {
+function ToRig({
+  to,
+  otherwise,
+}: {
+  readonly to: (rig: string) => string;
+  /** Where to go while the Book holds no rig. */
+  readonly otherwise?: string;
+}) {
   const session = useSession();
   const rig = useRigInHand();
   if (session.state === 'no-lab') return <Navigate to={paths.signIn()} replace />;
   if (session.state === 'locked') return <UnlockScreen people={session.people} />;
   if (rig !== undefined) return <Navigate to={to(rig.id)} replace />;
+  if (otherwise !== undefined) return <Navigate to={otherwise} replace />;
   return (
     <Screen>
       <SaysBlock lead="The Book of this tablet is still empty.">

@@ -17,6 +17,8 @@ export interface QuantityFieldProps {
   readonly lessLabel: string;
   readonly moreLabel: string;
   readonly refusal?: string;
+  /** Makes the label a button, for its help. */
+  readonly onLabel?: () => void;
 }
 
 const STEPS: Readonly<Record<string, -1 | 1>> = { ArrowUp: 1, ArrowRight: 1, ArrowDown: -1, ArrowLeft: -1 };
@@ -34,7 +36,13 @@ export function QuantityField(props: QuantityFieldProps) {
   return (
     <div className="quantity-field" role="group" aria-labelledby={`${id}l`} onKeyDown={step}>
       <div className="quantity-head">
-        <span id={`${id}l`}>{label}</span>
+        {props.onLabel === undefined ? (
+          <span id={`${id}l`}>{label}</span>
+        ) : (
+          <button type="button" id={`${id}l`} className="quantity-label" onClick={props.onLabel}>
+            {label}
+          </button>
+        )}
         {source ? <span className="muted quantity-source">{stepWords ? `${source},` : source}</span> : null}
         {stepWords ? <span className="muted">{stepWords}</span> : null}
       </div>

@@ -35,7 +35,7 @@ export function ChartCursor({ label, data, layout, plot, stops, at, onMove, desc
       {values === null ? null : (
         <svg className="chart-cursor" aria-hidden="true">
           <path d={`M${plot.x.at(values.x)} ${top}V${bottom}`} />
-          {[values.low, values.high, values.law, values.own].map((y, i) =>
+          {[values.low, values.high, values.law, values.own, ...curvesOf(values)].map((y, i) =>
             y === undefined ? null : <circle key={i} cx={plot.x.at(values.x)} cy={plot.y.at(y)} r="5" />,
           )}
         </svg>
@@ -80,6 +80,10 @@ function stopAfterKey(key: string, stops: readonly number[], at: number | null):
   return stops[Math.max(0, Math.min(stops.length - 1, here + step))];
 }
 
+function curvesOf({ curves = [] }: CursorValues): readonly (number | undefined)[] {
+  return curves.map(({ value }) => value ?? undefined);
+}
+
 /** What is read off, when the screen has no words of its own for it. */
 export function plainWords(data: ChartData, values: CursorValues): string {
   const write = (value: number, decimals = 1): string =>
@@ -96,5 +100,8 @@ export function plainWords(data: ChartData, values: CursorValues): string {
   const single = [values.law, values.own].flatMap((value) =>
     value === undefined ? [] : [write(value, decimals)],
   );
-  return `${x}: ${[...interval, ...single].join(', ')}\u2009${data.y.unit}`;
+  const curves = (values.curves ?? []).flatMap(({ label, value }) =>
+    value === null ? [] : [`${label} ${write(value, decimals)}`],
+  );
+  return `${x}: ${[...interval, ...single, ...curves].join(', ')}\u2009${data.y.unit}`;
 }

@@ -10,11 +10,19 @@ export interface Plot {
   readonly bottom: number;
 }
 
+/** A line through its points; where one has no finite figure the line is broken, not drawn across. */
 export function linePath(points: readonly Point[], plot: Plot): string {
-  return points
-    .filter(({ x, y }) => Number.isFinite(x) && Number.isFinite(y))
-    .map(({ x, y }, i) => `${i === 0 ? 'M' : 'L'}${tenth(plot.x.at(x))} ${tenth(plot.y.at(y))}`)
-    .join('');
+  let path = '';
+  let pen = 'M';
+  for (const { x, y } of points) {
+    if (!Number.isFinite(x) || !Number.isFinite(y)) {
+      pen = 'M';
+      continue;
+    }
+    path += `${pen}${tenth(plot.x.at(x))} ${tenth(plot.y.at(y))}`;
+    pen = 'L';
+  }
+  return path;
 }
 
 /** The solid bodies above and below: they end square where the points end, and the rest of the axis stays bare. */
@@ -75,21 +83,34 @@ export function valuesAt(data: ChartData, x: number): CursorValues {
   );
   const law = between(data.law ?? [], x);
   const own = between(data.own?.points ?? [], x);
+  const curves = labelledCurves(data).map(({ label, points }) => ({
+    label,
+    value: between(points, x) ?? null,
+  }));
   return {
     x,
     ...(low === undefined ? {} : { low }),
     ...(high === undefined ? {} : { high }),
     ...(law === undefined ? {} : { law }),
     ...(own === undefined ? {} : { own }),
+    ...(curves.length === 0 ? {} : { curves }),
   };
+}
+
+/** Curves that have a name: each is a column of the table. */
+export function labelledCurves(
+  data: ChartData,
+): readonly { readonly label: string; readonly points: readonly Point[] }[] {
+  return (data.curves ?? []).flatMap(({ label, points }) => (label === undefined ? [] : [{ label, points }]));
 }
 
 function between(points: readonly Point[], x: number): number | undefined {
   for (const [i, point] of points.entries()) {
-    if (point.x === x) return point.y;
+    if (point.x === x) return Number.isFinite(point.y) ? point.y : undefined;
     const next = points[i + 1];
     if (next !== undefined && point.x < x && x < next.x) {
-      return point.y + ((next.y - point.y) * (x - point.x)) / (next.x - point.x);
+      const y = point.y + ((next.y - point.y) * (x - point.x)) / (next.x - point.x);
+      return Number.isFinite(y) ? y : undefined;
     }
   }
   return undefined;

@@ -1,6 +1,6 @@
 import { formatFigure, type Rounding } from '../../domain/units/format-quantity';
 import { Table, type Column } from '../table';
-import { cursorStops, valuesAt } from './chart-paths';
+import { cursorStops, labelledCurves, valuesAt } from './chart-paths';
 import type { ChartData, ChartReading, ChartWords, CursorValues } from './types';
 
 export interface ChartTableProps {
@@ -44,6 +44,16 @@ export function ChartTable({ title, data, words }: ChartTableProps) {
     ...(data.band === undefined ? [] : [column('low', words.low, 'down'), column('high', words.high, 'up')]),
     ...(data.law === undefined ? [] : [column('law', words.law, 'nearest')]),
     ...(data.own === undefined ? [] : [column('own', words.own, 'nearest')]),
+    ...labelledCurves(data).map(({ label }, i): Column<CursorValues> => ({
+      key: `curve${String(i)}`,
+      head: `${label}, ${data.y.unit}`,
+      cell: ({ curves }) => {
+        const value = curves?.[i]?.value ?? null;
+        return value === null
+          ? '\u2013'
+          : formatFigure(value, { digits: { decimals: yDecimals }, rounding: 'nearest' });
+      },
+    })),
   ];
   return (
     <>

@@ -54,6 +54,8 @@ export interface CursorValues {
   readonly high?: number;
   readonly law?: number;
   readonly own?: number;
+  /** Of the named curves; null outside their range or where they are broken. */
+  readonly curves?: readonly { readonly label: string; readonly value: number | null }[];
 }
 
 export interface ChartWords {

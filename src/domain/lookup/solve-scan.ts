@@ -51,7 +51,7 @@ export function scanRoots(at: Miss, { field, rounding, fast }: Options): Scanned
       // Where the figure stands on its target for a while, both ends of the stretch count.
       if (before?.y === 0 && next?.y === 0) continue;
       roots.push({ x: point.x, below: Math.sign(before?.y ?? 0), above: Math.sign(next?.y ?? 0) });
-    } else if (point.y !== null && next?.y != null && point.y * next.y < 0) {
+    } else if (point.y !== null && isPoint(next) && point.y * next.y < 0) {
       const root = crossing(
         miss,
         { from: { x: point.x, y: point.y }, to: { x: next.x, y: next.y } },
@@ -108,7 +108,7 @@ function withDips(miss: Miss, points: readonly Point[]): readonly Point[] {
   return points.flatMap((point, i) => {
     const before = points[i - 1];
     const after = points[i + 1];
-    if (point.y === null || before?.y == null || after?.y == null) return [point];
+    if (point.y === null || !isPoint(before) || !isPoint(after)) return [point];
     const sign = Math.sign(point.y);
     const dips =
       sign !== 0 &&
@@ -122,6 +122,10 @@ function withDips(miss: Miss, points: readonly Point[]): readonly Point[] {
     if (y === null || bottom === point.x) return [point];
     return [point, { x: bottom, y }].sort((a, b) => a.x - b.x);
   });
+}
+
+function isPoint(point: Point | undefined): point is { readonly x: number; readonly y: number } {
+  return point !== undefined && point.y !== null;
 }
 
 function bottomOf(f: (x: number) => number, from: number, to: number): number {

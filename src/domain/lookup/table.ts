@@ -90,7 +90,8 @@ export function sweepTable(
   };
 }
 
-const WALL_ROWS = 21;
+/** As many as one sheet holds in a size that is read from a step away. */
+export const WALL_ROWS = 21;
 
 /** What a bench table for the wall shows: one input in round steps against the large and main figures. */
 export function wallTable(

@@ -1,7 +1,5 @@
-import type { GasName } from '../../domain/gap/gas-table';
-
 /** A gas as chemists write it, figures lowered. */
-export function Gas({ name }: { readonly name: GasName }) {
+export function GasName({ name }: { readonly name: string }) {
   const [letters = name, figure] = name.split(/(?<=[A-Z])(?=\d)/);
   return (
     <span>
