@@ -1,6 +1,6 @@
 import { Screen } from '../../components/frame';
 import { Table, type Column } from '../../components/table';
-import { DeskProvider } from '../../data/desk/desk-provider';
+import { DeskProvider } from '../../data/desk/use-desk-query';
 import { useLab, usePerson } from '../../data/use-book';
 import { useNow } from '../../data/use-now';
 import { useSession } from '../../data/use-session';

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { Screen } from '../../components/frame';
-import { DeskProvider } from '../../data/desk/desk-provider';
+import { DeskProvider } from '../../data/desk/use-desk-query';
 import { WaitingRow } from './waiting-row';
 import './desk.css';
 

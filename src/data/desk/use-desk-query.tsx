@@ -1,9 +1,36 @@
-import { useQuery } from '@tanstack/react-query';
-import { createContext, use } from 'react';
+import { QueryClientProvider, useQuery } from '@tanstack/react-query';
+import { createContext, use, useEffect, useState, type ReactNode } from 'react';
 import type * as z from 'zod/mini';
-import type { DeskQueries } from './desk-queries';
+import { useLabClient } from '../client-context';
+import { useBookState } from '../use-book';
+import { useSession } from '../use-session';
+import { openDeskQueries, type DeskQueries } from './desk-queries';
 
-export const DeskContext = createContext<DeskQueries | null>(null);
+const DeskContext = createContext<DeskQueries | null>(null);
+
+/** What Desk and Crew fetch lives here, per lab and person; it comes with their own chunks and nothing of the bench needs it. */
+export function DeskProvider({ children }: { readonly children: ReactNode }) {
+  const lab = useLabClient();
+  const session = useSession();
+  const person = session.state === 'open' ? session.person.id : 'nobody';
+  // Another person never sees what the one before had fetched.
+  return <PersonsDesk key={`${lab.lab.id}/${person}`}>{children}</PersonsDesk>;
+}
+
+function PersonsDesk({ children }: { readonly children: ReactNode }) {
+  const lab = useLabClient();
+  const [desk] = useState(() => openDeskQueries(lab));
+  const { revision } = useBookState();
+  // Whatever moved the Book may have moved what was fetched: an act that was applied shows at once.
+  useEffect(() => {
+    void desk.client.invalidateQueries();
+  }, [desk, revision]);
+  return (
+    <DeskContext value={desk}>
+      <QueryClientProvider client={desk.client}>{children}</QueryClientProvider>
+    </DeskContext>
+  );
+}
 
 export interface DeskAnswer<T> {
   readonly data: T | undefined;
