@@ -4,6 +4,8 @@ export const paths = {
   bench: () => '/bench',
   benchOf: (rig: string) => `/bench/${rig}`,
   face: (rig: string) => `/bench/${rig}/face`,
+  people: (rig: string) => `/bench/${rig}/people`,
+  due: (rig: string) => `/bench/${rig}/due`,
   lookups: () => '/lookups',
   lookupsOf: (rig: string) => `/lookups/of/${rig}`,
   lookup: (lookup: string, rig: string) => `/lookups/${lookup}/${rig}`,
@@ -19,6 +21,8 @@ export const paths = {
   rig: (id: string) => `/rigs/${id}`,
   rigParts: (id: string) => `/rigs/${id}/parts`,
   reviseRig: (id: string) => `/rigs/${id}/revise`,
+  alignment: (rig: string) => `/alignment/${rig}`,
+  kit: () => '/kit',
   desk: () => '/desk',
   deskFiring: (id: string) => `/desk/firings/${id}`,
   deskRig: (id: string) => `/desk/rigs/${id}`,
@@ -27,6 +31,7 @@ export const paths = {
   handover: () => '/handover',
   settings: () => '/settings',
   emergency: () => '/emergency',
+  claims: () => '/emergency/claims',
 } as const;
 
 /** Patterns for the router, kept beside the builders so that they cannot drift apart. */
@@ -35,6 +40,8 @@ export const patterns = {
   bench: '/bench',
   benchOf: '/bench/:rig',
   face: '/bench/:rig/face',
+  people: '/bench/:rig/people',
+  due: '/bench/:rig/due',
   lookups: '/lookups',
   lookupsOf: '/lookups/of/:rig',
   lookup: '/lookups/:lookup/:rig',
@@ -49,6 +56,8 @@ export const patterns = {
   rig: '/rigs/:rig',
   rigParts: '/rigs/:rig/parts',
   reviseRig: '/rigs/:rig/revise',
+  alignment: '/alignment/:rig',
+  kit: '/kit',
   desk: '/desk',
   deskFiring: '/desk/firings/:firing',
   deskRig: '/desk/rigs/:rig',
@@ -57,4 +66,5 @@ export const patterns = {
   handover: '/handover',
   settings: '/settings',
   emergency: '/emergency',
+  claims: '/emergency/claims',
 } as const;
