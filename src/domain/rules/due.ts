@@ -25,7 +25,7 @@ export const TAG_ASKED_AFTER_MS = 8 * HOUR_MS;
 /** Where something that is due is mended. */
 export type DueLead =
   | { readonly type: 'check'; readonly purpose: 'make-safe' | 'before-firing' }
-  | { readonly type: 'people' | 'permit' | 'authorisation' | 'stand-down' | 'rig' | 'kit' | 'claims' }
+  | { readonly type: 'people' | 'permit' | 'authorisation' | 'stand-down' | 'rig' | 'parts' | 'kit' | 'claims' }
   | { readonly type: 'firings' };
 
 export interface DueItem {
@@ -253,7 +253,7 @@ function dueWear({ worn = [], drift = null }: DueFacts): DueItem[] {
     why: part.words,
     left_ms: null,
     danger: part.used >= 1 ? 'people' : 'upkeep',
-    lead: { type: 'rig' },
+    lead: { type: 'parts' },
   }));
   if (drift === null) return parts;
   return [
