@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Answer } from '../units/answer';
 import type { Result } from '../units/result';
+import { averagingArea } from './averaging-area';
 import {
   cumulativeLimit,
   dailyUvaLimit,
@@ -11,7 +12,6 @@ import {
   visibleOldLimit,
 } from './exposure-limit';
 import {
-  averagingArea,
   dayDoseShare,
   energyThroughAperture,
   eyewearFor,

@@ -3,12 +3,9 @@ import { checkNumber } from '../units/check-number';
 import { computed } from '../units/computed';
 import { mapResult, ok, refused, type Result } from '../units/result';
 import { perPulseLimit, singlePulseLimit, UVA_DAY_J_M2 } from './exposure-limit';
+import { averagingArea, circle_m2 } from './averaging-area';
 import { LIMIT_RULE } from './hazard-distance';
-import { PULSE_ENERGY_RULE, WAVELENGTH_RULE } from './photon';
-
-/** Areas over which exposure is averaged, mm across: 1 for UV up to 0.35 s, 7 for visible; from memory. */
-export const APERTURE_MM = { uv: 1, visible: 7 } as const;
-const UV_BELOW_NM = 400;
+import { PULSE_ENERGY_RULE } from './photon';
 
 const AREA_RULE = { field: 'area_m2', name: 'Beam area', unit: 'm\u00b2', min: 1e-12, max: 100 } as const;
 
@@ -61,32 +58,6 @@ export function opticalDensity(pulse: {
             : [],
       };
     },
-  );
-}
-
-/** Area over which a beam's exposure counts, m2: the beam, and never less than the aperture would average over. */
-export function averagingArea(beam: {
-  readonly width_mm: number;
-  readonly height_mm: number;
-  readonly wavelength_nm: number;
-}): Result<Answer> {
-  const size = { unit: 'mm', min: 1e-3, max: 1e4 };
-  return computed(
-    [
-      checkNumber(beam.width_mm, { field: 'width_mm', name: 'Beam width', ...size }),
-      checkNumber(beam.height_mm, { field: 'height_mm', name: 'Beam height', ...size }),
-      checkNumber(beam.wavelength_nm, WAVELENGTH_RULE),
-    ],
-    () => ({
-      value: Math.max(
-        beam.width_mm * beam.height_mm * 1e-6,
-        circle_m2(beam.wavelength_nm < UV_BELOW_NM ? APERTURE_MM.uv : APERTURE_MM.visible),
-      ),
-      unit: 'm\u00b2',
-      model: 'The larger of beam and limiting aperture',
-      valid: 'pulses up to 0.35 s',
-      relative: 0.1,
-    }),
   );
 }
 
@@ -228,8 +199,4 @@ export function dayDoseShare(exposure_J_m2: number, shots: number): Result<Answe
       };
     },
   );
-}
-
-function circle_m2(diameter_mm: number): number {
-  return (Math.PI / 4) * (diameter_mm / 1000) ** 2;
 }
