@@ -14,15 +14,18 @@ export interface PartLife {
  * order of the Book. A firing that was open when the part was fitted counts to the part before it.
  */
 export function partLife(part: PartDoc, firings: readonly FiringDoc[]): PartLife {
-  const { retired } = part;
-  const here = firings
-    .filter(
-      (firing) =>
-        firing.parent === part.parent &&
-        precedes(part.trace, firing.opened) &&
-        (retired === null || precedes(firing.opened, retired)),
-    )
-    .reduce((sum, firing) => sum + firing.shots, 0);
+  const here = firingsEndured(part, firings).reduce((sum, firing) => sum + firing.shots, 0);
   const { shots_before } = part.fitted;
   return { here, all: shots_before === null ? null : shots_before + here };
+}
+
+/** The firings whose shots a part has endured. */
+export function firingsEndured(part: PartDoc, firings: readonly FiringDoc[]): readonly FiringDoc[] {
+  const { retired } = part;
+  return firings.filter(
+    (firing) =>
+      firing.parent === part.parent &&
+      precedes(part.trace, firing.opened) &&
+      (retired === null || precedes(firing.opened, retired)),
+  );
 }

@@ -1,20 +1,16 @@
 import { useParams } from 'react-router-dom';
 import { Screen } from '../../components/frame';
 import { SaysBlock } from '../../components/says-block';
-import { ThumbDome } from '../../components/thumb-dome';
-import { ThumbZone } from '../../components/thumb-zone';
-import { useLab, useRig } from '../../data/use-book';
+import { useRig } from '../../data/use-book';
 import type { RigDoc } from '../../domain/book/documents/rig';
-import { ReviseFieldsColumn } from './revise-fields-column';
-import { ReviseFigure } from './revise-figure';
-import { ReviseKeypad } from './revise-keypad';
-import { useRevise } from './use-revise';
+import { EditScreen } from './edit/edit-screen';
+import { useRigEdit } from './edit/use-rig-edit';
 import './rigs.css';
+import './edit/edit.css';
 
 export function ReviseRigRoute() {
   const { rig: id = '' } = useParams();
   const rig = useRig(id);
-  const lab = useLab();
   if (rig === undefined) {
     return (
       <Screen>
@@ -24,36 +20,10 @@ export function ReviseRigRoute() {
       </Screen>
     );
   }
-  return <ReviseScreen key={rig.id} rig={rig} zone={lab?.settings.zone ?? 'Etc/UTC'} />;
+  return <ReviseRig key={rig.id} rig={rig} />;
 }
 
-function ReviseScreen({ rig, zone }: { readonly rig: RigDoc; readonly zone: string }) {
-  const revise = useRevise(rig);
-  const { hindrance } = revise.revision;
-  const touched = Object.keys(revise.draft.texts).length > 0 || revise.revision.changes.length > 0;
-  return (
-    <Screen
-      fields={<ReviseFieldsColumn revise={revise} />}
-      thumbs={
-        <ThumbZone
-          label="Actions"
-          main={
-            <ThumbDome
-              size="big"
-              hold="second"
-              critical
-              label={'Hold\nto revise'}
-              holdLabel={`Hold: revise ${rig.name}`}
-              disabled={hindrance !== null}
-              {...(hindrance === null ? {} : { reason: hindrance })}
-              onComplete={revise.log}
-            />
-          }
-          others={touched ? [<ThumbDome key="back" label="Back to the rig" onComplete={revise.clear} />] : []}
-        />
-      }
-    >
-      {revise.typing ? <ReviseKeypad revise={revise} /> : <ReviseFigure revise={revise} zone={zone} />}
-    </Screen>
-  );
+function ReviseRig({ rig }: { readonly rig: RigDoc }) {
+  const edit = useRigEdit(rig);
+  return <EditScreen edit={edit} />;
 }

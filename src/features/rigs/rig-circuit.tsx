@@ -1,47 +1,63 @@
 import { useRef } from 'react';
-import { electrodePath } from '../../components/electrode';
 import { useSize } from '../../components/use-size';
 import type { RigSpec } from '../../domain/book/rig-spec';
+import type { RigDerived } from '../../domain/rules/rig-derived';
 import { CAPACITOR_WORDS, TOPOLOGY_WORDS } from '../../domain/report/words';
-import { circuitPlan, type CircuitPlan, type Electrodes, type Plates } from './circuit-plan';
-import type { RigView } from './figures-view';
+import { formatQuantity } from '../../domain/units/format-quantity';
+import { circuitPlan, type CircuitPlan, type Plates } from './circuit-plan';
+import { coilPath, facesOf, ringPlaces, type RingPlace } from './circuit-shapes';
+import { derivedRows } from './derived-view';
 
 interface Props {
   readonly name: string;
   readonly spec: RigSpec;
-  readonly view: RigView;
+  readonly derived: RigDerived;
 }
 
 /** The circuit as the Book knows it: every part that holds off, stores or bleeds, and a ring on each charged node. */
-export function RigCircuit({ name, spec, view }: Props) {
+export function RigCircuit({ name, spec, derived }: Props) {
   const box = useRef<HTMLDivElement>(null);
   const { width } = useSize(box);
   const plan = circuitPlan(spec.topology, width);
-  const rings = spec.nodes.slice(0, plan.rings.length);
+  const rings = ringPlaces(plan, spec.nodes);
   return (
     <div ref={box} className="rig-circuit">
       <svg
         viewBox={`0 0 ${plan.width} ${plan.height}`}
         role="img"
-        aria-label={`Circuit of ${name}, ${TOPOLOGY_WORDS[spec.topology]}: ${rings.map((node, i) => `ring ${i + 1} on ${node.name}`).join(', ')}`}
+        aria-label={`Circuit of ${name}, ${TOPOLOGY_WORDS[spec.topology]}: ${spec.nodes.map((node, i) => `ring ${i + 1} on ${node.name}`).join(', ')}`}
         style={{ fontSize: plan.font }}
       >
-        <Conductors plan={plan} />
-        <Symbols plan={plan} acrossKnown={spec.channel.across_kohm !== null} />
-        {rings.map((node, i) => (
-          <Ring key={node.name} plan={plan} at={i} />
-        ))}
-        {plan.lettered ? <Letters plan={plan} spec={spec} view={view} /> : null}
+        <Conductors plan={plan} spec={spec} />
+        <Symbols plan={plan} spec={spec} />
+        {rings.map((place, i) =>
+          place === null ? null : (
+            <Ring key={`${place.x} ${place.y}`} plan={plan} place={place} number={i + 1} />
+          ),
+        )}
+        {plan.lettered ? <Letters plan={plan} spec={spec} derived={derived} /> : null}
       </svg>
     </div>
   );
 }
 
-function Conductors({ plan }: { readonly plan: CircuitPlan }) {
+interface DrawnProps {
+  readonly plan: CircuitPlan;
+  readonly spec: RigSpec;
+}
+
+/** Whether anything stands across the channel; without it there is no line either, which would be a short. */
+function hasAcross({ channel, charging }: RigSpec): boolean {
+  return channel.across_kohm !== null || charging.inductor_uH !== undefined;
+}
+
+function Conductors({ plan, spec }: DrawnProps) {
   const { rail, ground, supply_x, ballast, bleed_x, gap, channel, first, second } = plan;
   const middle = (rail + ground) / 2;
   const half = 42 * scaleOf(plan);
-  const last = plan.second_bleed_x ?? (channel.upright ? channel.x + acrossAside(plan) : second.x);
+  const last =
+    plan.second_bleed_x ??
+    (channel.upright ? channel.x + (hasAcross(spec) ? acrossAside(plan) : 0) : second.x);
   const plates = ({ x }: Plates): string => `M${x} ${rail}V${middle - 24}M${x} ${middle + 24}V${ground}`;
   const breaks = [gap, channel]
     .filter((one) => !one.upright)
@@ -55,7 +71,7 @@ function Conductors({ plan }: { readonly plan: CircuitPlan }) {
     upright === undefined
       ? ''
       : `M${upright.x} ${rail}V${upright.y - upright.long - upright.apart / 2}M${upright.x} ${upright.y + upright.long + upright.apart / 2}V${ground}`;
-  const across = acrossPath(plan);
+  const across = hasAcross(spec) ? acrossPath(plan) : '';
   const bleeds = [bleed_x, plan.second_bleed_x]
     .flatMap((x) => (x === null ? [] : [`M${x} ${rail}V${ground}`]))
     .join('');
@@ -87,7 +103,7 @@ function scaleOf(plan: CircuitPlan): number {
   return plan.lettered ? 1 : 0.5;
 }
 
-function Symbols({ plan, acrossKnown }: { readonly plan: CircuitPlan; readonly acrossKnown: boolean }) {
+function Symbols({ plan, spec }: DrawnProps) {
   const { rail, ground, supply_x, ballast, bleed_x, channel } = plan;
   const k = scaleOf(plan);
   const middle = (rail + ground) / 2;
@@ -109,31 +125,29 @@ function Symbols({ plan, acrossKnown }: { readonly plan: CircuitPlan; readonly a
       {lying((ballast.from + ballast.to) / 2, rail, ballast.to - ballast.from)}
       {standing(bleed_x)}
       {plan.second_bleed_x === null ? null : standing(plan.second_bleed_x)}
-      {acrossKnown
-        ? channel.upright
+      {spec.channel.across_kohm === null
+        ? null
+        : channel.upright
           ? standing(channel.x + acrossAside(plan))
-          : lying(channel.x, rail - acrossAside(plan) * 0.7, 80 * k)
-        : null}
-      <path className="circuit-metal" d={facesOf(plan.gap) + facesOf(channel)} />
+          : spec.charging.inductor_uH === undefined
+            ? lying(channel.x, rail - acrossAside(plan) * 0.7, 80 * k)
+            : null}
+      {spec.charging.inductor_uH === undefined || channel.upright ? null : (
+        <>
+          <path
+            className="circuit-gone"
+            d={`M${channel.x - 40 * k} ${rail - acrossAside(plan) * 0.7}h${80 * k}`}
+          />
+          <path className="circuit-coil" d={coilPath(channel.x, rail - acrossAside(plan) * 0.7, 80 * k)} />
+        </>
+      )}
+      <path
+        className="circuit-metal"
+        d={facesOf(plan.gap, spec.gap.electrodes) + facesOf(channel, 'domed')}
+      />
       <PlatesOf plates={plan.first} plan={plan} />
       <PlatesOf plates={plan.second} plan={plan} />
     </>
-  );
-}
-
-function facesOf({ upright, x, y, thick, long, apart }: Electrodes): string {
-  const shape = { edge: thick / 8, sagitta: thick / 9 };
-  if (upright) {
-    const box = { ...shape, x: x - thick / 2, width: thick, height: long };
-    return (
-      electrodePath({ ...box, y: y - apart / 2 - long, facing: 'down' }) +
-      electrodePath({ ...box, y: y + apart / 2, facing: 'up' })
-    );
-  }
-  const box = { ...shape, y: y - thick / 2, width: long, height: thick };
-  return (
-    electrodePath({ ...box, x: x - apart / 2 - long, facing: 'right' }) +
-    electrodePath({ ...box, x: x + apart / 2, facing: 'left' })
   );
 }
 
@@ -154,20 +168,33 @@ function PlatesOf({ plates, plan }: { readonly plates: Plates; readonly plan: Ci
   );
 }
 
-function Ring({ plan, at }: { readonly plan: CircuitPlan; readonly at: number }) {
-  const place = plan.rings[at];
-  if (place === undefined) return null;
+interface RingProps {
+  readonly plan: CircuitPlan;
+  readonly place: RingPlace;
+  readonly number: number;
+}
+
+function Ring({ plan, place, number }: RingProps) {
   return (
     <g className="circuit-ring">
+      {place.stem === 0 ? null : (
+        <path className="circuit-wire" d={`M${place.x} ${place.y}v${place.stem - plan.ring_r}`} />
+      )}
       <circle cx={place.x} cy={place.y} r={plan.ring_r} />
       <text x={place.x} y={place.y + plan.font * 0.36} textAnchor="middle">
-        {at + 1}
+        {number}
       </text>
     </g>
   );
 }
 
-function Letters({ plan, spec, view }: Omit<Props, 'name'> & { readonly plan: CircuitPlan }) {
+function Letters({ plan, spec, derived }: DrawnProps & { readonly derived: RigDerived }) {
+  const [firstRow, secondRow, breakRow] = derivedRows(derived, ['first', 'second', 'self_break']);
+  const pressure = formatQuantity(derived.at.pressure_bar_g, 'bar(g)', {
+    digits: { decimals: 2 },
+    rounding: 'nearest',
+  });
+  const acrossText = acrossWords(spec);
   const { rail, ground, supply_x, ballast, bleed_x, gap, channel, first, second } = plan;
   const middle = (rail + ground) / 2;
   const names = CAPACITOR_WORDS[spec.topology];
@@ -205,8 +232,8 @@ function Letters({ plan, spec, view }: Omit<Props, 'name'> & { readonly plan: Ci
         step={gapAt.line}
         lines={[
           `${spec.gap.gap_mm}\u2009mm`,
-          view.sides.ok ? `${view.sides.value.law}\u2009kV` : 'no law',
-          `${spec.gap.highest_bar_g}\u2009bar(g)`,
+          (breakRow?.value ?? null) === null ? 'no law' : `${breakRow?.value ?? ''}\u2009kV`,
+          pressure,
         ]}
         muted={2}
       />
@@ -214,14 +241,14 @@ function Letters({ plan, spec, view }: Omit<Props, 'name'> & { readonly plan: Ci
         x={first.x + 8}
         y={middle + 62}
         anchor="start"
-        lines={[`${view.first_nF}\u2009nF`, short(names.first)]}
+        lines={[`${firstRow?.value ?? '\u2013'}\u2009nF`, short(names.first)]}
         muted={1}
       />
       <Lines
         x={second.x - 8}
         y={middle + 62}
         anchor="end"
-        lines={[`${view.second_nF}\u2009nF`, short(names.second)]}
+        lines={[`${secondRow?.value ?? '\u2013'}\u2009nF`, short(names.second)]}
         muted={1}
       />
       {channel.upright ? (
@@ -229,20 +256,15 @@ function Letters({ plan, spec, view }: Omit<Props, 'name'> & { readonly plan: Ci
       ) : (
         <Lines x={channel.x} y={rail + 46} anchor="middle" lines={[channelText]} />
       )}
-      {spec.channel.across_kohm === null ? null : channel.upright ? (
+      {acrossText === null ? null : channel.upright ? (
         <Lines
           x={channel.x + acrossAside(plan) + 20}
           y={middle - 6}
           anchor="start"
-          lines={[String(spec.channel.across_kohm), 'kΩ']}
+          lines={acrossText.split('\u2009')}
         />
       ) : (
-        <Lines
-          x={channel.x}
-          y={rail - acrossAside(plan) * 0.7 - 18}
-          anchor="middle"
-          lines={[`${spec.channel.across_kohm}\u2009kΩ`]}
-        />
+        <Lines x={channel.x} y={rail - acrossAside(plan) * 0.7 - 18} anchor="middle" lines={[acrossText]} />
       )}
     </>
   );
@@ -270,6 +292,14 @@ function Lines({ x, y, anchor, lines, step = 28, muted }: LinesProps) {
       {line}
     </text>
   ));
+}
+
+/** What stands across the channel, on one line; null where nothing does. */
+function acrossWords({ topology, channel, charging }: RigSpec): string | null {
+  const resistor = channel.across_kohm === null ? null : `${channel.across_kohm}\u2009kΩ`;
+  if (topology === 'charge-transfer' || charging.inductor_uH === undefined) return resistor;
+  const coil = `${charging.inductor_uH}\u2009µH`;
+  return resistor === null ? coil : `${coil}, ${resistor}`;
 }
 
 function short(name: string): string {

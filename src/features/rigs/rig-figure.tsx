@@ -1,24 +1,23 @@
 import { Link } from 'react-router-dom';
-import { Caution } from '../../components/caution';
-import { TwoFaces } from '../../components/two-faces';
 import { paths } from '../../config/paths';
 import { useNow } from '../../data/use-now';
-import { headRevisions, latestRevision, type RigDoc } from '../../domain/book/documents/rig';
+import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { LabSettings, RigSpec } from '../../domain/book/rig-spec';
 import { envelopeWords, permitOver, permitWords } from '../../domain/report/permit-words';
 import { dayWords } from '../../domain/report/time-words';
 import { TOPOLOGY_WORDS } from '../../domain/report/words';
 import { standingPermit } from '../../domain/rules/readiness';
-import type { RigView } from './figures-view';
+import { DerivedBlock } from './derived-block';
 import { Gas } from './gas';
-import { NodeList } from './node-list';
+import { PartingView } from './parting-view';
 import { RevisionList } from './revision-list';
 import { RigCircuit } from './rig-circuit';
+import type { RigDerivedView } from './use-rig-derived';
 import { useNames } from '../../data/use-names';
 
 interface Props {
   readonly rig: RigDoc;
-  readonly view: RigView;
+  readonly view: RigDerivedView;
   readonly settings: LabSettings;
 }
 
@@ -36,64 +35,15 @@ export function RigFigure({ rig, view, settings }: Props) {
           {TOPOLOGY_WORDS[spec.topology]}, gap in <Gas name={spec.gap.gas} />. Short {rings} each by itself.
         </span>
       </div>
-      <Parting rig={rig} />
-      <RigCircuit name={rig.name} spec={spec} view={view} />
-      {view.hazard === null ? null : <Caution>Stored: {view.hazard}</Caution>}
+      <PartingView rig={rig} zone={settings.zone} />
+      <RigCircuit name={rig.name} spec={spec} derived={view.derived} />
       <div className="rig-columns">
-        <SelfBreak spec={spec} view={view} settings={settings} />
         <PermitBlock rig={rig} zone={settings.zone} />
-        <NodeList spec={spec} view={view} />
         <ShortingPoints spec={spec} />
       </div>
+      <DerivedBlock spec={spec} settings={settings} view={view} />
       <RevisionList rig={rig} zone={settings.zone} />
     </div>
-  );
-}
-
-function Parting({ rig }: { readonly rig: RigDoc }) {
-  const heads = headRevisions(rig);
-  if (heads.length < 2) return null;
-  return (
-    <Caution>
-      Revisions {heads.map((head) => head.number).join(' and ')} stand against each other. The stricter limit
-      of each pair rules, and nobody may fire until a reviewer settles it.{' '}
-      <Link to={paths.deskRig(rig.id)}>To the Desk</Link>
-    </Caution>
-  );
-}
-
-function SelfBreak({ spec, view, settings }: { readonly spec: RigSpec } & Omit<Props, 'rig'>) {
-  const at = `${spec.gap.highest_bar_g}\u2009bar(g)`;
-  if (!view.sides.ok) {
-    return (
-      <section>
-        <h2>Self-break at {at}</h2>
-        <p>{view.sides.words}</p>
-      </section>
-    );
-  }
-  const { low, law, high, warnings } = view.sides.value;
-  return (
-    <section>
-      <h2>Self-break at {at}, the highest</h2>
-      <TwoFaces
-        label={`Nothing fires below ${low} kV, the law says ${law}, it may hold up to ${high} kV`}
-        low={low}
-        middle={law}
-        high={high}
-        unit="kV"
-        size="read"
-      />
-      <p className="muted">
-        Nothing fires below, law, may hold up to. Ambient {settings.ambient_bar_abs}
-        {'\u2009'}bar(abs), {settings.ambient_C}
-        {'\u2009'}°C, {spec.gap.irradiated ? 'with UV on the gap' : 'without UV on the gap'}.
-      </p>
-      {view.may_sit_charged === null ? null : <Caution>{view.may_sit_charged}</Caution>}
-      {warnings.map((words) => (
-        <Caution key={words}>{words}</Caution>
-      ))}
-    </section>
   );
 }
 

@@ -9,9 +9,14 @@ import { paths } from '../../config/paths';
 import { useLab, useRig } from '../../data/use-book';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
-import { rigView } from './figures-view';
+import type { RigDerived } from '../../domain/rules/rig-derived';
+import { DerivedRows } from './derived-rows';
+import { derivedRows } from './derived-view';
 import { RigFigure } from './rig-figure';
+import { useRigDerived } from './use-rig-derived';
+import { secondsText } from './wait-list';
 import './rigs.css';
+import './edit/edit.css';
 
 /** One rig: what it is, what it can hold, and what it must not be trusted with. */
 export function RigRoute() {
@@ -32,25 +37,22 @@ export function RigRoute() {
   return <RigScreen rig={rig} settings={lab.settings} />;
 }
 
+const KEY_FIGURES = ['stored', 'stress_first', 'rate', 'reach'] as const;
+
 function RigScreen({ rig, settings }: { readonly rig: RigDoc; readonly settings: LabSettings }) {
   const navigate = useNavigate();
-  const revision = latestRevision(rig);
-  const view = rigView(revision.spec, settings);
+  const { spec } = latestRevision(rig);
+  const view = useRigDerived(spec, settings);
+  if (view === null) return null;
   return (
     <Screen
       fields={
-        <FieldColumn label="Derived">
-          {view.rows.map((row) => (
-            <FieldRow
-              key={row.key}
-              label={row.label}
-              source={row.source}
-              value={row.value}
-              unit={row.unit}
-              {...(row.refusal === null ? {} : { refusal: row.refusal })}
-            />
-          ))}
-        </FieldColumn>
+        <>
+          <DerivedRows label="Derived" rows={derivedRows(view.derived, KEY_FIGURES)} />
+          <FieldColumn label="Wait">
+            <WaitRow wait={view.derived.wait} />
+          </FieldColumn>
+        </>
       }
       thumbs={
         <ThumbZone
@@ -68,11 +70,37 @@ function RigScreen({ rig, settings }: { readonly rig: RigDoc; readonly settings:
               label="Revise"
               onComplete={() => void navigate(paths.reviseRig(rig.id))}
             />,
+            <ThumbDome
+              key="parts"
+              label="Parts and wear"
+              onComplete={() => void navigate(paths.rigParts(rig.id))}
+            />,
           ]}
         />
       }
     >
       <RigFigure rig={rig} view={view} settings={settings} />
     </Screen>
+  );
+}
+
+function WaitRow({ wait }: { readonly wait: RigDerived['wait'] }) {
+  if (!wait.ok)
+    return (
+      <FieldRow label="Wait" source="before the stick" value={null} unit="s" refusal={wait.refusal.words} />
+    );
+  if (wait.value.type === 'unknown')
+    return (
+      <FieldRow
+        label="Wait"
+        source="before the stick"
+        value={null}
+        unit="s"
+        refusal="A bleed is not known: no number."
+      />
+    );
+  const { wait_s, computed_s } = wait.value;
+  return (
+    <FieldRow label="Wait" source={`bleeds in ${secondsText(computed_s)}`} value={String(wait_s)} unit="s" />
   );
 }

@@ -5,7 +5,7 @@ import { readField } from './edit-field';
 import { fromOwn, readTyped, toOwn, typedText, unitsOf } from './edit-units';
 import type { RigEdit } from './use-rig-edit';
 
-const WORDS: KeypadWords = {
+export const KEYPAD_WORDS: KeypadWords = {
   erase: 'Erase',
   clear: 'Clear',
   enter: 'Enter',
@@ -42,7 +42,7 @@ function FieldKeypad({
       initial={shownIn(unit)}
       units={units}
       unit={unit}
-      words={WORDS}
+      words={KEYPAD_WORDS}
       allowMinus={field.kind === 'number' && field.min < 0}
       onText={(next) => edit.setText(field.key, keep(next, unit))}
       onUnit={(next) => {

@@ -16,6 +16,7 @@ import type { NumberEdit, DayEdit } from './edit-field';
 import { EMPTY_EDIT, type EditDraft } from './edit-form';
 import { SECTIONS, sectionFields, sectionOf, type Section } from './edit-sections';
 import { confirmSection, editState, hindranceOf, stepText, suggestSection } from './edit-state';
+import { withDielectric } from './dielectric-choice';
 import { newRow, rowsOf, rowsText, type ListKey } from './spec-texts';
 
 /** What the screen shows: one section, all of them in a list, or what would be written. */
@@ -119,6 +120,8 @@ export function useRigEdit(rig: RigDoc | null) {
     },
     takeRowOut: (list: ListKey, row: string) =>
       setText(list, rowsText(rowsOf(state.textOf(list)).filter((one) => one !== row))),
+    chooseDielectric: (side: 'first' | 'second', name: string) =>
+      set((now) => withDielectric(now, side, name)),
     suggest: (section: Section) => set((now) => suggestSection(now, section, state.base)),
     confirm: (section: Section) => set((now) => confirmSection(now, section, state.base)),
     setName: (name: string) => set((now) => ({ ...now, name })),
