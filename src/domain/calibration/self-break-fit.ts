@@ -44,6 +44,8 @@ const MODEL = 'Least squares on the logarithm of the voltage';
 const VALID = 'gaps and pressures among the readings; the low side for hold-off stays with the law';
 
 const MOST = 5000;
+/** Far under the minimum of any gas, and far enough from nought for logarithms. */
+const LOWEST_KV = 0.01;
 const OUTLIER_SIGMAS = 4;
 const MOST_OUTLIERS = 0.25;
 /** Own choice. */
@@ -181,8 +183,8 @@ function readingsRefusal(readings: readonly SelfBreakReading[]): Refusal | undef
       field: 'voltage_kV',
       name: `${name}, voltage`,
       unit: 'kV',
-      min: 0,
-      minExcluded: true,
+      min: LOWEST_KV,
+      minReason: 'no gap breaks under it',
       max: 1000,
     });
     if (!voltage.ok) return voltage.refusal;

@@ -35,7 +35,8 @@ export function formatFigure(value: number, { digits, rounding }: FigureFormat):
   const rounded = roundToDecimals(value, decimals, rounding);
   // Rounding 9.96 up gives 10.0: one counting digit more, so the count is taken again.
   const shown = 'significant' in digits ? decimalsOf(rounded, digits) : decimals;
-  const text = Math.abs(rounded).toFixed(Math.max(0, shown));
+  if (!Number.isFinite(rounded)) return NO_FIGURE;
+  const text = digitsOf(Math.abs(rounded), Math.max(0, shown));
   const [whole = '0', fraction] = text.split('.');
   const grouped = whole.replace(/\B(?=(\d{3})+$)/g, ',');
   const sign = rounded < 0 ? MINUS : '';
@@ -60,6 +61,13 @@ export function roundToDecimals(value: number, decimals: number, rounding: Round
 /** As `roundToDecimals`, counted in significant digits. */
 export function roundToSignificant(value: number, significant: number, rounding: Rounding): number {
   return roundToDecimals(value, decimalsOf(value, { significant }), rounding);
+}
+
+/** From here on the engine writes an exponent of its own accord. */
+const EXPONENT_FROM = 1e21;
+
+function digitsOf(size: number, decimals: number): string {
+  return size < EXPONENT_FROM ? size.toFixed(decimals) : BigInt(size).toString();
 }
 
 function decimalsOf(value: number, digits: Digits): number {
