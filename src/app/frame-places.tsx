@@ -33,11 +33,19 @@ function placesOf(rig: string | undefined): readonly Place[] {
     { key: 'lookups', label: 'Lookups', href: paths.lookupsOf(rig) },
     { key: 'checks', label: 'Checks', href: paths.checks(rig) },
     { key: 'rigs', label: 'Rigs', href: paths.rigs() },
+    { key: 'kit', label: 'Kit', href: paths.kit() },
   ];
 }
 
-/** Desk, Crew, Handover and the settings have their place under Bench. */
-const UNDER_BENCH: ReadonlySet<string> = new Set(['desk', 'crew', 'handover', 'settings', 'sign-in']);
+/** Desk, Crew, Handover, Alignment and the settings have their place under Bench. */
+const UNDER_BENCH: ReadonlySet<string> = new Set([
+  'desk',
+  'crew',
+  'handover',
+  'alignment',
+  'settings',
+  'sign-in',
+]);
 
 function currentPlace(pathname: string): string {
   const place = pathname.split('/')[1] ?? '';

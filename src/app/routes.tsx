@@ -11,6 +11,10 @@ const SettingsRoute = lazy(() =>
 const BenchFaceRoute = lazy(() =>
   import('../features/bench/bench-face-route').then((m) => ({ default: m.BenchFaceRoute })),
 );
+const PeopleRoute = lazy(() =>
+  import('../features/bench/people-route').then((m) => ({ default: m.PeopleRoute })),
+);
+const DueRoute = lazy(() => import('../features/bench/due-route').then((m) => ({ default: m.DueRoute })));
 const LookupsRoute = lazy(() =>
   import('../features/lookups/lookups-route').then((m) => ({ default: m.LookupsRoute })),
 );
@@ -43,6 +47,13 @@ const NewRigRoute = lazy(() =>
 const RigPartsRoute = lazy(() =>
   import('../features/rigs/parts/rig-parts-route').then((m) => ({ default: m.RigPartsRoute })),
 );
+const KitRoute = lazy(() => import('../features/kit/kit-route').then((m) => ({ default: m.KitRoute })));
+const KitAddRoute = lazy(() =>
+  import('../features/kit/kit-add-route').then((m) => ({ default: m.KitAddRoute })),
+);
+const KitPieceRoute = lazy(() =>
+  import('../features/kit/kit-piece-route').then((m) => ({ default: m.KitPieceRoute })),
+);
 const HandoverRoute = lazy(() =>
   import('../features/handover/handover-route').then((m) => ({ default: m.HandoverRoute })),
 );
@@ -60,6 +71,9 @@ const DeskHeldRoute = lazy(() =>
 const EmergencyRoute = lazy(() =>
   import('../features/emergency/emergency-route').then((m) => ({ default: m.EmergencyRoute })),
 );
+const ClaimsRoute = lazy(() =>
+  import('../features/emergency/claims-route').then((m) => ({ default: m.ClaimsRoute })),
+);
 
 export interface AppRoute {
   readonly path: string;
@@ -73,6 +87,8 @@ export interface AppRoute {
 export const ROUTES: readonly AppRoute[] = [
   { path: patterns.benchOf, screen: BenchRoute, area: 'Bench' },
   { path: patterns.face, screen: BenchFaceRoute, area: 'Bench' },
+  { path: patterns.people, screen: PeopleRoute, area: 'Bench' },
+  { path: patterns.due, screen: DueRoute, area: 'Bench' },
   { path: patterns.lookupsOf, screen: LookupsRoute, area: 'Lookups' },
   { path: patterns.lookup, screen: LookupRoute, area: 'Lookups' },
   { path: patterns.lookupWithoutRig, screen: LookupRoute, area: 'Lookups' },
@@ -87,6 +103,9 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.rigParts, screen: RigPartsRoute, area: 'Rigs' },
   { path: patterns.reviseRig, screen: ReviseRigRoute, area: 'Rigs' },
   { path: patterns.rig, screen: RigRoute, area: 'Rigs' },
+  { path: patterns.kit, screen: KitRoute, area: 'Kit' },
+  { path: patterns.kitAdd, screen: KitAddRoute, area: 'Kit' },
+  { path: patterns.kitPiece, screen: KitPieceRoute, area: 'Kit' },
   { path: patterns.desk, screen: DeskRoute, area: 'Desk' },
   { path: patterns.deskFiring, screen: DeskFiringRoute, area: 'Desk' },
   { path: patterns.deskRig, screen: DeskRigRoute, area: 'Desk' },
@@ -95,5 +114,6 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.handover, screen: HandoverRoute, area: 'Handover' },
   { path: patterns.settings, screen: SettingsRoute, area: 'Settings' },
   { path: patterns.emergency, screen: EmergencyRoute, area: 'Emergency', open: true },
+  { path: patterns.claims, screen: ClaimsRoute, area: 'Emergency' },
   { path: patterns.signIn, screen: SignInRoute, area: 'Sign-in', open: true },
 ];
