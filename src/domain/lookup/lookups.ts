@@ -1,4 +1,5 @@
 import { ALIGNMENT_LOOKUP } from './alignment-lookup';
+import { CAPACITOR_LOOKUP } from './capacitor-lookup';
 import { CLEARANCE_LOOKUP } from './clearance-lookup';
 import { GAP_LOOKUP } from './gap-lookup';
 import { GAS_LOOKUP } from './gas-lookup';
@@ -7,6 +8,7 @@ import type { Lookup } from './lookup';
 /** Every lookup, in the order of use. */
 export const LOOKUPS: readonly Lookup[] = [
   GAP_LOOKUP,
+  CAPACITOR_LOOKUP,
   ALIGNMENT_LOOKUP,
   GAS_LOOKUP,
   CLEARANCE_LOOKUP,
