@@ -10,7 +10,7 @@ const PROFILES: Readonly<
 > = {
   domed: { sagitta: 1 / 9, edge: 1 / 8 },
   plane: { sagitta: 0, edge: 1 / 16 },
-  cylinder: { sagitta: 0.36, edge: 1 / 12 },
+  cylinder: { sagitta: 0.22, edge: 1 / 12 },
   'capped-rods': { sagitta: 0.5, edge: 1 / 12 },
 };
 
