@@ -1,4 +1,4 @@
-import { invertInto } from './dense-solve';
+import { solveLinear } from '../numerics/solve-linear';
 
 /**
  * Stages of the implicit Runge-Kutta method. Five give order 9 at the end of a step: few, long steps, and the ring of
@@ -100,7 +100,11 @@ function radauNodes(s: number): Float64Array {
 }
 
 function inverse(matrix: Float64Array, n: number): Float64Array {
-  const out = new Float64Array(n * n);
-  if (!invertInto(matrix.slice(), out, n)) throw new Error('a fixed matrix of the method is singular');
-  return out;
+  const system = new Float64Array(2 * n * n);
+  for (let i = 0; i < n; i += 1) {
+    system.set(matrix.subarray(i * n, (i + 1) * n), 2 * i * n);
+    system[2 * i * n + n + i] = 1;
+  }
+  if (!solveLinear(system, n, n)) throw new Error('a fixed matrix of the method is singular');
+  return Float64Array.from({ length: n * n }, (_, at) => system[at + (Math.floor(at / n) + 1) * n] ?? 0);
 }

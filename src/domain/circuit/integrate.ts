@@ -1,9 +1,10 @@
 import type { Circuit } from './circuit-input';
 import { seriesCapacitance_F } from './ideals';
-import { firstReach, pieceAt, pieceSlope } from './piece';
-import { createStepControl } from './step-control';
-import { CHANNEL_VOLTAGE, createStepper, type StepperState } from './stepper';
-import { createWatch, topOf, type Watch } from './watch';
+import { firstReach, pieceEnd, pieceSlope } from './piece';
+import { createStepControl, type GoodStep } from './step-control';
+import { createScratch } from './scratch';
+import { CHANNEL_VOLTAGE, createStepper, STEPPER_SCRATCH, type StepperState } from './stepper';
+import { createWatch, topOf, WATCH_SCRATCH, type Watch } from './watch';
 
 /** What a run leaves behind. */
 export interface Run {
@@ -31,8 +32,13 @@ export const MARGIN = 0.02;
 
 const DEFAULT_TOLERANCE = 2e-5;
 const STEPS_BETWEEN_QUESTIONS = 16;
-const BREAK_PRECISION = 1e-11;
+/** Of the break, as a share of the tolerance. */
+const BREAK_PRECISION = 1e-5;
+/** Of Newton's last move; its square is left. */
+const ITERATION_SHARE = 0.1;
 const MOST_LANDINGS = 5;
+/** Of the ring's current: what stays under it is over before anything of note happens. */
+const LEAST_CURRENT = 0.03;
 // A window's last bit of rounding is not a step.
 const SLIVER = 1e-12;
 
@@ -40,13 +46,18 @@ const SLIVER = 1e-12;
 export function integrate(circuit: Circuit, options: IntegrateOptions = {}): RunEnd {
   const { window_s, charge_V } = circuit;
   const break_V = circuit.channel.break_V ?? Infinity;
-  const stepper = createStepper(circuit);
+  const tolerance = options.tolerance ?? DEFAULT_TOLERANCE;
+  const scratch = createScratch(STEPPER_SCRATCH + WATCH_SCRATCH);
+  const stepper = createStepper(circuit, {
+    scratch,
+    iterationTolerance: ITERATION_SHARE * Math.sqrt(tolerance),
+  });
   const { curves } = stepper;
-  const watch = createWatch();
+  const watch = createWatch(scratch);
   const control = createStepControl(stepper, {
-    tolerance: options.tolerance ?? DEFAULT_TOLERANCE,
+    tolerance,
     scale_V: charge_V,
-    least_A: 1e-3 * ringCurrent_A(circuit),
+    least_A: LEAST_CURRENT * ringCurrent_A(circuit),
   });
   let firingSwing_V: number | null = null;
   let rounds = 0;
@@ -63,9 +74,9 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
       h = good.next;
       continue;
     }
+    firingSwing_V = followOpen(good);
     const length = landOnBreak(reach * good.length, good.length);
     if (length > 0) take(length);
-    firingSwing_V = followOpen(good.length);
     stepper.fire();
     h = firstStep(circuit.channel.inductance_H, circuit.channel);
   }
@@ -99,10 +110,10 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
     if (!(length > SLIVER * window_s)) return 0;
     for (let landing = 0; landing < MOST_LANDINGS; landing += 1) {
       if (!stepper.attempt(length)) return 0;
-      const voltage = pieceAt(curves, CHANNEL_VOLTAGE, 1);
+      const voltage = pieceEnd(curves, CHANNEL_VOLTAGE);
       const slope = (Math.sign(voltage) * pieceSlope(curves, CHANNEL_VOLTAGE, 1)) / length;
       const missing = break_V - Math.abs(voltage);
-      if (Math.abs(missing) <= BREAK_PRECISION * break_V || slope <= 0) break;
+      if (Math.abs(missing) <= BREAK_PRECISION * tolerance * break_V || slope <= 0) break;
       const better = Math.min(longest, Math.max(0.5 * length, length + missing / slope));
       if (landing === MOST_LANDINGS - 1 || better === length) break;
       length = better;
@@ -110,20 +121,22 @@ export function integrate(circuit: Circuit, options: IntegrateOptions = {}): Run
     return length;
   }
 
-  /** Goes on with the channel open to the top of the swing, or until it is clear of the break; then comes back. */
-  function followOpen(firstTry: number): number {
+  /**
+   * How high the swing goes with the channel open, from the step just attempted to its top or until it is clear of the
+   * break; then comes back.
+   */
+  function followOpen(crossing: GoodStep): number {
     const kept = { ...stepper.state };
-    let next = firstTry;
+    let step: GoodStep | undefined = crossing;
     let top = break_V;
-    while (top < (1 + MARGIN) * break_V) {
-      const good = control.goodStep(next);
-      if (good === undefined) break;
-      top = Math.max(top, topOf(curves, CHANNEL_VOLTAGE, { start_s: 0, length_s: good.length }).size);
-      if (pieceAt(curves, CHANNEL_VOLTAGE, 1) * pieceSlope(curves, CHANNEL_VOLTAGE, 1) <= 0) break;
+    while (step !== undefined) {
+      top = Math.max(top, topOf(curves, CHANNEL_VOLTAGE, { start_s: 0, length_s: step.length }).size);
+      const over = pieceEnd(curves, CHANNEL_VOLTAGE) * pieceSlope(curves, CHANNEL_VOLTAGE, 1) <= 0;
+      if (over || top >= (1 + MARGIN) * break_V) break;
       stepper.accept();
-      next = good.next;
+      step = control.goodStep(step.next);
     }
-    stepper.restore(kept);
+    if (step !== crossing) stepper.restore(kept);
     return top;
   }
 }

@@ -1,28 +1,39 @@
 import type { InversionCircuit } from './circuit-input';
-import { STAGES, type Collocation } from './collocation';
-import { invertInto, multiplyInto } from './dense-solve';
+import { STAGES } from './collocation';
 import type { FeedNetwork } from './feed-network';
+import { matrixOf, MODE_COUNT, MODE_IM, MODE_RE, RADAU, rowSumsOf, sumOfFive, WEIGHTS } from './method';
+import type { Scratch } from './scratch';
 
 const S = STAGES;
+
+/** Length of scratch that a network takes. */
+export const INVERSION_SCRATCH = 5 * S * S + 5 * S + 4 * WEIGHTS;
 
 /**
  * LC inversion (physics D): C1 va' = -ig + iL - ic; C2 vb' = -iL + ic; Lc ic' = va - vb - Rc ic. The gap shorts va, the
  * channel sees vb - va.
  */
-export function inversionNetwork(circuit: InversionCircuit, { a, w, w1 }: Collocation): FeedNetwork {
+export function inversionNetwork(circuit: InversionCircuit, scratch: Scratch): FeedNetwork {
   const { charge_V, first_F, second_F, charging_H, charging_ohm } = circuit;
-  const scratch = new Float64Array(S * S);
-  const admittance = new Float64Array(S * S);
-  // Admittance times `a`, and `a` times that.
-  const once = new Float64Array(S * S);
-  const twice = new Float64Array(S * S);
-  const chargingFree = new Float64Array(S);
-  const zGap = new Float64Array(S * S);
-  const zCross = new Float64Array(S * S);
-  const zChannel = new Float64Array(S * S);
+  const { a, b } = RADAU;
+  const zGap = scratch(S * S);
+  const zCross = scratch(S * S);
+  const zChannel = scratch(S * S);
+  // Charging current for a charge that has left either capacitor, and the charge of it.
+  const current = scratch(S * S);
+  const charge = scratch(S * S);
+  // What a charging current and a voltage across it at the start give by themselves: current and charge at the stages.
+  const currentOfCurrent = scratch(S);
+  const currentOfVoltage = scratch(S);
+  const chargeOfCurrent = scratch(S);
+  const chargeOfVoltage = scratch(S);
+  const flow = scratch(S);
+  const decay = scratch(WEIGHTS);
+  const admittance = scratch(WEIGHTS);
+  const decayCharge = scratch(WEIGHTS);
+  const admittanceCharge = scratch(WEIGHTS);
   let perFirst = 0;
   let perSecond = 0;
-  let perStep = 0;
   return {
     zGap,
     zCross,
@@ -32,62 +43,81 @@ export function inversionNetwork(circuit: InversionCircuit, { a, w, w1 }: Colloc
     setStep(h) {
       perFirst = h / first_F;
       perSecond = h / second_F;
-      perStep = charging_H / h;
       const series = perFirst + perSecond;
-      for (let k = 0; k < S * S; k += 1) scratch[k] = perStep * (w[k] ?? 0) + series * (a[k] ?? 0);
-      for (let i = 0; i < S; i += 1) scratch[i * (S + 1)] = (scratch[i * (S + 1)] ?? 0) + charging_ohm;
-      if (!invertInto(scratch, admittance, S)) return false;
-      multiplyInto(once, admittance, { other: a, factor: 1, n: S });
-      multiplyInto(twice, a, { other: once, factor: 1, n: S });
+      const perHenry = h / charging_H;
+      const damping = perHenry * charging_ohm;
+      const ring = perHenry * series;
+      // At every mode x: 1/(1 + damping x + ring x^2), and the charging branch's admittance x/Lc times that.
+      for (let mode = 0; mode < MODE_COUNT; mode += 1) {
+        const x = MODE_RE[mode] ?? 0;
+        const y = MODE_IM[mode] ?? 0;
+        const re = 1 + damping * x + ring * (x * x - y * y);
+        const im = damping * y + 2 * ring * x * y;
+        const size = re * re + im * im;
+        const even = 2 * mode;
+        const odd = even + 1;
+        const dRe = (decay[even] = re / size);
+        const dIm = (decay[odd] = -im / size);
+        const qRe = (decayCharge[even] = x * dRe - y * dIm);
+        const qIm = (decayCharge[odd] = x * dIm + y * dRe);
+        const aRe = (admittance[even] = perHenry * qRe);
+        const aIm = (admittance[odd] = perHenry * qIm);
+        admittanceCharge[even] = x * aRe - y * aIm;
+        admittanceCharge[odd] = x * aIm + y * aRe;
+      }
+      rowSumsOf(decay, currentOfCurrent);
+      rowSumsOf(admittance, currentOfVoltage);
+      rowSumsOf(decayCharge, chargeOfCurrent);
+      rowSumsOf(admittanceCharge, chargeOfVoltage);
+      // Volts of the flow count with x once more: the charge, and the charge of that.
+      matrixOf(admittanceCharge, current);
+      for (let mode = 0; mode < MODE_COUNT; mode += 1) {
+        const x = MODE_RE[mode] ?? 0;
+        const y = MODE_IM[mode] ?? 0;
+        const re = admittanceCharge[2 * mode] ?? 0;
+        const im = admittanceCharge[2 * mode + 1] ?? 0;
+        admittanceCharge[2 * mode] = x * re - y * im;
+        admittanceCharge[2 * mode + 1] = x * im + y * re;
+      }
+      matrixOf(admittanceCharge, charge);
       for (let k = 0; k < S * S; k += 1) {
         const one = a[k] ?? 0;
-        const two = twice[k] ?? 0;
+        const two = charge[k] ?? 0;
         zGap[k] = perFirst * (one - perFirst * two);
         zCross[k] = -perFirst * (one - series * two);
         zChannel[k] = series * (one - series * two);
       }
-      return true;
     },
     free({ first_V, second_V, charging_A }, gap_V, channel_V) {
+      const across_V = first_V - second_V;
       for (let i = 0; i < S; i += 1) {
-        let sum = 0;
-        for (let j = 0; j < S; j += 1) {
-          sum += (admittance[i * S + j] ?? 0) * (perStep * (w1[j] ?? 0) * charging_A + first_V - second_V);
-        }
-        chargingFree[i] = sum;
-      }
-      for (let i = 0; i < S; i += 1) {
-        let charge = 0;
-        for (let j = 0; j < S; j += 1) charge += (a[i * S + j] ?? 0) * (chargingFree[j] ?? 0);
-        gap_V[i] = first_V - perFirst * charge;
-        channel_V[i] = second_V - first_V + (perFirst + perSecond) * charge;
+        const flown = (chargeOfCurrent[i] ?? 0) * charging_A + (chargeOfVoltage[i] ?? 0) * across_V;
+        gap_V[i] = first_V - perFirst * flown;
+        channel_V[i] = (perFirst + perSecond) * flown - across_V;
       }
     },
-    respond({ first_V, second_V }, { gap_A, channel_A }, out) {
+    respond({ first_V, second_V, charging_A }, { gap_A, channel_A }, out) {
       const series = perFirst + perSecond;
+      const across_V = first_V - second_V;
       for (let i = 0; i < S; i += 1) {
-        let current = chargingFree[i] ?? 0;
-        for (let j = 0; j < S; j += 1) {
-          const flow = series * (channel_A[j] ?? 0) - perFirst * (gap_A[j] ?? 0);
-          current += (once[i * S + j] ?? 0) * flow;
-        }
-        out.charging_A[i] = current;
+        out.charging_A[i] = (currentOfCurrent[i] ?? 0) * charging_A + (currentOfVoltage[i] ?? 0) * across_V;
+        flow[i] = series * (channel_A[i] ?? 0) - perFirst * (gap_A[i] ?? 0);
       }
       for (let i = 0; i < S; i += 1) {
-        let fromFirst = 0;
-        let fromSecond = 0;
-        for (let j = 0; j < S; j += 1) {
-          const share = a[i * S + j] ?? 0;
-          const across = (channel_A[j] ?? 0) - (out.charging_A[j] ?? 0);
-          fromFirst += share * ((gap_A[j] ?? 0) - across);
-          fromSecond += share * across;
-        }
-        out.first_V[i] = first_V - perFirst * fromFirst;
-        out.second_V[i] = second_V - perSecond * fromSecond;
+        const row = i * S;
+        out.charging_A[i] = (out.charging_A[i] ?? 0) + sumOfFive(current, row, flow);
+        out.channel_V[i] =
+          (out.channel_V[i] ?? 0) - sumOfFive(zCross, row, gap_A) - sumOfFive(zChannel, row, channel_A);
       }
     },
-    channelVoltage: (first_V, second_V) => second_V - first_V,
-    loss_W: (_second_V, charging_A) => charging_ohm * charging_A * charging_A,
+    advance(state, { gap_A, channel_A }, { charging_A }) {
+      const across = sumOfFive(b, 0, channel_A) - sumOfFive(b, 0, charging_A);
+      state.first_V -= perFirst * (sumOfFive(b, 0, gap_A) - across);
+      state.second_V -= perSecond * across;
+      state.charging_A = charging_A[S - 1] ?? 0;
+    },
+    channelVoltage: ({ first_V, second_V }) => second_V - first_V,
+    loss_W: (_channel_V, charging_A) => charging_ohm * charging_A * charging_A,
     stored_J: ({ first_V, second_V, charging_A }) =>
       0.5 *
       (first_F * first_V * first_V + second_F * second_V * second_V + charging_H * charging_A * charging_A),

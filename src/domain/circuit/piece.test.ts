@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { firstReach, pieceAt, pieceBound, pieceSlope, pieceTop } from './piece';
+import { firstReach, pieceAt, pieceBound, pieceEnd, pieceSlope, pieceTop } from './piece';
 
 // 3 theta - 3 theta^2: rises to 0.75 in the middle.
 const HILL = Float64Array.from([0, 3, -3, 0, 0, 0]);
@@ -10,7 +10,8 @@ describe('a piece', () => {
   it('has its value, its slope and its bound', () => {
     expect(pieceAt(HILL, 0, 0.25)).toBeCloseTo(0.5625, 14);
     expect(pieceSlope(HILL, 0, 0.25)).toBeCloseTo(1.5, 14);
-    expect(pieceBound(HILL, 0)).toBe(6);
+    expect(pieceBound(HILL, 0)).toBeCloseTo(0.9, 14);
+    expect(pieceEnd(RISING, 0)).toBe(2);
   });
 
   it.each([

@@ -1,5 +1,5 @@
 import { legendreLeading, STAGES } from './collocation';
-import { pieceAt } from './piece';
+import { pieceEnd } from './piece';
 import { CHANNEL_CURRENT, CHANNEL_VOLTAGE, CHARGING_CURRENT, GAP_CURRENT, type Stepper } from './stepper';
 
 export interface StepLimits {
@@ -10,12 +10,18 @@ export interface StepLimits {
   readonly least_A: number;
 }
 
+export interface GoodStep {
+  readonly length: number;
+  /** What to try after it. */
+  readonly next: number;
+}
+
 export interface StepControl {
   /**
    * Attempts steps from `wanted` downwards until one is good enough, and says how long it is and what to try next;
    * undefined when the run is too long to follow.
    */
-  readonly goodStep: (wanted: number) => { readonly length: number; readonly next: number } | undefined;
+  readonly goodStep: (wanted: number) => GoodStep | undefined;
   readonly steps: () => number;
 }
 
@@ -37,16 +43,20 @@ export function createStepControl(
   let largest_A = least_A;
 
   function coarseness(): number {
-    const top = (offset: number) => Math.abs(curves[offset + STAGES] ?? 0) * LEGENDRE_SHARE;
     const here_A = Math.max(
-      Math.abs(pieceAt(curves, GAP_CURRENT, 1)),
-      Math.abs(pieceAt(curves, CHANNEL_CURRENT, 1)),
+      Math.abs(pieceEnd(curves, GAP_CURRENT)),
+      Math.abs(pieceEnd(curves, CHANNEL_CURRENT)),
     );
-    const worst_A = Math.max(top(GAP_CURRENT), top(CHANNEL_CURRENT), top(CHARGING_CURRENT));
+    const worst_A = Math.max(highest(GAP_CURRENT), highest(CHANNEL_CURRENT), highest(CHARGING_CURRENT));
     const coarse =
-      Math.max(worst_A / Math.max(largest_A, here_A), top(CHANNEL_VOLTAGE) / scale_V) / tolerance;
+      Math.max(worst_A / Math.max(largest_A, here_A), highest(CHANNEL_VOLTAGE) / scale_V) / tolerance;
     if (coarse <= 1) largest_A = Math.max(largest_A, here_A);
     return coarse;
+  }
+
+  /** Size of a curve's highest Legendre term. */
+  function highest(offset: number): number {
+    return Math.abs(curves[offset + STAGES] ?? 0) * LEGENDRE_SHARE;
   }
 
   return {

@@ -1,17 +1,16 @@
 import { channelResistance, gapResistance } from './branch-laws';
+import { createBranchSystem, SYSTEM_SCRATCH } from './branch-system';
 import type { Circuit } from './circuit-input';
-import { radauCollocation, STAGES } from './collocation';
-import { solveInPlace } from './dense-solve';
+import { STAGES } from './collocation';
 import type { NetworkState } from './feed-network';
-import { inversionNetwork } from './inversion-network';
+import { INVERSION_SCRATCH, inversionNetwork } from './inversion-network';
+import { RADAU, sumOfFive } from './method';
 import { PIECE, pieceAt } from './piece';
-import { transferNetwork } from './transfer-network';
+import type { Scratch } from './scratch';
+import { TRANSFER_SCRATCH, transferNetwork } from './transfer-network';
 
 const S = STAGES;
-const RADAU = radauCollocation(S);
 
-/** The iteration converges quadratically: what is left after a move this small is its square. */
-const ITERATION_TOLERANCE = 1e-4;
 /** A curve may be followed this many step lengths beyond its end for a guess. */
 const FARTHEST_GUESS = 2;
 const MOST_ITERATIONS = 8;
@@ -23,7 +22,11 @@ export const CHANNEL_CURRENT = 2 * PIECE;
 export const CHARGING_CURRENT = 3 * PIECE;
 export const CURVES = 4 * PIECE;
 
-export interface StepperState extends NetworkState {
+/** Length of scratch that a stepper takes. */
+export const STEPPER_SCRATCH =
+  Math.max(TRANSFER_SCRATCH, INVERSION_SCRATCH) + SYSTEM_SCRATCH + CURVES + PIECE + 10 * S;
+
+export interface StepperState extends Readonly<NetworkState> {
   readonly time_s: number;
   readonly gap_A: number;
   readonly channel_A: number;
@@ -50,25 +53,33 @@ export interface Stepper {
   readonly stored_J: () => number;
 }
 
+export interface StepperOptions {
+  readonly scratch: Scratch;
+  /** The iteration ends with a move this small, as a share; it converges quadratically, so its square is left. */
+  readonly iterationTolerance: number;
+}
+
 /**
  * Follows a circuit by implicit collocation. The capacitors and the charging inductor are eliminated (see
- * `FeedNetwork`), so a step solves for the branch currents at its stages alone: five unknowns before breakdown, ten
- * after it. The exponential law makes that linear; Rompe and Weizel's takes a few Newton steps.
+ * `FeedNetwork`) and then the channel (see `BranchSystem`), so a step solves for the gap's currents at its stages alone.
+ * The exponential law makes that linear; Rompe and Weizel's takes a few Newton steps.
  */
-export function createStepper(circuit: Circuit): Stepper {
+export function createStepper(circuit: Circuit, { scratch, iterationTolerance }: StepperOptions): Stepper {
   const network =
     circuit.topology === 'charge-transfer'
-      ? transferNetwork(circuit, RADAU)
-      : inversionNetwork(circuit, RADAU);
-  const { zGap, zCross, zChannel } = network;
-  const { nodes, a, w, w1, b, powers } = RADAU;
+      ? transferNetwork(circuit, scratch)
+      : inversionNetwork(circuit, scratch);
+  const { nodes, a, b, powers } = RADAU;
   const gapLaw = gapResistance(circuit.gap);
   const gap_H = circuit.gap_H;
   const channel_H = circuit.channel.inductance_H;
+  const branchSystem = createBranchSystem(network, { gap_H, channel_H, scratch });
   let channelLaw: ((time_s: number) => number) | null = null;
   // One object for the whole run: a new one every step would be most of the garbage.
   const state: { -readonly [Key in keyof StepperState]: StepperState[Key] } = {
-    ...network.start,
+    first_V: network.start.first_V,
+    second_V: network.start.second_V,
+    charging_A: network.start.charging_A,
     time_s: 0,
     gap_A: 0,
     channel_A: 0,
@@ -79,39 +90,43 @@ export function createStepper(circuit: Circuit): Stepper {
     fired_s: null,
   };
 
-  const matrix = new Float64Array(4 * S * S);
-  const right = new Float64Array(2 * S);
-  const gapFree_V = new Float64Array(S);
-  const channelFree_V = new Float64Array(S);
-  const gap_ohm = new Float64Array(S);
-  const channel_ohm = new Float64Array(S);
-  const branches = { gap_A: new Float64Array(S), channel_A: new Float64Array(S) };
-  const stages = {
-    first_V: new Float64Array(S),
-    second_V: new Float64Array(S),
-    charging_A: new Float64Array(S),
-  };
-  const curves = new Float64Array(CURVES);
-  const action = new Float64Array(S);
-  const square = new Float64Array(S);
-  const voltage = new Float64Array(S);
+  const gapFree_V = scratch(S);
+  const gap_ohm = scratch(S);
+  const channel_ohm = scratch(S);
+  const branches = { gap_A: scratch(S), channel_A: scratch(S) };
+  const stages = { channel_V: scratch(S), charging_A: scratch(S) };
+  const action = scratch(S);
+  const square = scratch(S);
+  const pull = scratch(S);
+  const curves = scratch(CURVES);
   // Gap current over the step before, to guess the next by.
-  const before = new Float64Array(PIECE);
+  const before = scratch(PIECE);
   let beforeStep = 0;
   let readyFor = 0;
   let step = 0;
 
   function attempt(h: number): boolean {
     if (h !== readyFor) {
-      if (!network.setStep(h)) return false;
+      network.setStep(h);
       readyFor = h;
     }
     step = h;
-    network.free(state, gapFree_V, channelFree_V);
+    network.free(state, gapFree_V, stages.channel_V);
     if (channelLaw !== null) {
       for (let i = 0; i < S; i += 1) channel_ohm[i] = channelLaw(state.time_s + h * (nodes[i] ?? 0));
     }
+    const { gap_A, channel_A } = state;
+    const prepared = branchSystem.prepare({
+      step: h,
+      gap_A,
+      channel_A,
+      gapFree_V,
+      channelFree_V: stages.channel_V,
+      channel_ohm: channelLaw === null ? null : channel_ohm,
+    });
+    if (!prepared) return false;
     if (!(gapLaw.by === 'time' ? solveByTime(gapLaw.at) : solveByAction(gapLaw))) return false;
+    branchSystem.follow(branches);
     network.respond(state, branches, stages);
     drawCurves();
     return true;
@@ -119,37 +134,28 @@ export function createStepper(circuit: Circuit): Stepper {
 
   function solveByTime(at: (time_s: number) => number): boolean {
     for (let i = 0; i < S; i += 1) gap_ohm[i] = at(state.time_s + step * (nodes[i] ?? 0));
-    const width = buildSystem();
-    if (!solveInPlace(matrix, right, width)) return false;
-    takeSolution();
-    return true;
+    return branchSystem.solve(gap_ohm, null, branches);
   }
 
   function solveByAction(law: Extract<typeof gapLaw, { by: 'action' }>): boolean {
+    const { gap_A } = branches;
     guessGapCurrent();
     let scale = Math.abs(state.gap_A);
     for (let iteration = 0; iteration < MOST_ITERATIONS; iteration += 1) {
       resistByAction(law);
-      const width = buildSystem();
+      // Not needed any more once the action is known: the squares make room for the guess.
+      square.set(gap_A);
       for (let i = 0; i < S; i += 1) {
-        const pull = 2 * step * (branches.gap_A[i] ?? 0) * law.slope(action[i] ?? 0, gap_ohm[i] ?? 0);
-        for (let j = 0; j < S; j += 1) {
-          const entry = i * width + j;
-          const guess = branches.gap_A[j] ?? 0;
-          const change = pull * (a[i * S + j] ?? 0) * guess;
-          matrix[entry] = (matrix[entry] ?? 0) + change;
-          right[i] = (right[i] ?? 0) + change * guess;
-        }
+        pull[i] = 2 * step * (gap_A[i] ?? 0) * law.slope(action[i] ?? 0, gap_ohm[i] ?? 0);
       }
-      if (!solveInPlace(matrix, right, width)) return false;
+      if (!branchSystem.solve(gap_ohm, pull, branches)) return false;
       let moved = 0;
       for (let i = 0; i < S; i += 1) {
-        const found = right[i] ?? 0;
-        moved = Math.max(moved, Math.abs(found - (branches.gap_A[i] ?? 0)));
+        const found = gap_A[i] ?? 0;
+        moved = Math.max(moved, Math.abs(found - (square[i] ?? 0)));
         scale = Math.max(scale, Math.abs(found));
       }
-      takeSolution();
-      if (moved <= ITERATION_TOLERANCE * scale) {
+      if (moved <= iterationTolerance * scale) {
         // The ledger wants the resistance of the currents found, not of the last guess.
         resistByAction(law);
         return true;
@@ -170,64 +176,24 @@ export function createStepper(circuit: Circuit): Stepper {
   function resistByAction(law: Extract<typeof gapLaw, { by: 'action' }>): void {
     for (let j = 0; j < S; j += 1) square[j] = (branches.gap_A[j] ?? 0) ** 2;
     for (let i = 0; i < S; i += 1) {
-      let sum = 0;
-      for (let j = 0; j < S; j += 1) sum += (a[i * S + j] ?? 0) * (square[j] ?? 0);
       // A coarse guess may run below what was there: the action never falls.
-      const here = state.action_A2s + Math.max(0, step * sum);
+      const here = state.action_A2s + Math.max(0, step * sumOfFive(a, i * S, square));
       action[i] = here;
       gap_ohm[i] = law.at(here);
     }
   }
 
-  /** Stage equations of the branches; with the channel open only the gap's. */
-  function buildSystem(): number {
-    const width = channelLaw === null ? S : 2 * S;
-    const perGap = gap_H / step;
-    const perChannel = channel_H / step;
-    for (let i = 0; i < S; i += 1) {
-      const row = i * width;
-      for (let j = 0; j < S; j += 1) {
-        const k = i * S + j;
-        matrix[row + j] = perGap * (w[k] ?? 0) + (zGap[k] ?? 0);
-      }
-      matrix[row + i] = (matrix[row + i] ?? 0) + (gap_ohm[i] ?? 0);
-      right[i] = perGap * (w1[i] ?? 0) * state.gap_A + (gapFree_V[i] ?? 0);
-      if (channelLaw === null) continue;
-      const low = (i + S) * width;
-      for (let j = 0; j < S; j += 1) {
-        const k = i * S + j;
-        matrix[row + S + j] = zCross[k] ?? 0;
-        matrix[low + j] = zCross[k] ?? 0;
-        matrix[low + S + j] = perChannel * (w[k] ?? 0) + (zChannel[k] ?? 0);
-      }
-      matrix[low + S + i] = (matrix[low + S + i] ?? 0) + (channel_ohm[i] ?? 0);
-      right[i + S] = perChannel * (w1[i] ?? 0) * state.channel_A + (channelFree_V[i] ?? 0);
-    }
-    return width;
-  }
-
-  function takeSolution(): void {
-    for (let i = 0; i < S; i += 1) {
-      branches.gap_A[i] = right[i] ?? 0;
-      branches.channel_A[i] = channelLaw === null ? 0 : (right[i + S] ?? 0);
-    }
-  }
-
   function drawCurves(): void {
-    const { first_V, second_V, charging_A } = stages;
-    for (let i = 0; i < S; i += 1) voltage[i] = network.channelVoltage(first_V[i] ?? 0, second_V[i] ?? 0);
-    draw(CHANNEL_VOLTAGE, network.channelVoltage(state.first_V, state.second_V), voltage);
+    draw(CHANNEL_VOLTAGE, network.channelVoltage(state), stages.channel_V);
     draw(GAP_CURRENT, state.gap_A, branches.gap_A);
     if (channelLaw !== null) draw(CHANNEL_CURRENT, state.channel_A, branches.channel_A);
-    if (network.hasCharging) draw(CHARGING_CURRENT, state.charging_A, charging_A);
+    if (network.hasCharging) draw(CHARGING_CURRENT, state.charging_A, stages.charging_A);
   }
 
   function draw(curve: number, start: number, values: Float64Array): void {
     for (let k = 0; k < PIECE; k += 1) {
       const row = k * PIECE;
-      let sum = (powers[row] ?? 0) * start;
-      for (let i = 0; i < S; i += 1) sum += (powers[row + 1 + i] ?? 0) * (values[i] ?? 0);
-      curves[curve + k] = sum;
+      curves[curve + k] = (powers[row] ?? 0) * start + sumOfFive(powers, row + 1, values);
     }
   }
 
@@ -244,20 +210,17 @@ export function createStepper(circuit: Circuit): Stepper {
       if (channelLaw !== null) {
         channel_W += weight * (channel_ohm[i] ?? 0) * (branches.channel_A[i] ?? 0) ** 2;
       }
-      loss_W += weight * network.loss_W(stages.second_V[i] ?? 0, stages.charging_A[i] ?? 0);
+      loss_W += weight * network.loss_W(stages.channel_V[i] ?? 0, stages.charging_A[i] ?? 0);
     }
-    const last = S - 1;
+    network.advance(state, branches, stages);
     state.time_s += step;
-    state.first_V = stages.first_V[last] ?? 0;
-    state.second_V = stages.second_V[last] ?? 0;
-    state.charging_A = stages.charging_A[last] ?? 0;
-    state.gap_A = branches.gap_A[last] ?? 0;
-    state.channel_A = branches.channel_A[last] ?? 0;
+    state.gap_A = branches.gap_A[S - 1] ?? 0;
+    state.channel_A = branches.channel_A[S - 1] ?? 0;
     state.action_A2s += step * action_A2;
     state.gap_J += step * gap_W;
     state.channel_J += step * channel_W;
     state.loss_J += step * loss_W;
-    before.set(curves.subarray(GAP_CURRENT, GAP_CURRENT + PIECE));
+    for (let k = 0; k < PIECE; k += 1) before[k] = curves[GAP_CURRENT + k] ?? 0;
     beforeStep = step;
   }
 

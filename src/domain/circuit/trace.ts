@@ -1,10 +1,14 @@
 import { PIECE, pieceAt } from './piece';
+import type { Scratch } from './scratch';
 
 /** Curves that a trace keeps, in this order: channel voltage, gap current, channel current. */
 export type Curve = 0 | 1 | 2;
 
 const HEAD = 2;
 const STRIDE = HEAD + 3 * PIECE;
+
+/** Length of scratch that a trace takes: room for an ordinary run. */
+export const TRACE_SCRATCH = 64 * STRIDE;
 
 /** The pieces of a run in order of time, for finding crossings and for drawing. */
 export interface Trace {
@@ -19,8 +23,8 @@ export interface Trace {
   readonly reader: () => (curve: Curve, time_s: number) => number;
 }
 
-export function createTrace(): Trace {
-  let data = new Float64Array(64 * STRIDE);
+export function createTrace(scratch: Scratch): Trace {
+  let data = scratch(TRACE_SCRATCH);
   let count = 0;
   const start_s = (piece: number) => data[piece * STRIDE] ?? 0;
   const length_s = (piece: number) => data[piece * STRIDE + 1] ?? 0;

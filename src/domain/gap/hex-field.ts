@@ -36,12 +36,15 @@ export function solveHexField(shape: HexShape): HexField | undefined {
 /** The same for any upper half outline left of x = 0, for the check against cylinders. */
 export function solvePanels(panels: readonly Panel[], gap: number): HexField | undefined {
   const frames = panels.map(frameOf);
-  const matrix = panels.map((at) => {
-    const middle = middleOf(at);
-    return Float64Array.from(frames, (frame) => pairPotential(frame, middle));
+  const size = panels.length;
+  const system = new Float64Array(size * (size + 1));
+  panels.forEach((panel, row) => {
+    const middle = middleOf(panel);
+    frames.forEach((frame, at) => (system[row * (size + 1) + at] = pairPotential(frame, middle)));
+    system[row * (size + 1) + size] = 0.5;
   });
-  const charges = solveLinear(matrix, new Float64Array(panels.length).fill(0.5));
-  if (charges === undefined) return undefined;
+  if (!solveLinear(system, size)) return undefined;
+  const charges = Float64Array.from(panels, (_, row) => system[row * (size + 1) + size] ?? 0);
   let peak = 0;
   panels.forEach((_, index) => {
     if ((charges[index] ?? 0) > (charges[peak] ?? 0)) peak = index;

@@ -27,11 +27,14 @@ const DEPTH = 1.4;
 export function solveRodField(gap: number, length: number): RodField | undefined {
   const outline = rodOutline(gap, length);
   const rings = outline.map(({ inside }) => inside);
-  const matrix = outline.map(({ surface }) =>
-    Float64Array.from(rings, (ring) => pairPotential(ring, surface)),
-  );
-  const charges = solveLinear(matrix, new Float64Array(rings.length).fill(0.5));
-  if (charges === undefined) return undefined;
+  const size = rings.length;
+  const system = new Float64Array(size * (size + 1));
+  outline.forEach(({ surface }, row) => {
+    rings.forEach((ring, at) => (system[row * (size + 1) + at] = pairPotential(ring, surface)));
+    system[row * (size + 1) + size] = 0.5;
+  });
+  if (!solveLinear(system, size)) return undefined;
+  const charges = Float64Array.from(rings, (_, row) => system[row * (size + 1) + size] ?? 0);
   const fieldAt = (share: number) => {
     const z = gap * (0.5 - share);
     let field = 0;

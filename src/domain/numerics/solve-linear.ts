@@ -1,53 +1,64 @@
 /**
- * Solves a dense system of linear equations by elimination with the largest pivot of each column. Rows are left as
- * they are. Undefined where the system has no single solution.
+ * Solves linear equations in place, for several right-hand sides at once: `system` is `size` rows of `size` coefficients
+ * followed by `columns` right-hand sides, and these become the solutions; the coefficients are destroyed. Elimination
+ * with the largest pivot of each column; false where there is no single finite solution.
  */
-export function solveLinear(
-  matrix: readonly (readonly number[] | Float64Array)[],
-  right: readonly number[] | Float64Array,
-): Float64Array | undefined {
-  const size = right.length;
-  const rows = matrix.map((row, index) => Float64Array.from([...row, right[index] ?? Number.NaN]));
+export function solveLinear(system: Float64Array, size: number, columns = 1): boolean {
+  const width = size + columns;
   for (let column = 0; column < size; column += 1) {
-    const pivot = pivotRow(rows, column);
-    const chosen = rows[pivot];
-    const displaced = rows[column];
-    const lead = chosen?.[column] ?? 0;
-    if (chosen === undefined || displaced === undefined || !(Math.abs(lead) > 0)) return undefined;
-    rows[pivot] = displaced;
-    rows[column] = chosen;
-    for (let below = column + 1; below < size; below += 1) {
-      const row = rows[below];
-      if (row !== undefined) eliminate(row, chosen, column);
+    if (!bringUpPivot(system, { size, width, column })) return false;
+    const top = column * width;
+    const share = 1 / (system[top + column] ?? 0);
+    for (let row = column + 1; row < size; row += 1) {
+      const start = row * width;
+      const factor = (system[start + column] ?? 0) * share;
+      if (factor === 0) continue;
+      for (let k = column + 1; k < width; k += 1) {
+        system[start + k] = (system[start + k] ?? 0) - factor * (system[top + k] ?? 0);
+      }
     }
   }
-  return backSubstitute(rows, size);
+  return substituteBack(system, size, width);
 }
 
-function pivotRow(rows: readonly Float64Array[], column: number): number {
-  let best = column;
-  for (let row = column + 1; row < rows.length; row += 1) {
-    if (Math.abs(rows[row]?.[column] ?? 0) > Math.abs(rows[best]?.[column] ?? 0)) best = row;
+function bringUpPivot(
+  system: Float64Array,
+  { size, width, column }: { readonly size: number; readonly width: number; readonly column: number },
+): boolean {
+  let pivot = column;
+  let largest = Math.abs(system[column * width + column] ?? 0);
+  for (let row = column + 1; row < size; row += 1) {
+    const entry = Math.abs(system[row * width + column] ?? 0);
+    if (entry > largest) {
+      largest = entry;
+      pivot = row;
+    }
   }
-  return best;
+  if (!(largest > 0 && largest < Infinity)) return false;
+  if (pivot === column) return true;
+  const one = column * width;
+  const other = pivot * width;
+  for (let k = column; k < width; k += 1) {
+    const kept = system[one + k] ?? 0;
+    system[one + k] = system[other + k] ?? 0;
+    system[other + k] = kept;
+  }
+  return true;
 }
 
-function eliminate(row: Float64Array, pivot: Float64Array, column: number): void {
-  const factor = (row[column] ?? 0) / (pivot[column] ?? 1);
-  if (factor === 0) return;
-  for (let index = column; index < row.length; index += 1) {
-    row[index] = (row[index] ?? 0) - factor * (pivot[index] ?? 0);
+function substituteBack(system: Float64Array, size: number, width: number): boolean {
+  for (let row = size - 1; row >= 0; row -= 1) {
+    const start = row * width;
+    const share = 1 / (system[start + row] ?? 0);
+    for (let column = size; column < width; column += 1) {
+      let rest = system[start + column] ?? 0;
+      for (let k = row + 1; k < size; k += 1) {
+        rest -= (system[start + k] ?? 0) * (system[k * width + column] ?? 0);
+      }
+      const solution = rest * share;
+      if (!Number.isFinite(solution)) return false;
+      system[start + column] = solution;
+    }
   }
-}
-
-function backSubstitute(rows: readonly Float64Array[], size: number): Float64Array | undefined {
-  const solution = new Float64Array(size);
-  for (let index = size - 1; index >= 0; index -= 1) {
-    const row = rows[index];
-    if (row === undefined) return undefined;
-    let rest = row[size] ?? Number.NaN;
-    for (let later = index + 1; later < size; later += 1) rest -= (row[later] ?? 0) * (solution[later] ?? 0);
-    solution[index] = rest / (row[index] ?? Number.NaN);
-  }
-  return solution.every(Number.isFinite) ? solution : undefined;
+  return true;
 }
