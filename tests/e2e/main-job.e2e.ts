@@ -105,6 +105,7 @@ describe('3 · the gap', () => {
   it('answers with two sides, law and validity, and draws the working point', async () => {
     const page = bench.page();
     await goTo(page, 'Lookups');
+    await page.getByRole('main').getByRole('link', { name: /^Gap/ }).click();
     const figure = page.getByRole('main');
     await figure.getByText('nothing fires below').first().waitFor();
     const text = await figure.innerText();

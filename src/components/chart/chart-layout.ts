@@ -23,7 +23,13 @@ export interface LayoutNeeds {
   readonly slice: number;
   readonly wall: boolean;
   readonly topLabel: boolean;
+  /** Letters of the longest figure beside the y axis; as many as two digits and a point take when left out. */
+  readonly labels?: number;
 }
+
+/** Mean advance of a digit, and what lies between the figures and the plot: ticks and their gaps. em */
+const DIGIT_EM = 0.56;
+const TICKS_EM = 1.55;
 
 /** Narrower than this the app is on a phone, px: margins shrink and the slice sets its words in body size. */
 const PHONE_PX = 500;
@@ -37,7 +43,11 @@ export function chartLayout(needs: LayoutNeeds): ChartLayout {
   const margin = width < PHONE_PX ? font / 3 : font * 0.55;
   const sliceWidth = sliceRoom(needs);
   const slice = beside ? { left: margin, right: margin + sliceWidth } : null;
-  const axis = font * (width < PHONE_PX ? 2.75 : 3.1);
+  const ticks = Math.max(font * TICKS_EM, font * 0.55 + 21);
+  const axis = Math.max(
+    font * (width < PHONE_PX ? 2.75 : 3.1),
+    ticks + (needs.labels ?? 0) * DIGIT_EM * font,
+  );
   const left = (slice?.right ?? 0) + axis;
   const wall = needs.wall ? (width < PHONE_PX ? font * 0.8 : font * 2.36) : 0;
   return {

@@ -54,14 +54,7 @@ export function ChartPlot({ data, layout, plot, font, readOff }: ChartPlotProps)
           {right - left < font * 10 ? (data.limit.short ?? data.limit.label) : data.limit.label}
         </text>
       )}
-      {data.own?.label === undefined ? null : (
-        <EndLabel points={data.own.points} label={data.own.label} {...{ plot, font }} />
-      )}
-      {(data.curves ?? []).map((curve, i) =>
-        curve.label === undefined ? null : (
-          <EndLabel key={i} points={curve.points} label={curve.label} {...{ plot, font }} />
-        ),
-      )}
+      <EndLabels {...{ data, plot, font }} />
       {data.notValid === undefined ? null : (
         <text
           className="muted-text"
@@ -188,28 +181,26 @@ function Wall({
   );
 }
 
-function EndLabel({
-  points,
-  label,
-  plot,
-  font,
-}: {
-  readonly points: readonly { x: number; y: number }[];
-  readonly label: string;
-  readonly plot: Plot;
-  readonly font: number;
-}) {
-  const last = points.at(-1);
-  if (last === undefined) return null;
-  return (
-    <text
-      className="chart-halo"
-      x={Math.min(plot.x.at(last.x) + 6, plot.right - label.length * font * 0.5)}
-      y={plot.y.at(last.y) - font * 0.4}
-    >
+/** Every named line says its name at its end; where two end together, the later name stands above the earlier one. */
+function EndLabels({ data, plot, font }: Pick<ChartPlotProps, 'data' | 'plot' | 'font'>) {
+  const named = [...(data.own === undefined ? [] : [data.own]), ...(data.curves ?? [])];
+  const placed: { readonly label: string; readonly x: number; readonly y: number }[] = [];
+  for (const { label, points } of named) {
+    const last = points.findLast((point) => Number.isFinite(point.y));
+    if (label === undefined || last === undefined) continue;
+    const width = label.length * font * 0.5;
+    const x = Math.max(plot.left, Math.min(plot.x.at(last.x) + 6, plot.right - width));
+    let y = plot.y.at(last.y) - font * 0.4;
+    const meets = (each: { readonly x: number; readonly y: number; readonly label: string }) =>
+      Math.abs(each.y - y) < font * 1.1 && each.x < x + width && x < each.x + each.label.length * font * 0.5;
+    for (let hit = placed.find(meets); hit !== undefined; hit = placed.find(meets)) y = hit.y - font * 1.15;
+    placed.push({ label, x, y });
+  }
+  return placed.map(({ label, x, y }) => (
+    <text key={label} className="chart-halo" x={x} y={y}>
       {label}
     </text>
-  );
+  ));
 }
 
 function Span({

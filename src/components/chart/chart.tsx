@@ -8,6 +8,7 @@ import { ChartPlot } from './chart-plot';
 import { ChartSlice } from './chart-slice';
 import { ChartTable } from './chart-table';
 import { scaleOf } from './scale';
+import { ticks } from './ticks';
 import type { ChartData, ChartWords, CursorValues, Slice } from './types';
 import { useFonts } from './use-fonts';
 
@@ -34,9 +35,13 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
   const font = fonts.body;
   const drawn = size.width > 0 && size.height > 0 && font > 0;
   const letters = slice === undefined ? 0 : Math.max(slice.high.words.length, slice.low.words.length);
+  const yLabels = drawn
+    ? ticks(data.y, size.height / (font * 2.4)).map((tick) => tick.label?.length ?? 0)
+    : [];
   const layout = chartLayout({
     ...size,
     font,
+    labels: Math.max(0, data.y.unit.length * 0.8, ...yLabels),
     lead: fonts.lead,
     slice: letters,
     wall: data.wall !== undefined,

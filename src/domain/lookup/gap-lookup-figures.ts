@@ -46,7 +46,7 @@ export function gapFigures(gap: GapAnswer, input: GapInput): readonly Figure[] {
       label: 'stand at most',
       value: gap.stand_at_most_kV,
       rounding: 'down',
-      weight: 'main',
+      weight: 'side',
     },
     {
       key: 'mean_field',

@@ -33,13 +33,15 @@ export function FigureReading({
   );
 }
 
-/** Figures that are wider than this leave the place of a large one. */
-const LARGE_LETTERS = 6;
+/** Figures that are wider than this, their smaller unit counted, leave the place of a large one. */
+const LARGE_LETTERS = 6.5;
+const UNIT_SHARE = 0.5;
 
 /** The large figures of an answer. */
 export function LargeFigure({ figure }: { readonly figure: Figure }) {
   const { figure: digits, power } = figureText(figure);
-  const size = digits.length > LARGE_LETTERS || power !== null ? 'pin' : 'answer';
+  const letters = digits.length + UNIT_SHARE * figure.unit.length;
+  const size = letters > LARGE_LETTERS || power !== null ? 'pin' : 'answer';
   return (
     <div className="lookup-large" role="group" aria-label={figure.label}>
       <span className="lookup-large-label">{figure.label}</span>

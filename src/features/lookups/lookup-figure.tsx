@@ -1,5 +1,5 @@
 import { SaysBlock } from '../../components/says-block';
-import type { LookupAnswer } from '../../domain/lookup/lookup';
+import type { Figure, LookupAnswer } from '../../domain/lookup/lookup';
 import { LargeFigure, ListedFigure } from './figure-reading';
 import { LookupActions } from './lookup-actions';
 import { facesOf, LookupChart } from './lookup-chart';
@@ -21,16 +21,7 @@ export function LookupFigure({ view }: { readonly view: LookupView }) {
       ) : answer === null ? (
         <div className="lookup-empty">{computing ? <p className="muted">Computing</p> : null}</div>
       ) : (
-        <>
-          <AnswerBody view={view} answer={answer} />
-          <div className="lookup-notes">
-            <SaysBlock muted>
-              {computing ? <b>Computing. </b> : null}
-              {answer.model}.
-            </SaysBlock>
-            <LookupCaution view={view} answer={answer} />
-          </div>
-        </>
+        <AnswerBody view={view} answer={answer} />
       )}
       <LookupActions view={view} />
     </div>
@@ -40,31 +31,45 @@ export function LookupFigure({ view }: { readonly view: LookupView }) {
 function AnswerBody({ view, answer }: { readonly view: LookupView; readonly answer: LookupAnswer }) {
   const sliced = facesOf(answer) !== null && answer.plot?.point !== undefined;
   const large = sliced ? [] : answer.figures.filter((figure) => figure.weight === 'answer');
-  const listed = answer.figures.filter(
-    (figure) => figure.weight !== 'answer' && !(sliced && figure.face !== undefined),
-  );
-  const figures = (
-    <div className="lookup-figures">
-      {large.map((figure) => (
-        <LargeFigure key={figure.key} figure={figure} />
-      ))}
-      {answer.says === undefined ? null : <p className="lookup-says">{answer.says}</p>}
-      {listed.length === 0 ? null : (
-        <div className="lookup-list">
-          {listed.map((figure) => (
-            <ListedFigure key={figure.key} figure={figure} />
-          ))}
-        </div>
-      )}
-    </div>
-  );
-  if (answer.plot === undefined) return <div className="lookup-answer alone">{figures}</div>;
+  const of = (weight: Figure['weight']) =>
+    answer.figures.filter((figure) => figure.weight === weight && !(sliced && figure.face !== undefined));
+  const { plot } = answer;
   return (
-    <div className={`lookup-answer ${sliced ? 'sliced' : 'beside'}`}>
-      {sliced && listed.length === 0 && answer.says === undefined ? null : figures}
-      <div className="lookup-plot">
-        <LookupChart answer={answer} plot={answer.plot} lean={leanOf(view, answer)} />
+    <>
+      <div className={`lookup-answer ${plot === undefined ? 'alone' : sliced ? 'sliced' : 'beside'}`}>
+        {large.length === 0 && answer.says === undefined ? null : (
+          <div className="lookup-figures">
+            {large.map((figure) => (
+              <LargeFigure key={figure.key} figure={figure} />
+            ))}
+            {answer.says === undefined ? null : <p className="lookup-says">{answer.says}</p>}
+          </div>
+        )}
+        {plot === undefined ? null : (
+          <div className="lookup-plot">
+            <LookupChart answer={answer} plot={plot} lean={leanOf(view, answer)} />
+          </div>
+        )}
       </div>
+      <div className="lookup-notes">
+        <SaysBlock muted>
+          {view.computing ? <b>Computing. </b> : null}
+          {answer.model}.
+        </SaysBlock>
+        <LookupCaution view={view} answer={answer} />
+      </div>
+      <FigureList figures={[...of('main'), ...of('side')]} />
+    </>
+  );
+}
+
+function FigureList({ figures }: { readonly figures: readonly Figure[] }) {
+  if (figures.length === 0) return null;
+  return (
+    <div className="lookup-list">
+      {figures.map((figure) => (
+        <ListedFigure key={figure.key} figure={figure} />
+      ))}
     </div>
   );
 }
