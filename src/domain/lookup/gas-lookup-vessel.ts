@@ -1,4 +1,4 @@
-import { hoopStress, storedEnergyBrode, storedEnergyIsothermal } from '../gas/vessel';
+import { hoopStress, storedEnergyBrode, storedEnergyIsothermal, storedGasEnergy } from '../gas/vessel';
 import type { Answer, Warning } from '../units/answer';
 import { ok, type Result } from '../units/result';
 import type { Entered } from './entered';
@@ -28,12 +28,12 @@ export function vesselAnswer(input: Entered): Result<LookupAnswer> {
   };
   const parts = allOf({
     hoop: stressOf(body),
+    larger: storedGasEnergy(gas),
     brode: storedEnergyBrode(gas),
     isothermal: storedEnergyIsothermal(gas),
   });
   if (!parts.ok) return parts;
-  const { hoop, brode, isothermal } = parts.value;
-  const larger = brode.value >= isothermal.value ? brode : isothermal;
+  const { hoop, larger, brode, isothermal } = parts.value;
   const strength_MPa = input.maybe('strength_MPa');
   return ok({
     figures: [

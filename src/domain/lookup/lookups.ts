@@ -1,9 +1,13 @@
 import { ALIGNMENT_LOOKUP } from './alignment-lookup';
+import { BEAM_LOOKUP } from './beam-lookup';
 import { CAPACITOR_LOOKUP } from './capacitor-lookup';
 import { CLEARANCE_LOOKUP } from './clearance-lookup';
+import { DYE_LOOKUP } from './dye-lookup';
 import { GAP_LOOKUP } from './gap-lookup';
 import { GAS_LOOKUP } from './gas-lookup';
 import type { Lookup } from './lookup';
+import { ROOM_LOOKUP } from './room-lookup';
+import { UNITS_LOOKUP } from './units-lookup';
 
 /** Every lookup, in the order of use. */
 export const LOOKUPS: readonly Lookup[] = [
@@ -12,6 +16,10 @@ export const LOOKUPS: readonly Lookup[] = [
   ALIGNMENT_LOOKUP,
   GAS_LOOKUP,
   CLEARANCE_LOOKUP,
+  BEAM_LOOKUP,
+  DYE_LOOKUP,
+  ROOM_LOOKUP,
+  UNITS_LOOKUP,
 ];
 
 export function lookupOf(key: string): Lookup | undefined {

@@ -20,6 +20,9 @@ export const LIMITS_PPM = {
 const OZONE_MG_M3_PER_PPM = 47.998 / 24.055;
 const AIR_MOLECULES_CM3 = numberDensity_cm3(BAR_PER_ATM, 293.15);
 
+/** Nitrogen oxides of a hot spark in air, molecules a joule: transient spark, abstract read. */
+export const SPARK_MOLECULES_PER_J = 7e16;
+
 const POWER_RULE = { field: 'power_W', name: 'Power', unit: 'W', min: 0, max: 1e6 } as const;
 const ROOM_RULE = { field: 'room_m3', name: 'Room volume', unit: 'm\u00b3', min: 0.1, max: 1e6 } as const;
 const AIR_CHANGES_RULE = {
