@@ -25,7 +25,10 @@ export const TAG_ASKED_AFTER_MS = 8 * HOUR_MS;
 /** Where something that is due is mended. */
 export type DueLead =
   | { readonly type: 'check'; readonly purpose: 'make-safe' | 'before-firing' }
-  | { readonly type: 'people' | 'permit' | 'authorisation' | 'stand-down' | 'rig' | 'parts' | 'kit' | 'claims' }
+  | {
+      readonly type:
+        'people' | 'permit' | 'authorisation' | 'stand-down' | 'rig' | 'parts' | 'kit' | 'claims';
+    }
   | { readonly type: 'firings' };
 
 export interface DueItem {
@@ -230,9 +233,7 @@ function kitItem(note: KitNote, now_ms: number): DueItem[] {
 function dueVessel({ rig, now_ms }: DueFacts): DueItem[] {
   const proof = vesselProof(latestRevision(rig).spec, now_ms);
   if (proof === null) return [];
-  return [
-    { key: 'vessel', title: 'Proof test of the vessel', ...proof, danger: 'people', lead: { type: 'rig' } },
-  ];
+  return [{ key: 'vessel', title: 'Vessel proof test', ...proof, danger: 'people', lead: { type: 'rig' } }];
 }
 
 function dueGas({ rig, kit, settings }: DueFacts): DueItem[] {

@@ -1,11 +1,16 @@
+import { Link } from 'react-router-dom';
 import { AgeScale } from '../../components/age-scale';
 import { Reading } from '../../components/reading';
 import { WideMark } from '../../components/wide-mark';
+import { paths } from '../../config/paths';
 import { usePerson } from '../../data/use-book';
+import { useNames } from '../../data/use-names';
+import { useNow } from '../../data/use-now';
 import type { RigDoc } from '../../domain/book/documents/rig';
 import { DECLARED_WORDS } from '../../domain/report/words';
 import { ageWords, clockWords } from '../../domain/report/time-words';
 import type { DeclaredView } from '../../domain/rules/declared-view';
+import { peopleWords } from './people-words';
 import { stripState } from './strip-state';
 
 interface Props {
@@ -36,7 +41,7 @@ export function BenchMark({ rig, view, zone }: Props) {
         <AgeScale age_h={known && age !== null ? age / HOUR_MS : null} steps={48} variant="face" />
         <p className="bench-mark-detail">
           <span>
-            <Declarer view={view} zone={zone} /> {tagWords(rig)}
+            <Declarer view={view} zone={zone} /> <PeopleLine rig={rig} />
           </span>
           <span className="muted">{known ? 'at 12 h: not known, treat as charged' : ''}</span>
         </p>
@@ -75,7 +80,14 @@ function Declarer({ view, zone }: { readonly view: DeclaredView; readonly zone: 
   );
 }
 
-function tagWords(rig: RigDoc): string {
-  if (rig.hands.length === 0) return 'No tags in.';
-  return rig.hands.length === 1 ? 'Hands are in.' : `${rig.hands.length} tags in.`;
+/** Whose hands are in and who is checked in; leads to where tags come off. */
+function PeopleLine({ rig }: { readonly rig: RigDoc }) {
+  const nameOf = useNames();
+  const { stamp } = useNow(10_000);
+  const words = peopleWords(rig, nameOf, stamp);
+  return (
+    <Link to={paths.people(rig.id)} className="bench-people">
+      {rig.hands.length === 0 ? words : <b>{words}</b>}
+    </Link>
+  );
 }

@@ -1,10 +1,13 @@
+import { Fragment, lazy, Suspense, useMemo, type ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { Reading } from '../../components/reading';
 import { TwoFaces } from '../../components/two-faces';
 import { paths } from '../../config/paths';
+import { useLookups } from '../../data/use-book';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
 import { selfBreak } from '../../domain/gap/self-break';
+import { pinnedLookups } from '../../domain/lookup/kept';
 import { gapInputOf } from '../../domain/rules/rig-gap';
 import { rigFigures, storedAt_J, type RigFigures } from '../../domain/rules/rig-figures';
 import { formatFigure, formatQuantity } from '../../domain/units/format-quantity';
@@ -15,23 +18,46 @@ interface Props {
   readonly settings: LabSettings;
 }
 
-/** The three figures that matter before a hand goes near the rig, all from the supply's limit. */
+const PLACES = 3;
+
+const PinnedLookups = lazy(() => import('./pinned-lookups').then((m) => ({ default: m.PinnedLookups })));
+
+/** Three lookups prefilled from the rig: first what was pinned, then gap, stored energy and wait from the supply's limit. */
 export function BenchPins({ rig, revision, settings }: Props) {
-  const { spec } = revision;
-  const figures = rigFigures(spec, settings);
+  const pinned = pinnedLookups(useLookups(rig.id)).slice(0, PLACES);
+  const free = PLACES - pinned.length;
+  const defaults = useDefaults({ rig, revision, settings }).filter(
+    ({ key }) => !pinned.some(({ kept }) => kept.lookup === key),
+  );
   return (
     <section className="bench-pins" aria-label="Pinned lookups">
-      <GapPin rig={rig} revision={revision} settings={settings} />
-      {figures.ok ? (
-        <>
-          <StoredPin revision={revision} settings={settings} figures={figures.value} />
-          <WaitPin revision={revision} settings={settings} figures={figures.value} />
-        </>
-      ) : (
-        <p className="bench-pin">{figures.refusal.words}</p>
+      {pinned.length === 0 ? null : (
+        <Suspense
+          fallback={pinned.map((doc) => (
+            <div key={doc.id} className="bench-pin" />
+          ))}
+        >
+          <PinnedLookups rig={rig} settings={settings} docs={pinned} />
+        </Suspense>
       )}
+      {defaults.slice(0, free).map(({ key, pin }) => (
+        <Fragment key={key}>{pin}</Fragment>
+      ))}
     </section>
   );
+}
+
+function useDefaults(props: Props): readonly { readonly key: string; readonly pin: ReactNode }[] {
+  const { revision, settings } = props;
+  const figures = useMemo(() => rigFigures(revision.spec, settings), [revision.spec, settings]);
+  const gap = { key: 'gap', pin: <GapPin {...props} /> };
+  if (!figures.ok)
+    return [gap, { key: 'figures', pin: <p className="bench-pin">{figures.refusal.words}</p> }];
+  return [
+    gap,
+    { key: 'stored', pin: <StoredPin {...props} figures={figures.value} /> },
+    { key: 'wait', pin: <WaitPin {...props} figures={figures.value} /> },
+  ];
 }
 
 function GapPin({ rig, revision, settings }: Props) {

@@ -9,8 +9,9 @@ import type { LabDoc } from '../../domain/book/documents/lab';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import { BenchMark } from './bench-mark';
 import { BenchPins } from './bench-pins';
+import { BenchRooms } from './bench-rooms';
 import { BenchSide } from './bench-side';
-import { BenchThumbs } from './bench-thumbs';
+import { BenchActsInFigure, BenchThumbs } from './bench-thumbs';
 import './bench.css';
 
 export function BenchRoute() {
@@ -48,9 +49,11 @@ function Bench({
       banner={<BenchMark rig={rig} view={view} zone={lab.settings.zone} />}
       thumbs={<BenchThumbs rig={rig} view={view} />}
     >
+      <BenchActsInFigure rig={rig} />
       <div className="bench-columns">
         <BenchPins rig={rig} revision={latestRevision(rig)} settings={lab.settings} />
         <BenchSide rig={rig} view={view} zone={lab.settings.zone} />
+        <BenchRooms rig={rig.id} />
       </div>
     </Screen>
   );

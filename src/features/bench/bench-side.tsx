@@ -1,15 +1,16 @@
+import { lazy, Suspense } from 'react';
 import { Link } from 'react-router-dom';
 import { Reading } from '../../components/reading';
 import { paths } from '../../config/paths';
-import { useFiring, usePending, usePerson, useReadings } from '../../data/use-book';
+import { useFiring, useHeldBack, usePending, usePerson, useReadings } from '../../data/use-book';
 import { useHandover } from '../../data/use-handover';
 import { useNow } from '../../data/use-now';
 import { standingReading } from '../../domain/book/documents/reading';
 import type { RigDoc } from '../../domain/book/documents/rig';
 import { agoWords, dayWords } from '../../domain/report/time-words';
-import { LOOK_WORDS } from '../../domain/report/words';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import { formatFigure } from '../../domain/units/format-quantity';
+import { firingStateWords, outcomeWords } from './outcome-words';
 import { useDueNext } from './use-due-next';
 
 interface Props {
@@ -18,26 +19,34 @@ interface Props {
   readonly zone: string;
 }
 
-/** What is due, what was last, what waits, and the way to the rooms behind the bench. */
+const BenchDue = lazy(() => import('./bench-due').then((m) => ({ default: m.BenchDue })));
+
+/** What is due, what was last, and what waits. */
 export function BenchSide({ rig, view, zone }: Props) {
   const due = useDueNext(rig, view);
   return (
     <section className="bench-side" aria-label="Due next and last">
       <div>
-        <p className="muted">Due next</p>
+        <Link to={paths.due(rig.id)} className="bench-due-head">
+          <span>Due next</span> <span>all, and why</span>
+        </Link>
         <p>
           <b>{due.title}</b>
         </p>
         <p className="muted">{due.why}</p>
+        <Suspense fallback={null}>
+          <BenchDue rig={rig} view={view} primary={due} />
+        </Suspense>
       </div>
-      {rig.last_firing === null ? null : <LastFiring id={rig.last_firing} zone={zone} />}
+      {rig.last_firing === null ? (
+        <div>
+          <p className="muted">Last firing</p>
+          <p>none yet</p>
+        </div>
+      ) : (
+        <LastFiring id={rig.last_firing} zone={zone} />
+      )}
       <HandoverLine />
-      <nav className="bench-rooms" aria-label="Behind the bench">
-        <Link to={paths.desk()}>Desk</Link>
-        <Link to={paths.crew()}>Crew</Link>
-        <Link to={paths.settings()}>Settings</Link>
-        <Link to={paths.signIn()}>Person</Link>
-      </nav>
     </section>
   );
 }
@@ -54,20 +63,12 @@ function LastFiring({ id, zone }: { readonly id: string; readonly zone: string }
       <p className="muted">Last firing, {dayWords(firing.opened.stamp.wall_ms, zone)}</p>
       <Reading
         value={formatFigure(firing.shots, { digits: { decimals: 0 }, rounding: 'nearest' })}
-        unit="shots"
+        unit={firing.shots === 1 ? 'shot' : 'shots'}
       />
+      <p>{outcomeWords(now?.type === 'stands' ? now.values : null)}</p>
       <p>
-        {by?.name}
-        {now?.type === 'stands' ? `, ${LOOK_WORDS[now.values.looked]}` : ''}
+        {by?.name}, <span className="muted">{firingStateWords(firing)}</span>
       </p>
-      {now?.type === 'stands' ? (
-        <p className="nowrap">
-          {formatFigure(now.values.voltage_kV, { digits: { decimals: 1 }, rounding: 'nearest' })} kV
-          {now.values.output_uJ === null
-            ? ''
-            : `, ${formatFigure(now.values.output_uJ, { digits: { significant: 3 }, rounding: 'nearest' })} µJ`}
-        </p>
-      ) : null}
     </Link>
   );
 }
@@ -75,15 +76,17 @@ function LastFiring({ id, zone }: { readonly id: string; readonly zone: string }
 function HandoverLine() {
   const { last_exchange_ms, state, words } = useHandover();
   const pending = usePending();
+  const held = useHeldBack().filter((one) => one.mine).length;
   const { stamp } = useNow(10_000);
-  const title =
+  const last =
     last_exchange_ms === null
       ? 'Handover, not yet'
-      : `Handover, ${agoWords(Math.max(0, stamp.wall_ms - last_exchange_ms))}`;
+      : `Handed over ${agoWords(Math.max(0, stamp.wall_ms - last_exchange_ms))}`;
   return (
     <Link to={paths.handover()}>
-      <p className="muted">{title}</p>
-      <p>{pending.count > 0 ? pending.words : 'nothing waits here'}</p>
+      <p className="muted">{last}</p>
+      <p>{pending.count > 0 ? pending.words : 'Nothing waits here'}</p>
+      {held === 0 ? null : <b>{held} held back</b>}
       {state === 'sign-in-to-send' || state === 'revoked' || state === 'trouble' ? <p>{words}</p> : null}
     </Link>
   );

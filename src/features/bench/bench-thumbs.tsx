@@ -29,11 +29,23 @@ export function BenchThumbs({ rig, view }: Props) {
   const go = useGo(rig);
   const label = due.type === 'open-check' && due.purpose === 'make-safe' ? 'Make\nsafe' : LABELS[due.type];
   return (
-    <ThumbZone
-      label="Actions"
-      main={<ThumbDome size="big" label={label} onComplete={() => go(due)} />}
-      others={[<HandsDome key="hands" rig={rig} />, <StandDownDome key="down" rig={rig} />]}
-    />
+    <div className="bench-thumbs">
+      <ThumbZone
+        label="Actions"
+        main={<ThumbDome size="big" label={label} onComplete={() => go(due)} />}
+        others={[<HandsDome key="hands" rig={rig} />, <StandDownDome key="down" rig={rig} />]}
+      />
+    </div>
+  );
+}
+
+/** On a phone these two stand in the figure: over it they would cover a third of the screen. */
+export function BenchActsInFigure({ rig }: { readonly rig: RigDoc }) {
+  return (
+    <div className="bench-acts">
+      <HandsDome rig={rig} />
+      <StandDownDome rig={rig} />
+    </div>
   );
 }
 
