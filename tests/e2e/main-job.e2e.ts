@@ -306,7 +306,9 @@ async function reviseHeron(): Promise<void> {
   await takeRig(page, HERON.name);
   await page.goto(`${lab.url}/rigs/${HERON.id}/revise`);
   await unlock(page, ada.name);
+  await press(page.getByRole('button', { name: /Spark gap/ }));
   await press(page.locator('.step.more'));
+  await press(page.getByRole('button', { name: 'Review', exact: true }));
   await page.getByLabel('Why').fill('Gap measured anew with pin gauges');
   await holdSecond(page.getByRole('button', { name: 'Hold to revise' }));
   await page.getByRole('banner').getByText('to hand over').waitFor();

@@ -10,7 +10,7 @@ import { derivedRows } from './derived-view';
 import { GainBars } from './gain-bars';
 import type { RigDerivedView } from './use-rig-derived';
 import { WaitList } from './wait-list';
-import { waveChart } from './wave-chart';
+import { waveChart, waveWords } from './wave-chart';
 
 const WORDS: ChartWords = {
   showTable: 'Table',
@@ -28,13 +28,12 @@ interface Props {
   readonly view: RigDerivedView;
 }
 
-/** Everything that the numbers give: wave shape, self-break over pressure, figures with what they are worth, waits. */
+/** Everything else that the numbers give: self-break over pressure, figures with what they are worth, waits. */
 export function DerivedBlock({ spec, settings, view }: Props) {
   const { derived } = view;
   const curve = breakChart(spec, settings, derived);
   return (
     <>
-      <Wave view={view} />
       <section className="derived-chart" aria-label="Self-break against pressure">
         <h2>Self-break against pressure</h2>
         {curve.ok ? (
@@ -57,6 +56,12 @@ export function DerivedBlock({ spec, settings, view }: Props) {
   );
 }
 
+/** What the stored energy can do, with the supply beside it. */
+export function Hazard({ view }: { readonly view: RigDerivedView }) {
+  const { hazard } = view.derived;
+  return hazard.ok ? <Caution>Stored: {hazard.value.words}</Caution> : null;
+}
+
 /** The simulated wave shape; what it was simulated with stands under it. */
 export function Wave({ view }: { readonly view: RigDerivedView }) {
   const { transient } = view.derived;
@@ -77,7 +82,8 @@ export function Wave({ view }: { readonly view: RigDerivedView }) {
 function Shape({ transient }: { readonly transient: RigTransient }) {
   return (
     <>
-      <Chart title="Simulated waveform" data={waveChart(transient)} words={WORDS} height_mm={52} />
+      <p className="m-0">{waveWords(transient)}</p>
+      <Chart title="Simulated waveform" data={waveChart(transient)} words={WORDS} height_mm={44} />
       <GainBars transient={transient} />
       {transient.assumed.length === 0 ? null : (
         <p className="muted m-0">Assumed: {transient.assumed.join('; ')}.</p>

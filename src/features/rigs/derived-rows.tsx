@@ -1,41 +1,46 @@
 import { useState } from 'react';
 import { Caution } from '../../components/caution';
 import { FieldRow } from '../../components/field-row';
+import type { RigSpec } from '../../domain/book/rig-spec';
 import type { DerivedRow } from './derived-view';
 
-/** Derived figures: a touch opens what each is worth. Cautions stand in full without one. */
-export function DerivedRows({
-  rows,
-  label,
-}: {
+interface DerivedRowsProps {
   readonly rows: readonly DerivedRow[];
   readonly label: string;
-}) {
+  /** For the narrow column: short labels, and cautions behind the touch as well. They stand in full in the figure. */
+  readonly spec?: RigSpec;
+}
+
+/** Derived figures: a touch opens what each is worth. Cautions stand in full without one. */
+export function DerivedRows({ rows, label, spec }: DerivedRowsProps) {
   const [open, setOpen] = useState<string | null>(null);
   return (
     <section className="derived-rows" aria-label={label}>
       {rows.map((row) => (
         <div key={row.key} className="derived-row">
           <FieldRow
-            label={row.label}
-            source={row.band === null ? '' : row.band}
+            {...(spec === undefined ? { label: row.label, source: row.band ?? '' } : shortWords(row, spec))}
             value={row.value}
             unit={row.unit}
             onPress={() => setOpen(open === row.key ? null : row.key)}
           />
           {row.refusal === null ? null : <p className="derived-words muted m-0">{row.refusal}</p>}
-          {row.caution && row.words !== '' ? <Caution>{row.words}</Caution> : null}
-          {open === row.key && row.refusal === null ? <Worth row={row} /> : null}
+          {spec === undefined && row.caution && row.words !== '' ? <Caution>{row.words}</Caution> : null}
+          {open === row.key && row.refusal === null ? <Worth row={row} said={spec === undefined} /> : null}
         </div>
       ))}
     </section>
   );
 }
 
-function Worth({ row }: { readonly row: DerivedRow }) {
+function Worth({ row, said }: { readonly row: DerivedRow; readonly said: boolean }) {
   return (
     <div className="derived-words">
-      {row.caution || row.words === '' ? null : <p className="m-0">{row.words}</p>}
+      {row.words === '' || (said && row.caution) ? null : row.caution ? (
+        <Caution>{row.words}</Caution>
+      ) : (
+        <p className="m-0">{row.words}</p>
+      )}
       <p className="muted m-0">
         {row.model}. Valid: {row.valid}.
         {row.band === null ? ' By definition, without a band.' : ` Band ${row.band} ${row.unit}.`}
@@ -45,4 +50,27 @@ function Worth({ row }: { readonly row: DerivedRow }) {
       ))}
     </div>
   );
+}
+
+/** An energy never stands without its supply, and a stress never without its limit. */
+function shortWords(row: DerivedRow, spec: RigSpec): { readonly label: string; readonly source: string } {
+  const { supply_kV, supply_mA } = spec.charging;
+  switch (row.key) {
+    case 'stored':
+      return { label: 'Stored', source: `${supply_kV}\u2009kV, ${supply_mA}\u2009mA` };
+    case 'stress_first':
+      return { label: row.label, source: limitWords(spec) };
+    case 'rate':
+      return { label: 'Rate', source: 'at most' };
+    case 'reach':
+      return { label: 'Reach', source: 'past ballast' };
+    default:
+      return { label: row.label, source: row.band ?? '' };
+  }
+}
+
+function limitWords({ first }: RigSpec): string {
+  return first.kind === 'sheet'
+    ? `tested to ${first.strength_kV_mm}\u2009kV/mm`
+    : `rated ${first.rated_kV}\u2009kV`;
 }

@@ -7,7 +7,7 @@ import { envelopeWords, permitOver, permitWords } from '../../domain/report/perm
 import { dayWords } from '../../domain/report/time-words';
 import { TOPOLOGY_WORDS } from '../../domain/report/words';
 import { standingPermit } from '../../domain/rules/readiness';
-import { DerivedBlock } from './derived-block';
+import { DerivedBlock, Hazard, Wave } from './derived-block';
 import { Gas } from './gas';
 import { PartingView } from './parting-view';
 import { RevisionList } from './revision-list';
@@ -37,10 +37,14 @@ export function RigFigure({ rig, view, settings }: Props) {
       </div>
       <PartingView rig={rig} zone={settings.zone} />
       <RigCircuit name={rig.name} spec={spec} derived={view.derived} />
-      <div className="rig-columns">
-        <PermitBlock rig={rig} zone={settings.zone} />
-        <ShortingPoints spec={spec} />
+      <div className="rig-wave">
+        <Wave view={view} />
+        <div>
+          <PermitBlock rig={rig} zone={settings.zone} />
+          <ShortingPoints spec={spec} />
+        </div>
       </div>
+      <Hazard view={view} />
       <DerivedBlock spec={spec} settings={settings} view={view} />
       <RevisionList rig={rig} zone={settings.zone} />
     </div>

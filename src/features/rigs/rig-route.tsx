@@ -48,7 +48,7 @@ function RigScreen({ rig, settings }: { readonly rig: RigDoc; readonly settings:
     <Screen
       fields={
         <>
-          <DerivedRows label="Derived" rows={derivedRows(view.derived, KEY_FIGURES)} />
+          <DerivedRows label="Derived" spec={spec} rows={derivedRows(view.derived, KEY_FIGURES)} />
           <FieldColumn label="Wait">
             <WaitRow wait={view.derived.wait} />
           </FieldColumn>

@@ -16,7 +16,7 @@ export function waveChart({ answer, circuit }: RigTransient): ChartData {
   const all = [...voltage, ...current].map((point) => point.y);
   const end = (time_s.at(-1) ?? 0) * 1e9;
   const break_kV = circuit.channel.break_V === null ? null : circuit.channel.break_V / 1000;
-  const high = Math.max(1, ...all, break_kV ?? 0) * 1.1;
+  const high = Math.max(1, ...all, break_kV ?? 0) * 1.4; // the span stands above the curve
   const rise = riseSpan(voltage, peakVoltage_V / 1000);
   return {
     x: { min: 0, max: end, unit: 'ns', decimals: 1 },
@@ -30,6 +30,20 @@ export function waveChart({ answer, circuit }: RigTransient): ChartData {
       : { limit: { y: break_kV, label: `breaks at ${one(break_kV)} kV`, short: `${one(break_kV)} kV` } }),
     ...(rise === null ? {} : { spans: [rise] }),
   };
+}
+
+/** The peaks in one line: "Channel peaks at 16.8 kV after 28 ns, its current at 5.6 kA." */
+export function waveWords({ answer, staticBreak }: RigTransient): string {
+  const { peakVoltage_V, peakVoltage_s, peakChannel_A, peakGap_A } = answer.transient;
+  const peak = `${three(peakVoltage_V / 1000)}\u2009kV after ${three(peakVoltage_s * 1e9)}\u2009ns`;
+  const held = `It holds ${three(staticBreak.value)}\u2009kV at rest.`;
+  return peakChannel_A === null
+    ? `The channel stays dark: it peaks at ${peak}, the gap’s current at ${three(peakGap_A / 1000)}\u2009kA. ${held}`
+    : `Channel peaks at ${peak}, its current at ${three(peakChannel_A / 1000)}\u2009kA. ${held}`;
+}
+
+function three(value: number): string {
+  return formatFigure(value, { digits: { significant: 3 }, rounding: 'nearest' });
 }
 
 function firstPeak(values: readonly number[]): number {

@@ -17,8 +17,7 @@ export function EditOverview({ edit }: { readonly edit: RigEdit }) {
                 <b>
                   {i + 1} {sectionTitle(section, edit.state.textOf)}
                 </b>
-                <br />
-                <span className="muted">{summaryOf(edit, section)}</span>
+                <span className="edit-summary muted">{summaryOf(edit, section)}</span>
               </span>
               <span className="edit-status">{status === undefined ? '' : statusWords(status)}</span>
             </button>
@@ -33,7 +32,7 @@ export function statusWords({ open, refused, suggested, changed }: SectionStatus
   if (refused > 0) return `${refused} refused`;
   if (open > 0) return `${open} open`;
   if (suggested > 0) return `${suggested} suggested`;
-  return changed > 0 ? `${changed} entered` : 'as it was';
+  return changed > 0 ? `${changed} entered` : '';
 }
 
 /** The first few values, as they stand. */
@@ -51,5 +50,5 @@ function summaryOf(edit: RigEdit, section: (typeof SECTIONS)[number]): string {
     const typed = readTyped(text);
     return [`${typed.number.replace('-', '\u2212')}\u2009${typed.unit ?? field.unit}`.trim()];
   });
-  return said.slice(0, 5).join(', ');
+  return said.join(', ');
 }

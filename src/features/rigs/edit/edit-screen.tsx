@@ -4,7 +4,7 @@ import { SaysBlock } from '../../../components/says-block';
 import { ThumbDome } from '../../../components/thumb-dome';
 import { ThumbZone } from '../../../components/thumb-zone';
 import { latestRevision } from '../../../domain/book/documents/rig';
-import { DerivedBlock } from '../derived-block';
+import { DerivedBlock, Hazard, Wave } from '../derived-block';
 import { DerivedRows } from '../derived-rows';
 import { derivedRows } from '../derived-view';
 import { RigCircuit } from '../rig-circuit';
@@ -23,8 +23,12 @@ export function EditScreen({ edit }: { readonly edit: RigEdit }) {
   const view = useRigDerived(figures?.spec ?? null, edit.settings);
   const fields = (
     <EditFieldsColumn edit={edit}>
-      {view === null ? null : (
-        <DerivedRows label="What comes out" rows={derivedRows(view.derived, KEY_FIGURES)} />
+      {view === null || figures === null ? null : (
+        <DerivedRows
+          label="What comes out"
+          spec={figures.spec}
+          rows={derivedRows(view.derived, KEY_FIGURES)}
+        />
       )}
     </EditFieldsColumn>
   );
@@ -136,6 +140,8 @@ function Derived({ edit, view }: { readonly edit: RigEdit; readonly view: RigDer
         spec={figures.spec}
         derived={view.derived}
       />
+      <Hazard view={view} />
+      <Wave view={view} />
       <DerivedBlock spec={figures.spec} settings={edit.settings} view={view} />
     </>
   );

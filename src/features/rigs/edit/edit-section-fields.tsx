@@ -46,7 +46,10 @@ function ChoiceField({ edit, field }: { readonly edit: RigEdit; readonly field: 
   return (
     <div className="edit-choice">
       <p className="m-0">
-        {field.label} <span className="muted">{sourceOf(edit, field)}</span>
+        {field.label}{' '}
+        <span className="muted">
+          {sourceOf(edit, field)}. {field.help}
+        </span>
       </p>
       <Choice
         label={field.label}
@@ -54,7 +57,6 @@ function ChoiceField({ edit, field }: { readonly edit: RigEdit; readonly field: 
         value={options.some((one) => one.value === text) ? text : null}
         onChange={(value) => edit.setText(field.key, value)}
       />
-      <p className="edit-help muted m-0">{field.help}</p>
       {refusal === undefined ? null : (
         <p className="field-refusal m-0" role="alert">
           {refusal}
@@ -71,14 +73,6 @@ function TextField({ edit, field }: { readonly edit: RigEdit; readonly field: Te
     field.key === 'first.dielectric' ? 'first' : field.key === 'second.dielectric' ? 'second' : null;
   return (
     <div className="edit-choice">
-      {side === null ? null : (
-        <Choice
-          label="Film of the table"
-          options={DIELECTRIC_OPTIONS}
-          value={isMaterial(text) ? text : null}
-          onChange={(name) => edit.chooseDielectric(side, name)}
-        />
-      )}
       <WordsField
         label={field.label}
         hint={`${sourceOf(edit, field)}. ${field.help}`}
@@ -88,6 +82,14 @@ function TextField({ edit, field }: { readonly edit: RigEdit; readonly field: Te
         onChange={(next) => edit.setText(field.key, next.replaceAll('\n', ' '))}
         {...(refusal === undefined ? {} : { refusal })}
       />
+      {side === null ? null : (
+        <Choice
+          label="Film of the table"
+          options={DIELECTRIC_OPTIONS}
+          value={isMaterial(text) ? text : null}
+          onChange={(name) => edit.chooseDielectric(side, name)}
+        />
+      )}
     </div>
   );
 }

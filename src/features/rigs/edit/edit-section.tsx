@@ -12,12 +12,12 @@ export function EditSection({ edit, section }: { readonly edit: RigEdit; readonl
   const suggested = status?.suggested ?? 0;
   return (
     <div className="edit-section">
+      {section === 'first' || section === 'second' ? <Sheet edit={edit} side={section} /> : null}
       {section === 'nodes' || section === 'shorting' || section === 'screws' ? (
         <SectionList edit={edit} section={section} />
       ) : (
         <EditFields edit={edit} fields={edit.fields} />
       )}
-      {section === 'first' || section === 'second' ? <Sheet edit={edit} side={section} /> : null}
       {(status?.open ?? 0) > 0 ? (
         <HoldButton label="Suggest what is open" onComplete={() => edit.suggest(section)} />
       ) : null}

@@ -48,6 +48,7 @@ export function gapFields(textOf: TextOf): readonly EditField[] {
       help: 'Closest distance of the faces, by gauge blocks or pin gauges.',
     }),
     number('gap.gap_error_mm', {
+      label: 'Setting error',
       step: 0.01,
       min: 0,
       minExcluded: false,
@@ -165,7 +166,6 @@ export function capacitorFields(side: 'first' | 'second', textOf: TextOf): reado
     number(at(key), { topology, label, step: 5, help });
   return [
     kind,
-    text(at('dielectric'), { label: 'Dielectric', help: 'Film between the foils. Choose one, or write it.' }),
     number(at('ply_um'), {
       topology,
       label: 'One ply',
@@ -174,7 +174,7 @@ export function capacitorFields(side: 'first' | 'second', textOf: TextOf): reado
     }),
     number(at('plies'), {
       topology,
-      label: 'Plies between two foils',
+      label: 'Plies between foils',
       step: 1,
       min: 1,
       max: 100,
@@ -183,7 +183,7 @@ export function capacitorFields(side: 'first' | 'second', textOf: TextOf): reado
     }),
     number(at('plate_pairs'), {
       topology,
-      label: 'Active plate pairs',
+      label: 'Plate pairs',
       step: 1,
       min: 1,
       max: 1000,
@@ -194,7 +194,7 @@ export function capacitorFields(side: 'first' | 'second', textOf: TextOf): reado
     mm('width_mm', 'Overlap, width', 'Of the area where the foils face each other.'),
     number(at('eps_r'), {
       topology,
-      label: 'Relative permittivity',
+      label: 'Permittivity',
       step: 0.1,
       min: 1,
       max: 100,
@@ -206,6 +206,7 @@ export function capacitorFields(side: 'first' | 'second', textOf: TextOf): reado
       step: 5,
       help: 'Short-time strength by the film’s data sheet at this thickness.',
     }),
+    text(at('dielectric'), { label: 'Dielectric', help: 'Film between the foils. Choose one, or write it.' }),
   ];
 }
 
