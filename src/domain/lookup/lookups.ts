@@ -1,6 +1,7 @@
 import { ALIGNMENT_LOOKUP } from './alignment-lookup';
 import { BEAM_LOOKUP } from './beam-lookup';
 import { CAPACITOR_LOOKUP } from './capacitor-lookup';
+import { CIRCUIT_LOOKUP } from './circuit-lookup';
 import { CLEARANCE_LOOKUP } from './clearance-lookup';
 import { DYE_LOOKUP } from './dye-lookup';
 import { GAP_LOOKUP } from './gap-lookup';
@@ -13,6 +14,7 @@ import { UNITS_LOOKUP } from './units-lookup';
 export const LOOKUPS: readonly Lookup[] = [
   GAP_LOOKUP,
   CAPACITOR_LOOKUP,
+  CIRCUIT_LOOKUP,
   ALIGNMENT_LOOKUP,
   GAS_LOOKUP,
   CLEARANCE_LOOKUP,

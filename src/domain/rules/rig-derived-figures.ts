@@ -1,6 +1,7 @@
 import type { CapacitorSpec, RigSpec } from '../book/rig-spec';
 import { plyThickness_m } from '../capacitor/capacitance';
 import { dielectricStress, stressMargin } from '../capacitor/stress';
+import type { CircuitAnswer } from '../circuit/circuit-answer';
 import { inversionPeak, transferPeak } from '../circuit/ideals';
 import { planRate } from '../charging/rate-limits';
 import type { SupplyReach } from '../charging/supply-reach';
@@ -192,7 +193,7 @@ export function circuitFigures(
   const { figures, transient, broken, at } = from;
   const assumed =
     transient.ok && transient.value.assumed.length > 0 ? ` ${assumedWords(transient.value)}` : '';
-  const solved = (key: DerivedFigure['key'], label: string, of: (one: RigTransient) => Result<Answer>) =>
+  const found = (key: DerivedFigure['key'], label: string, of: (one: RigTransient) => Result<Answer>) =>
     ({ key, label, figure: andThen(transient, of), digits: 3, words: '' }) as const;
   return [
     row({
@@ -220,32 +221,34 @@ export function circuitFigures(
       words: 'A ceiling without losses',
     }),
     row({
-      ...solved('channel_peak', 'Channel peak', ({ answer: { peakVoltage } }) => kilovolt(ok(peakVoltage))),
+      ...found('channel_peak', 'Channel peak', ({ answer: { peakVoltage } }) => kilovolt(ok(peakVoltage))),
       rounding: 'nearest',
       words: transient.ok ? `${firesWords(transient.value)}${assumed}` : '',
       caution: transient.ok && !(transient.value.answer.fires.asGiven && transient.value.answer.fires.always),
     }),
     row({
-      ...solved('time_to_peak', 'Time to the peak', ({ answer: { timeToPeak } }) => nanosecond(timeToPeak)),
+      ...found('time_to_peak', 'Time to the peak', ({ answer: { timeToPeak } }) => nanosecond(timeToPeak)),
       rounding: 'nearest',
     }),
     row({
-      ...solved('rise', 'Rise of the channel voltage', ({ answer: { rise } }) => nanosecond(rise)),
+      ...found('rise', 'Rise of the channel voltage', ({ answer: { rise } }) => nanosecond(rise)),
       rounding: 'up',
     }),
     row({
-      ...solved('current_rise', 'Rise of the channel current', currentRiseAnswer),
+      ...found('current_rise', 'Rise of the channel current', ({ answer: solved, currentRise_s }) =>
+        rigCurrentRise(solved, currentRise_s),
+      ),
       rounding: 'up',
       words: transient.ok ? (transient.value.gain?.words ?? '') : '',
     }),
     row({
-      ...solved('gap_current', 'Peak current of the gap', ({ answer: { peakGapCurrent } }) =>
+      ...found('gap_current', 'Peak current of the gap', ({ answer: { peakGapCurrent } }) =>
         ok(peakGapCurrent),
       ),
       rounding: 'nearest',
     }),
     row({
-      ...solved('channel_current', 'Peak current of the channel', ({ answer: { peakChannelCurrent } }) =>
+      ...found('channel_current', 'Peak current of the channel', ({ answer: { peakChannelCurrent } }) =>
         peakChannelCurrent === null ? DARK : ok(peakChannelCurrent),
       ),
       rounding: 'nearest',
@@ -261,10 +264,10 @@ const DARK: Result<Answer> = {
 /** Points of the wave shape lie half a per cent of the window apart. Own estimate, with what the laws leave open. */
 const CURRENT_RISE_SHARE = 0.3;
 
-/** Rise of the channel current, ns. */
-export function currentRiseAnswer({ answer: solved, currentRise_s }: RigTransient): Result<Answer> {
+/** Rise of the channel current, ns; refused while the channel stays dark. */
+export function rigCurrentRise({ rise }: CircuitAnswer, currentRise_s: number | null): Result<Answer> {
   if (currentRise_s === null) return DARK;
-  const { model, valid, warnings } = solved.rise;
+  const { model, valid, warnings } = rise;
   return computed([], () => ({
     value: currentRise_s * 1e9,
     unit: 'ns',

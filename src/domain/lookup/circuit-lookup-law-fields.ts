@@ -1,0 +1,211 @@
+import { GAS_NAMES } from '../gap/gas-table';
+import { AMBIENT_FIELD } from './ambient-field';
+import { is, isInversion, isWound, length, ohm } from './circuit-lookup-forms';
+import { choice, linear, log, number } from './field-forms';
+import type { Field } from './lookup';
+
+export const GAP_LAW_FIELDS: readonly Field[] = [
+  choice('gap_law', 'Gap law', {
+    options: [
+      ['rompe-weizel', 'Rompe and Weizel'],
+      ['exponential', 'exponential'],
+    ],
+    help: 'How the resistance of the closed gap falls: by the energy put into the spark, or simply with time.',
+  }),
+  length('gap_mm', 'Gap', {
+    slide: log(0.2, 20),
+    help: 'Distance of the gap\u2019s electrodes, for its law and its spark.',
+  }),
+  number('pressure_bar_g', 'Gap pressure', {
+    unit: 'bar(g)',
+    min: -1.1,
+    max: 20,
+    step: 0.05,
+    decimals: 2,
+    slide: linear(0, 3),
+    help: 'Of the spark gap: a denser gas falls in resistance more slowly.',
+    shownFor: is('gap_law', 'rompe-weizel'),
+  }),
+  number('rw_constant', 'Rompe and Weizel constant', {
+    unit: 'cm\u00b2\u2009atm/(V\u00b2\u2009s)',
+    min: 0.01,
+    max: 100,
+    step: 0.1,
+    decimals: 2,
+    slide: linear(0.3, 1.5),
+    help: '0.5 to 1.2 has been published for air and nitrogen.',
+    shownFor: is('gap_law', 'rompe-weizel'),
+  }),
+  number('gap_fall_ns', 'Gap falls within', {
+    unit: 'ns',
+    min: 0.001,
+    max: 1e5,
+    step: 0.1,
+    decimals: 2,
+    slide: log(0.1, 20),
+    help: 'Time in which the resistance falls to a third (by e).',
+    shownFor: is('gap_law', 'exponential'),
+  }),
+  ohm('gap_start_ohm', 'Gap starts at', {
+    min: 0.1,
+    max: 1e8,
+    slide: log(50, 5000),
+    help: 'Resistance as the gap closes. The law has no start of its own; it matters only weakly.',
+  }),
+  ohm('gap_end_ohm', 'Gap ends at', {
+    min: 0,
+    max: 1e4,
+    slide: linear(0, 2),
+    help: 'What is left of it in the end.',
+  }),
+];
+
+export const CHANNEL_FIELDS: readonly Field[] = [
+  choice('channel_gas', 'Channel gas', {
+    options: GAS_NAMES.filter((gas) => gas !== 'H2O').map((gas) => [gas, gas] as const),
+    help: 'Gas between the laser electrodes. The gain window is judged for nitrogen and air.',
+  }),
+  length('spacing_mm', 'Channel spacing', {
+    slide: log(0.3, 20),
+    help: 'Between the laser electrodes at the narrower end.',
+  }),
+  choice('break_by', 'Channel breaks', {
+    options: [
+      ['static', 'over its static break'],
+      ['voltage', 'at a voltage'],
+      ['never', 'never'],
+    ],
+    help: 'Fast charging takes the channel past the voltage at which it breaks slowly.',
+  }),
+  number('over_static', 'Over static break', {
+    unit: '',
+    min: 0.1,
+    max: 20,
+    step: 0.05,
+    decimals: 2,
+    slide: linear(0.8, 3),
+    help: '1.25 to 1.35 is common practice for nitrogen at this pace; a scope tells for your own.',
+    shownFor: is('break_by', 'static'),
+  }),
+  number('break_kV', 'Breaks at', {
+    unit: 'kV',
+    min: 0.01,
+    max: 1000,
+    step: 0.5,
+    decimals: 1,
+    slide: linear(0.5, 60),
+    help: 'Channel voltage at which the current starts, from a scope.',
+    shownFor: is('break_by', 'voltage'),
+  }),
+  ohm('channel_start_ohm', 'Channel starts at', {
+    min: 0.1,
+    max: 1e8,
+    slide: log(50, 5000),
+    help: 'Resistance as it breaks.',
+  }),
+  ohm('channel_end_ohm', 'Channel ends at', {
+    min: 0,
+    max: 1e4,
+    slide: linear(0, 3),
+    help: 'What is left of it in the end.',
+  }),
+  number('channel_fall_ns', 'Channel falls within', {
+    unit: 'ns',
+    min: 0.001,
+    max: 1e5,
+    step: 0.1,
+    decimals: 2,
+    slide: log(0.2, 10),
+    help: 'Time in which its resistance falls to a third (by e). It decides how far the voltage overshoots.',
+  }),
+  number('oxygen_percent', 'Oxygen in the gas', {
+    unit: '%',
+    min: 0,
+    max: 100,
+    step: 0.1,
+    decimals: 2,
+    slide: linear(0, 21),
+    optional: true,
+    help: 'Bottled nitrogen that flows has about 0.1 %; air has 21 %. Above half a per cent it costs light.',
+    shownFor: is('channel_gas', 'N2', 'air'),
+  }),
+];
+
+export const AROUND_FIELDS: readonly Field[] = [
+  choice('charging_by', 'Charged through', {
+    options: [
+      ['resistor', 'a resistor'],
+      ['inductor', 'an inductor'],
+    ],
+    help: 'What lies across the channel and charges the second capacitor.',
+    shownFor: isInversion,
+  }),
+  number('across_kohm', 'Across the channel', {
+    unit: 'k\u2126',
+    min: 0.001,
+    max: 1e9,
+    step: 1,
+    decimals: 1,
+    slide: log(0.1, 1000),
+    optional: true,
+    help: 'Resistor across the channel: it brings the channel to zero before the shot and takes some of it.',
+    shownFor: (values) => !isWound(values),
+  }),
+  number('inductor_uH', 'Charging inductor', {
+    unit: '\u00b5H',
+    min: 0.01,
+    max: 1e6,
+    step: 1,
+    decimals: 1,
+    slide: log(1, 1000),
+    help: 'Across the channel. It must be slow against the swing, and still bring the channel to zero between shots.',
+    shownFor: isWound,
+  }),
+  ohm('inductor_ohm', 'Its resistance', {
+    min: 0,
+    max: 1e8,
+    slide: linear(0, 100),
+    help: 'Of the charging inductor.',
+    shownFor: isWound,
+  }),
+  number('temperature_C', 'Temperature', {
+    unit: '\u00b0C',
+    min: -40,
+    max: 150,
+    step: 1,
+    decimals: 0,
+    slide: linear(0, 60),
+    help: 'Of the gas in the channel.',
+  }),
+  AMBIENT_FIELD,
+  number('supply_kV', 'Supply', {
+    unit: 'kV',
+    min: 0.1,
+    max: 200,
+    step: 0.5,
+    decimals: 1,
+    slide: linear(1, 40),
+    optional: true,
+    help: 'Highest voltage of the supply; the hazard of what is stored is judged from here.',
+  }),
+  number('supply_mA', 'Supply current', {
+    unit: 'mA',
+    min: 0.001,
+    max: 1e5,
+    step: 0.1,
+    decimals: 2,
+    slide: log(0.1, 100),
+    optional: true,
+    help: 'What the supply gives at most. No energy is shown without it.',
+  }),
+  number('window_ns', 'Followed for', {
+    unit: 'ns',
+    min: 0.1,
+    max: 1e5,
+    step: 10,
+    decimals: 0,
+    slide: log(10, 1000),
+    optional: true,
+    help: 'How long the wave shape is followed. Empty: four half periods of the loop.',
+  }),
+];
