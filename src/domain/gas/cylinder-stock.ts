@@ -1,4 +1,4 @@
-import { borderOf } from '../numerics/bisect';
+import { brent } from '../numerics/brent';
 import type { Answer, Warning } from '../units/answer';
 import { checkNumber } from '../units/check-number';
 import { computed } from '../units/computed';
@@ -105,14 +105,18 @@ export function orderPressure(
   });
   if (!needed.ok) return needed;
   const highest = stock.gas === 'N2' ? CYLINDER_PRESSURE_RULE.max : IDEAL_UP_TO_BAR;
-  const at = (pressure_bar_abs: number) => usableGas({ ...stock, pressure_bar_abs });
-  const most = at(highest);
+  const at = (pressure_bar_abs: number) => wholeGas({ ...stock, pressure_bar_abs });
+  const [rest, most] = [at(stock.rest_bar_abs), at(highest)];
+  if (!rest.ok) return rest;
   if (!most.ok) return most;
-  if (most.value.value < needed_L) return ok(null);
-  const enough = (bar: number) => {
-    const left = at(bar);
-    return left.ok && left.value.value >= needed_L;
+  if (needed_L === 0) return ok(stock.rest_bar_abs);
+  const wanted = rest.value.value + needed_L;
+  if (most.value.value < wanted) return ok(null);
+  const short = (bar: number) => {
+    const whole = at(bar);
+    return whole.ok ? whole.value.value - wanted : Number.NaN;
   };
-  if (enough(stock.rest_bar_abs)) return ok(stock.rest_bar_abs);
-  return ok(borderOf(enough, { fails: stock.rest_bar_abs, holds: highest }));
+  const bar = brent(short, { low: stock.rest_bar_abs, high: highest });
+  // A hair more, so that what is asked for is there.
+  return mapResult(bar, (found) => Math.min(highest, found * (1 + 1e-12)));
 }

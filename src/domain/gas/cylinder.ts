@@ -8,6 +8,8 @@ import { compressibilityOf, CYLINDER_PRESSURE_RULE, GAS_TEMPERATURE_RULE } from 
 
 /** Gas volumes are stated at 15 C and 1 atm, as gas suppliers do (ISO 13443). */
 const FREE_C = 15;
+/** The same state for every cylinder. */
+const FREE_COMPRESSIBILITY = compressibilityOf(BAR_PER_ATM, FREE_C);
 
 /** A cylinder by its water volume. A gauge reads the ambient pressure less: add it. */
 export interface Cylinder {
@@ -33,10 +35,10 @@ export function freeVolumeReal(cylinder: Cylinder): Result<Answer> {
   if (bad !== undefined) return refused(bad);
   const inside = compressibilityOf(cylinder.pressure_bar_abs, cylinder.temperature_C);
   if (!inside.ok) return inside;
-  const outside = compressibilityOf(BAR_PER_ATM, FREE_C);
-  if (!outside.ok) return outside;
+  if (!FREE_COMPRESSIBILITY.ok) return FREE_COMPRESSIBILITY;
+  const outside = FREE_COMPRESSIBILITY.value;
   return computed([], () => ({
-    value: (idealOf(cylinder) * outside.value) / inside.value,
+    value: (idealOf(cylinder) * outside) / inside.value,
     unit: 'L',
     model: 'Nitrogen as a real gas, at 15 \u00b0C and 1 atm',
     valid: 'pure nitrogen up to 350 bar(abs); the gauge and the gas\u2019s own temperature decide the rest',

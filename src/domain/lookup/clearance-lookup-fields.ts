@@ -18,8 +18,7 @@ export const CLEARANCE_FIELDS: readonly Field[] = [
   number('voltage_kV', 'Peak voltage', {
     unit: 'kV',
     units: [RMS],
-    min: 0,
-    minExcluded: true,
+    min: 0.001,
     max: 200,
     step: 0.5,
     decimals: 1,
@@ -28,8 +27,7 @@ export const CLEARANCE_FIELDS: readonly Field[] = [
   }),
   number('distance_mm', 'Distance there is', {
     unit: 'mm',
-    min: 0,
-    minExcluded: true,
+    min: 0.1,
     max: 100_000,
     step: 1,
     decimals: 0,

@@ -20,8 +20,7 @@ export const DYE_FIELDS: readonly Field[] = [
   },
   number('concentration_mM', 'Concentration', {
     unit: 'mmol/L',
-    min: 0,
-    minExcluded: true,
+    min: 1e-6,
     max: 1000,
     step: 0.5,
     decimals: 2,
@@ -30,8 +29,7 @@ export const DYE_FIELDS: readonly Field[] = [
   }),
   number('volume_mL', 'Volume', {
     unit: 'mL',
-    min: 0,
-    minExcluded: true,
+    min: 0.001,
     max: 100_000,
     step: 10,
     decimals: 0,
@@ -57,8 +55,7 @@ export const DYE_FIELDS: readonly Field[] = [
   }),
   number('stock_mM', 'Stock', {
     unit: 'mmol/L',
-    min: 0,
-    minExcluded: true,
+    min: 1e-6,
     max: 10_000,
     step: 1,
     decimals: 2,
@@ -87,8 +84,7 @@ export const DYE_FIELDS: readonly Field[] = [
   }),
   number('pump_uJ', 'Pump energy', {
     unit: '\u00b5J',
-    min: 0,
-    minExcluded: true,
+    min: 0.001,
     max: 1e7,
     step: 10,
     decimals: 0,

@@ -35,8 +35,7 @@ export const GAS_FIELDS: readonly Field[] = [
   }),
   number('cylinder_L', 'Water volume', {
     unit: 'L',
-    min: 0,
-    minExcluded: true,
+    min: 0.01,
     max: 10_000,
     step: 5,
     decimals: 0,
@@ -46,8 +45,7 @@ export const GAS_FIELDS: readonly Field[] = [
   }),
   number('flow_L_min', 'Flow in use', {
     unit: 'L/min',
-    min: 0,
-    minExcluded: true,
+    min: 0.001,
     max: 10_000,
     step: 0.5,
     decimals: 1,
@@ -57,8 +55,7 @@ export const GAS_FIELDS: readonly Field[] = [
   }),
   number('hours_day', 'Hours a day', {
     unit: 'h',
-    min: 0,
-    minExcluded: true,
+    min: 0.01,
     max: 24,
     step: 0.5,
     decimals: 1,
@@ -88,8 +85,7 @@ export const GAS_FIELDS: readonly Field[] = [
   }),
   number('volume_cm3', 'Gas volume', {
     unit: 'cm\u00b3',
-    min: 0,
-    minExcluded: true,
+    min: 0.01,
     max: 1e6,
     step: 10,
     decimals: 0,
@@ -140,8 +136,7 @@ export const GAS_FIELDS: readonly Field[] = [
   }),
   number('rated_bar_g', 'Rated', {
     unit: 'bar(g)',
-    min: 0,
-    minExcluded: true,
+    min: 0.01,
     max: 300,
     step: 0.1,
     decimals: 2,
@@ -172,8 +167,7 @@ export const GAS_FIELDS: readonly Field[] = [
   }),
   number('strength_MPa', 'Strength', {
     unit: 'MPa',
-    min: 0,
-    minExcluded: true,
+    min: 0.01,
     max: 5000,
     step: 1,
     decimals: 0,

@@ -82,7 +82,8 @@ function marginFigures(hoop: Answer, strength_MPa: number | null): readonly Figu
     weight: 'main',
   } as const;
   if (strength_MPa === null) return [{ ...shape, value: 0, words: 'enter the strength of the wall' }];
-  if (hoop.value === 0) return [{ ...shape, value: 0, words: 'no pressure' }];
+  // A pressure that no gauge shows leaves no ratio to give.
+  if (hoop.value < 1e-6) return [{ ...shape, value: 0, words: 'no pressure' }];
   return [
     {
       ...shape,

@@ -14,6 +14,8 @@ import { figureOf, spread, warningsOf } from './figures';
 import type { Figure, LookupAnswer, Plot, Values } from './lookup';
 
 const CURVE_PIECES = 40;
+/** Below it nothing is drawn: a scale of decades has no 0. */
+const LEAST_PPM = 1e-9;
 
 interface Source {
   readonly power_W: number;
@@ -121,7 +123,9 @@ function plotOf(source: Source, room: Room, ozone: Answer): Plot {
     const at = ozoneLevel(source, { ...room, airChanges_h: x });
     return at.ok ? [{ x, y: at.value.value, low: at.value.band.low, high: at.value.band.high }] : [];
   });
-  const heights = [...points.flatMap(({ low, high }) => [low, high]), LIMITS_PPM.ozone].filter((y) => y > 0);
+  const heights = [...points.flatMap(({ low, high }) => [low, high]), LIMITS_PPM.ozone].filter(
+    (y) => y > LEAST_PPM,
+  );
   const ppm = formatFigure(ozone.value, { digits: { significant: 2 }, rounding: 'up' });
   return {
     title: `Ozone against air changes: ${ppm} ppm at ${room.airChanges_h.toFixed(1)} an hour`,
@@ -133,8 +137,7 @@ function plotOf(source: Source, room: Room, ozone: Answer): Plot {
       max: Math.max(...heights) * 2,
       kind: 'log',
     },
-    // A source that makes none has no place on a scale of decades.
-    ...(source.power_W * source.yield_g_kWh === 0
+    ...(ozone.band.low <= LEAST_PPM
       ? {}
       : {
           band: {

@@ -60,8 +60,7 @@ export const ROOM_FIELDS: readonly Field[] = [
   }),
   number('cylinder_L', 'Cylinder', {
     unit: 'L',
-    min: 0,
-    minExcluded: true,
+    min: 0.01,
     max: 10_000,
     step: 5,
     decimals: 0,
@@ -122,8 +121,7 @@ export const ROOM_FIELDS: readonly Field[] = [
   }),
   number('shot_J', 'Energy a shot', {
     unit: 'J',
-    min: 0,
-    minExcluded: true,
+    min: 1e-6,
     max: 1e5,
     step: 0.1,
     decimals: 2,

@@ -7,6 +7,8 @@ import { allOf, figureOf, spread, warningsOf } from './figures';
 import type { LookupAnswer, Plot } from './lookup';
 
 const CURVE_PIECES = 40;
+/** Below it nothing is drawn: a scale of decades has no 0. */
+const LEAST_V = 1e-9;
 
 interface Setting {
   readonly area_cm2: number;
@@ -71,8 +73,8 @@ function plotOf(setting: Setting, induced: Answer): Plot {
     const at = inducedVoltage({ ...setting, distance_m: x });
     return at.ok ? [{ x, y: at.value.value, low: at.value.band.low, high: at.value.band.high }] : [];
   });
-  const heights = points.flatMap(({ low, high }) => [low, high]).filter((y) => y > 0);
-  const drawn = heights.length > 0;
+  const heights = points.flatMap(({ low, high }) => [low, high]).filter((y) => y > LEAST_V);
+  const drawn = induced.band.low > LEAST_V;
   return {
     title: `Voltage induced in the loop against distance: at most ${formatFigure(induced.value, { digits: { significant: 2 }, rounding: 'up' })} volts at ${distance_m.toFixed(2)} metres`,
     x: { label: 'Distance', unit: 'm', min: from, max: to, kind: 'log' },
