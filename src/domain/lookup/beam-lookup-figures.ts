@@ -26,7 +26,6 @@ export function densityFigure(
     unit: '',
     rounding: 'up',
     digits: 2,
-    decimals: 1,
     ...extra,
   };
 }

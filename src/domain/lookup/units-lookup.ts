@@ -27,8 +27,8 @@ const FIELDS: readonly Field[] = [
   }),
   number('value', 'Number', {
     unit: '',
-    min: -1e15,
-    max: 1e15,
+    min: -1e30,
+    max: 1e30,
     step: 1,
     decimals: 2,
     slide: linear(0, 100),
