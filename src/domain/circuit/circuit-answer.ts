@@ -22,6 +22,8 @@ export interface CircuitAnswer {
 const INDUCTANCE_SHARE = 0.2;
 /** Fall time of the exponential gap law, which stands for the other law. Own estimate. */
 const FALL_SHARE = 0.3;
+/** A band is far wider than what this leaves, some 1e-5 of a peak, and takes half the steps. */
+const VARIANT_TOLERANCE = 1e-3;
 /** Fast breakdown of a channel scatters about this much. Common practice, no source. */
 const BREAK_SHARE = 0.1;
 
@@ -35,7 +37,7 @@ export function circuitAnswer(circuit: Circuit, options: TransientOptions = {}):
   if (!given.ok) return given;
   const transients = [given.value];
   for (const variant of variantsOf(circuit)) {
-    const solved = solveTransient(variant, { ...options, samples: 0 });
+    const solved = solveTransient(variant, { tolerance: VARIANT_TOLERANCE, ...options, samples: 0 });
     if (solved.ok) transients.push(solved.value);
     else if (solved.refusal.type === 'stopped') return solved;
   }
