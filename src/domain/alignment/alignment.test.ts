@@ -194,6 +194,19 @@ describe('the search by arcs', () => {
     });
   });
 
+  it('ends where arcs sit on both sides alike, without turning for it', () => {
+    const screw = { pitch_mm: 0.5, feeler_um: 20 };
+    expect(searchByArcs({ firstStep_turns: 0.25, sides: 'LRB' }, screw)).toMatchObject({
+      value: {
+        done: true,
+        next_turns: 0,
+        turned_turns: 0.125,
+        turned: { unit: 'turns', band: { low: 0, high: 0.25 } },
+        words: 'Done: arcs sit on both sides alike.',
+      },
+    });
+  });
+
   it.each(['X', 'LRX', 'l', 'L'.repeat(201)])('refuses %j', (sides) => {
     expect(bisectionTurns(0.25, sides)).toMatchObject({ refusal: { field: 'sides' } });
   });

@@ -7,7 +7,7 @@ import { edgeDischargeInception, edgeMargin, slidingDischargeInception } from '.
 import { fringeExcess, sheetWithAirFilm } from './fringe';
 import { lifeShots, lifeStressRatio } from './life';
 import { capacitanceAtVoltage, energyAtVoltage } from './parts';
-import { areaStrengthRatio, punctureProbability } from './puncture';
+import { areaStrengthRatio, punctureProbability, sheetPuncture } from './puncture';
 
 const value = (result: Result<Answer>) => (result.ok ? result.value.value : Number.NaN);
 const BAD = [Number.NaN, Infinity, -Infinity, -1] as const;
@@ -160,5 +160,25 @@ describe('bought parts', () => {
       refusal: { field: 'voltage_V' },
     });
     expect(capacitanceAtVoltage({ ...part, rated_V: Number.NaN }).ok).toBe(false);
+  });
+});
+
+describe('a sheet of film at a voltage', () => {
+  const sheet = { material: 'PET', thickness_mm: 0.25, area_cm2: 900, voltage_V: 15_000 };
+
+  // 15 kV on 0.25 mm of PET, 60 of 65 kV/mm, punctures almost surely; a quarter of it gives about 1e-4 (physics N).
+  it('punctures almost surely at its minimum strength and hardly ever at a quarter of it', () => {
+    expect(value(sheetPuncture(sheet))).toBeGreaterThan(0.99);
+    const quarter = value(sheetPuncture({ ...sheet, voltage_V: 15_000 / 4 }));
+    expect(quarter).toBeGreaterThan(1e-5);
+    expect(quarter).toBeLessThan(1e-3);
+  });
+
+  it('warns over a third of the strength and names what it is taken from', () => {
+    const third = sheetPuncture(sheet);
+    expect(third.ok && third.value.warnings.map(({ type }) => type)).toContain('little-margin');
+    expect(third.ok && third.value.model).toContain('data sheet');
+    expect(sheetPuncture({ ...sheet, material: 'paper' })).toMatchObject({ refusal: { field: 'material' } });
+    expect(sheetPuncture({ ...sheet, area_cm2: 0 })).toMatchObject({ refusal: { field: 'area_cm2' } });
   });
 });

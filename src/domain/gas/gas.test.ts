@@ -5,7 +5,7 @@ import type { Result } from '../units/result';
 import { flowTime, freeVolumeIdeal, freeVolumeReal } from './cylinder';
 import { nitrogenCompressibility } from './nitrogen-state';
 import { purgeResidual, purgeVolumes } from './purge';
-import { hoopStress, storedEnergyBrode, storedEnergyIsothermal } from './vessel';
+import { hoopStress, storedEnergyBrode, storedEnergyIsothermal, storedGasEnergy } from './vessel';
 
 const value = (result: Result<Answer>) => (result.ok ? result.value.value : Number.NaN);
 const FULL = { volume_L: 50, pressure_bar_abs: 200, temperature_C: 20 };
@@ -92,5 +92,18 @@ describe('pressed gas', () => {
     expect(hoopStress({ pressure_bar_g: 3, inner_mm: 15, outer_mm: 15 })).toMatchObject({
       refusal: { field: 'outer_mm' },
     });
+  });
+});
+
+describe('the energy to show for a vessel', () => {
+  // 0.1 L at 4 bar(abs): Brode 75 J, isothermal 55 J (physics P). Higher up the isothermal one is the larger.
+  it('is the larger of both, with the smaller in its band', () => {
+    const body = { pressure_bar_abs: 4, ambient_bar_abs: 1.01325, volume_L: 0.1 };
+    const shown = storedGasEnergy(body);
+    expect(value(shown)).toBeCloseTo(74.67, 2);
+    expect(shown.ok && shown.value.band.low).toBeLessThanOrEqual(value(storedEnergyIsothermal(body)));
+    const full = { ...body, pressure_bar_abs: 200 };
+    expect(value(storedGasEnergy(full))).toBe(value(storedEnergyIsothermal(full)));
+    expect(storedGasEnergy({ ...body, pressure_bar_abs: Number.NaN }).ok).toBe(false);
   });
 });
