@@ -13,6 +13,7 @@ import {
   grantTooLate,
   handsInAndOut,
 } from './bench-life';
+import { alignHeron, copyRegister } from './kit-and-alignment';
 import { fireRig, type FiringPlan } from './fire-rig';
 import { answerIncident, reportFlashover, returnRig } from './incident';
 import { bringInCrew, createRig } from './people-and-sheets';
@@ -162,6 +163,9 @@ export function planMonth(bench: Bench, lastDay: WorkingDay): readonly Appointme
       fire(KETTLE, 19, { waits: true, early: 11, summary: 'One early break at reading 12.' }),
     ],
     [21, 1640, () => declareShorted(bench, KETTLE)],
+    // At the end of the plan: an entry before would shift every die roll behind it.
+    [21, 1700, () => alignHeron(bench)],
+    [21, 1730, () => copyRegister(bench, lastDay)],
   ];
 }
 

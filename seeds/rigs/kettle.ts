@@ -25,7 +25,20 @@ export const KETTLE_SPEC: RigSpec = {
   },
   first: { kind: 'bank', part: 'Ceramic, five of 1.0 nF, 30 kV', capacitance_nF: 5, rated_kV: 30 },
   second: { kind: 'bank', part: 'Ceramic, two of 0.7 nF, 30 kV', capacitance_nF: 1.4, rated_kV: 30 },
-  channel: { length_mm: 280, spacing_a_mm: 4, spacing_b_mm: 4, gas: 'N2', across_kohm: 50 },
+  channel: {
+    length_mm: 280,
+    spacing_a_mm: 4,
+    spacing_b_mm: 4,
+    gas: 'N2',
+    across_kohm: 50,
+    screws: [
+      { name: 'Screw A', position_mm: -20, pitch_mm: 0.7, lever: 1, closes: 'clockwise' },
+      { name: 'Screw B', position_mm: 300, pitch_mm: 0.7, lever: 1, closes: 'clockwise' },
+    ],
+    feeler_a_mm: 10,
+    feeler_b_mm: 270,
+    feeler_error_mm: 0.02,
+  },
   charging: { supply_kV: 25, supply_mA: 1.5, ballast_Mohm: 25 },
   nodes: [
     { name: 'Dump capacitor', holds: 'first', bleed_Mohm: 400 },
@@ -33,7 +46,7 @@ export const KETTLE_SPEC: RigSpec = {
     { name: 'Peaking capacitor', holds: 'second', bleed_Mohm: 0.05 },
   ],
   shorting_points: ['Dump capacitor', 'Peaking capacitor', 'Gap and supply node'],
-  beam: { pulse_energy_uJ: 150, wavelength_nm: 337.1 },
+  beam: { pulse_energy_uJ: 150, wavelength_nm: 337.1, pulse_ns: 5, width_mm: 8, height_mm: 4 },
   model: { gap_nH: 28, channel_nH: 4, known: 'assumed' },
   envelope: { max_kV: 23, max_bar_g: 1.2, max_rate_Hz: 5 },
 };

@@ -19,7 +19,20 @@ export const WREN_SPEC: RigSpec = {
   },
   first: { kind: 'bank', part: 'Ceramic, four of 0.22 nF, 15 kV', capacitance_nF: 0.88, rated_kV: 15 },
   second: { kind: 'bank', part: 'Ceramic, three of 0.1 nF, 15 kV', capacitance_nF: 0.3, rated_kV: 15 },
-  channel: { length_mm: 50, spacing_a_mm: 0.9, spacing_b_mm: 0.9, gas: 'N2', across_kohm: 200 },
+  channel: {
+    length_mm: 50,
+    spacing_a_mm: 0.9,
+    spacing_b_mm: 0.9,
+    gas: 'N2',
+    across_kohm: 200,
+    screws: [
+      { name: 'Screw A', position_mm: -8, pitch_mm: 0.35, lever: 1, closes: 'clockwise' },
+      { name: 'Screw B', position_mm: 58, pitch_mm: 0.35, lever: 1, closes: 'clockwise' },
+    ],
+    feeler_a_mm: 3,
+    feeler_b_mm: 47,
+    feeler_error_mm: 0.01,
+  },
   charging: { supply_kV: 10, supply_mA: 0.5, ballast_Mohm: 100 },
   nodes: [
     { name: 'Dump capacitor', holds: 'first', bleed_Mohm: 1000 },
@@ -27,7 +40,7 @@ export const WREN_SPEC: RigSpec = {
     { name: 'Peaking capacitor', holds: 'second', bleed_Mohm: 0.2 },
   ],
   shorting_points: ['Dump capacitor', 'Peaking capacitor', 'Gap and supply node'],
-  beam: { pulse_energy_uJ: 1, wavelength_nm: 337.1 },
+  beam: { pulse_energy_uJ: 1, wavelength_nm: 337.1, pulse_ns: 4, width_mm: 2, height_mm: 0.9 },
   model: { gap_nH: 12, channel_nH: 3, known: 'assumed' },
   envelope: { max_kV: 8, max_bar_g: 0, max_rate_Hz: 10 },
 };

@@ -47,6 +47,9 @@ const NewRigRoute = lazy(() =>
 const RigPartsRoute = lazy(() =>
   import('../features/rigs/parts/rig-parts-route').then((m) => ({ default: m.RigPartsRoute })),
 );
+const AlignmentRoute = lazy(() =>
+  import('../features/alignment/alignment-route').then((m) => ({ default: m.AlignmentRoute })),
+);
 const KitRoute = lazy(() => import('../features/kit/kit-route').then((m) => ({ default: m.KitRoute })));
 const KitAddRoute = lazy(() =>
   import('../features/kit/kit-add-route').then((m) => ({ default: m.KitAddRoute })),
@@ -103,6 +106,7 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.rigParts, screen: RigPartsRoute, area: 'Rigs' },
   { path: patterns.reviseRig, screen: ReviseRigRoute, area: 'Rigs' },
   { path: patterns.rig, screen: RigRoute, area: 'Rigs' },
+  { path: patterns.alignment, screen: AlignmentRoute, area: 'Alignment' },
   { path: patterns.kit, screen: KitRoute, area: 'Kit' },
   { path: patterns.kitAdd, screen: KitAddRoute, area: 'Kit' },
   { path: patterns.kitPiece, screen: KitPieceRoute, area: 'Kit' },

@@ -25,7 +25,7 @@ function FigureField({ spec, form }: { readonly spec: FigureSpec; readonly form:
   const text = form.textOf(spec).replace('-', '\u2212');
   const touched = form.isTouched(spec);
   const refusal = form.refusalOf(spec);
-  const source = text === '' ? (spec.whenEmpty ?? '') : touched ? '' : (spec.source ?? '');
+  const source = text === '' ? (spec.whenEmpty ?? spec.source ?? '') : touched ? '' : (spec.source ?? '');
   const common = {
     value: text === '' ? null : text,
     unit: spec.unit,
