@@ -1,7 +1,8 @@
 import { useLocation } from 'react-router-dom';
 import { StateStrip } from '../components/state-strip';
 import { paths } from '../config/paths';
-import { useFirings, useHeldBack, useLab, usePending, usePerson } from '../data/use-book';
+import { useAuthor } from '../data/use-author';
+import { useFirings, useHeldBack, useLab, usePending } from '../data/use-book';
 import { useDeclared } from '../data/use-now';
 import { useSession } from '../data/use-session';
 import type { RigDoc } from '../domain/book/documents/rig';
@@ -72,22 +73,22 @@ function RigStrip({ rig, view, extra }: RigStripProps) {
 }
 
 function useDetail(rig: RigDoc, view: DeclaredView): string | undefined {
-  const by = usePerson(view.trace?.by ?? null);
-  const down = usePerson(view.stood_down[0]?.by ?? null);
+  const by = useAuthor(rig, view.trace);
+  const down = useAuthor(rig, view.stood_down[0] ?? null);
   const lab = useLab();
   const firings = useFirings(rig.id);
   const zone = lab?.settings.zone ?? 'Etc/UTC';
-  if (view.stood_down.length > 0) return down === undefined ? undefined : `by ${down.name}`;
+  if (view.stood_down.length > 0) return `by ${down}`;
   if (view.state === 'not-known') {
     const when = view.trace === null ? '' : `, ${clockWords(view.trace.stamp.wall_ms, zone)}`;
     return `${view.why ?? ''}${view.why === 'tablet restarted' ? '' : when}`;
   }
-  if (view.age_ms === null) return by?.name;
+  if (view.age_ms === null) return by === '' ? undefined : by;
   if (view.state === 'firing') {
     const open = firings.find((firing) => rig.open_firings.includes(firing.id));
     return `${open?.number ?? ''} open ${ageWords(view.age_ms)}`;
   }
-  return by === undefined ? agoWords(view.age_ms) : `${agoWords(view.age_ms)}, ${by.name}`;
+  return `${agoWords(view.age_ms)}, ${by}`;
 }
 
 function useCountWords(): string | undefined {

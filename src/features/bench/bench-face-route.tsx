@@ -1,17 +1,20 @@
 import { useParams } from 'react-router-dom';
 import { Reading } from '../../components/reading';
 import { WideMark } from '../../components/wide-mark';
-import { useFirings, useLab, usePerson, useReadings, useRig } from '../../data/use-book';
-import { useDeclared } from '../../data/use-now';
+import { useAuthor } from '../../data/use-author';
+import { useFirings, useLab, useReadings, useRig } from '../../data/use-book';
+import { useNames } from '../../data/use-names';
+import { useDeclared, useNow } from '../../data/use-now';
 import { standingReading } from '../../domain/book/documents/reading';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
-import { ageWords, clockWords } from '../../domain/report/time-words';
+import { ageWords, clockWords, dayWords } from '../../domain/report/time-words';
 import { DECLARED_WORDS } from '../../domain/report/words';
 import { rigFigures } from '../../domain/rules/rig-figures';
 import { formatFigure } from '../../domain/units/format-quantity';
 import { Screen } from '../../components/frame';
 import type { DeclaredView } from '../../domain/rules/declared-view';
+import { peopleWords } from './people-words';
 import { stripState } from './strip-state';
 
 interface FaceReading {
@@ -42,17 +45,19 @@ function Face({
   const firings = useFirings(rig.id);
   const open = firings.find((firing) => rig.open_firings.includes(firing.id));
   const { readings } = useReadings(open?.id ?? '');
-  const by = usePerson(view.trace?.by ?? null);
+  const by = useAuthor(rig, view.trace);
+  const down = useAuthor(rig, view.stood_down[0] ?? null);
+  const nameOf = useNames();
+  const { stamp } = useNow(10_000);
   const drawn = stripState(view);
   const last = readings.at(-1);
   const now = last === undefined ? null : standingReading(last);
   const firing = view.state === 'firing' && open !== undefined;
   const figures = firing
     ? firingFigures(now?.type === 'stands' ? now.values : null, open.shots)
-    : standingFigures(rig, settings);
+    : standingFigures(rig, settings, stamp.wall_ms);
   const age = view.age_ms === null ? '' : ageWords(view.age_ms);
-  const detail =
-    view.state === 'not-known' ? (view.why ?? '') : `${age}${by === undefined ? '' : `, ${by.name}`}`;
+  const detail = view.state === 'not-known' ? (view.why ?? '') : `${age}${by === '' ? '' : `, ${by}`}`;
   return (
     <Screen>
       <div className="bench-face">
@@ -66,10 +71,17 @@ function Face({
           solid={firing}
           title={
             <p className="bench-face-words" role="status">
-              {drawn.hatched ? `${DECLARED_WORDS[view.state]}. Stood down` : DECLARED_WORDS[view.state]}
+              {DECLARED_WORDS[view.state]}
+              {drawn.hatched ? <span className="bench-face-down">Stood down by {down}</span> : null}
             </p>
           }
-        />
+        >
+          {rig.hands.length + rig.guests.length === 0 ? null : (
+            <p className="bench-face-people">
+              <b>{peopleWords(rig, nameOf, stamp)}</b>
+            </p>
+          )}
+        </WideMark>
         <dl className="bench-face-readings">
           {figures.map((one) => (
             <div key={one.label}>
@@ -84,7 +96,7 @@ function Face({
     </Screen>
   );
 
-  function standingFigures(doc: RigDoc, lab: LabSettings): readonly FaceReading[] {
+  function standingFigures(doc: RigDoc, lab: LabSettings, now_ms: number): readonly FaceReading[] {
     const { spec } = latestRevision(doc);
     const derived = rigFigures(spec, lab);
     const stored = derived.ok
@@ -98,11 +110,20 @@ function Face({
       { label: 'wait at least', value: wait, unit: wait === 'not known' ? '' : 's' },
       {
         label: 'last declared short',
-        value: doc.last_short === null ? '\u2013' : clockWords(doc.last_short.stamp.wall_ms, lab.zone),
+        value: lastShort(doc, lab.zone, now_ms),
         unit: '',
       },
     ];
   }
+}
+
+/** Clock time alone would pass for today's. */
+function lastShort({ last_short }: RigDoc, zone: string, now_ms: number): string {
+  if (last_short === null) return 'never';
+  const { wall_ms } = last_short.stamp;
+  return dayWords(wall_ms, zone) === dayWords(now_ms, zone)
+    ? clockWords(wall_ms, zone)
+    : dayWords(wall_ms, zone);
 }
 
 function firingFigures(

@@ -3,7 +3,7 @@ import { AgeScale } from '../../components/age-scale';
 import { Reading } from '../../components/reading';
 import { WideMark } from '../../components/wide-mark';
 import { paths } from '../../config/paths';
-import { usePerson } from '../../data/use-book';
+import { useAuthor } from '../../data/use-author';
 import { useNames } from '../../data/use-names';
 import { useNow } from '../../data/use-now';
 import type { RigDoc } from '../../domain/book/documents/rig';
@@ -41,7 +41,7 @@ export function BenchMark({ rig, view, zone }: Props) {
         <AgeScale age_h={known && age !== null ? age / HOUR_MS : null} steps={48} variant="face" />
         <p className="bench-mark-detail">
           <span>
-            <Declarer view={view} zone={zone} /> <PeopleLine rig={rig} />
+            <Declarer rig={rig} view={view} zone={zone} /> <PeopleLine rig={rig} />
           </span>
           <span className="muted">{known ? 'at 12 h: not known, treat as charged' : ''}</span>
         </p>
@@ -55,16 +55,13 @@ function AgeFigure({ age_ms }: { readonly age_ms: number }) {
   return <Reading value={value} unit={unit} size="answer" />;
 }
 
-function Declarer({ view, zone }: { readonly view: DeclaredView; readonly zone: string }) {
-  const by = usePerson(view.trace?.by ?? null);
-  const down = usePerson(view.stood_down[0]?.by ?? null);
-  const stoodDown =
-    view.stood_down.length === 0
-      ? ''
-      : ` Stood down${down === undefined ? '' : ` by ${down.name}`}: ${view.stood_down[0]?.why ?? ''}.`;
+function Declarer({ rig, view, zone }: Props) {
+  const name = useAuthor(rig, view.trace);
+  const [first] = view.stood_down;
+  const down = useAuthor(rig, first ?? null);
+  const stoodDown = first === undefined ? '' : ` Stood down by ${down}: ${first.why}.`;
   if (view.trace === null) return <>Nothing declared yet.{stoodDown}</>;
   const when = clockWords(view.trace.stamp.wall_ms, zone);
-  const name = by?.name ?? 'author open';
   if (view.state !== 'not-known') {
     return (
       <>

@@ -4,6 +4,7 @@ import { Reading } from '../../components/reading';
 import { paths } from '../../config/paths';
 import { useFiring, useHeldBack, usePending, usePerson, useReadings } from '../../data/use-book';
 import { useHandover } from '../../data/use-handover';
+import { useNotices } from '../../data/use-notices';
 import { useNow } from '../../data/use-now';
 import { standingReading } from '../../domain/book/documents/reading';
 import type { RigDoc } from '../../domain/book/documents/rig';
@@ -77,6 +78,7 @@ function HandoverLine() {
   const { last_exchange_ms, state, words } = useHandover();
   const pending = usePending();
   const held = useHeldBack().filter((one) => one.mine).length;
+  const { notices } = useNotices();
   const { stamp } = useNow(10_000);
   const last =
     last_exchange_ms === null
@@ -87,6 +89,7 @@ function HandoverLine() {
       <p className="muted">{last}</p>
       <p>{pending.count > 0 ? pending.words : 'Nothing waits here'}</p>
       {held === 0 ? null : <b>{held} held back</b>}
+      {notices.length === 0 ? null : <p>At the start of this tablet: {notices[0]}</p>}
       {state === 'sign-in-to-send' || state === 'revoked' || state === 'trouble' ? <p>{words}</p> : null}
     </Link>
   );

@@ -4,10 +4,11 @@ import { ThumbZone } from '../../components/thumb-zone';
 import { paths } from '../../config/paths';
 import { useNow } from '../../data/use-now';
 import { useSession } from '../../data/use-session';
-import { useSheets } from '../../data/use-book';
+import { useBookState, useSheets } from '../../data/use-book';
 import { useAppend, type AppendOutcome } from '../../data/use-append';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { DeclaredView } from '../../domain/rules/declared-view';
+import { checkLapse } from '../../domain/rules/check-validity';
 import { isRetractable } from '../../domain/rules/judge-rigs';
 import type { DueNext } from './due-next';
 import { useDueNext } from './use-due-next';
@@ -78,14 +79,17 @@ function HandsDome({ rig }: { readonly rig: RigDoc }) {
   const append = useAppend();
   const session = useSession();
   const me = session.state === 'open' ? session.person.id : null;
-  const mine = rig.hands.find((tag) => tag.by === me);
+  const mine = rig.hands.findLast((tag) => tag.by === me);
+  const { device } = useBookState();
+  const { stamp } = useNow(10_000);
+  const counts = rig.ready_check !== null && checkLapse(rig, device, stamp) === null;
   if (mine === undefined) {
     return (
       <ThumbDome
         critical
         hold="second"
         label="Hands in"
-        holdLabel="Hold: hands in"
+        holdLabel={counts ? 'Hold: hands in, voids the check' : 'Hold: hands in'}
         onComplete={async () =>
           settle(await append({ kind: 'hands.in', subject: rig.id, body: { where: '' } }))
         }

@@ -1,11 +1,12 @@
 import { useIncidents } from '../../data/use-book';
 import { unliftedStandDowns, type RigDoc } from '../../domain/book/documents/rig';
+import type { Trace } from '../../domain/book/documents/trace';
 import { momentWords } from '../../domain/report/time-words';
 import { ActForm } from './act-form';
 import { ActOutcome, ForecastWords } from './act-outcome';
 import { useAct, useForecast } from './use-act';
 import { useMay } from './use-may';
-import { useNames } from '../../data/use-names';
+import { useAuthor } from '../../data/use-author';
 
 interface Props {
   readonly rig: RigDoc;
@@ -35,7 +36,6 @@ export function StandDownSection({ rig, zone }: Props) {
 }
 
 function Return({ rig, zone }: Props) {
-  const nameOf = useNames();
   const may = useMay();
   const act = useAct();
   const incidents = useIncidents(rig.id);
@@ -55,7 +55,7 @@ function Return({ rig, zone }: Props) {
             {down.why}
             <br />
             <span className="muted">
-              {nameOf(down.by)}, {momentWords(down.stamp.wall_ms, zone)}
+              <Author rig={rig} trace={down} />, {momentWords(down.stamp.wall_ms, zone)}
               {down.at === null ? ', not yet at the server' : `, revision ${down.at}`}
             </span>
           </li>
@@ -84,4 +84,8 @@ function Return({ rig, zone }: Props) {
       {act.logged === null ? null : <ActOutcome entry={act.logged} />}
     </>
   );
+}
+
+function Author({ rig, trace }: { readonly rig: RigDoc; readonly trace: Trace }) {
+  return useAuthor(rig, trace);
 }

@@ -1,27 +1,30 @@
 import { HoldButton } from '../../components/hold-button';
 import { appVersion, buildTime } from '../../config/build';
-import { useClient } from '../../data/client-context';
 import { useBookState } from '../../data/use-book';
+import { useNotices } from '../../data/use-notices';
 import { useStorage } from '../../data/use-storage';
 import { useUpdate } from '../../data/use-update';
 import { bytesWords } from './entry-row';
 
 /** The tablet itself: its letter, its storage, its version, and what went wrong at its start. */
 export function TabletFacts() {
-  const { notices } = useClient();
+  const { notices, seen } = useNotices();
   const { letter, revision, hash, filling } = useBookState();
   const { used_bytes, quota_bytes, words } = useStorage();
   return (
     <section>
       <h2>This tablet</h2>
       {notices.length === 0 ? null : (
-        <ul className="handover-list">
-          {notices.map((notice) => (
-            <li key={notice}>
-              <b>{notice}</b>
-            </li>
-          ))}
-        </ul>
+        <div className="handover-update" role="status">
+          <ul className="handover-list">
+            {notices.map((notice) => (
+              <li key={notice}>
+                <b>{notice}</b>
+              </li>
+            ))}
+          </ul>
+          <HoldButton label="I have read it" onComplete={seen} />
+        </div>
       )}
       <dl className="handover-facts">
         <dt>Letter</dt>
