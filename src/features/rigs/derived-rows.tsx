@@ -59,7 +59,7 @@ function shortWords(row: DerivedRow, spec: RigSpec): { readonly label: string; r
     case 'stored':
       return { label: 'Stored', source: `${supply_kV}\u2009kV, ${supply_mA}\u2009mA` };
     case 'stress_first':
-      return { label: row.label, source: limitWords(spec) };
+      return { label: 'Stress', source: limitWords(spec) };
     case 'rate':
       return { label: 'Rate', source: 'at most' };
     case 'reach':
@@ -70,7 +70,5 @@ function shortWords(row: DerivedRow, spec: RigSpec): { readonly label: string; r
 }
 
 function limitWords({ first }: RigSpec): string {
-  return first.kind === 'sheet'
-    ? `tested to ${first.strength_kV_mm}\u2009kV/mm`
-    : `rated ${first.rated_kV}\u2009kV`;
+  return first.kind === 'sheet' ? `limit ${first.strength_kV_mm}` : `limit ${first.rated_kV}`;
 }

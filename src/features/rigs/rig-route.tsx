@@ -70,11 +70,6 @@ function RigScreen({ rig, settings }: { readonly rig: RigDoc; readonly settings:
               label="Revise"
               onComplete={() => void navigate(paths.reviseRig(rig.id))}
             />,
-            <ThumbDome
-              key="parts"
-              label="Parts and wear"
-              onComplete={() => void navigate(paths.rigParts(rig.id))}
-            />,
           ]}
         />
       }

@@ -48,6 +48,7 @@ function summaryOf(edit: RigEdit, section: (typeof SECTIONS)[number]): string {
     if (field.kind === 'choice') return [field.options.find((one) => one.value === text)?.label ?? text];
     if (field.kind !== 'number') return [text];
     const typed = readTyped(text);
+    if (field.unit === '') return [`${typed.number} ${field.label.toLowerCase()}`];
     return [`${typed.number.replace('-', '\u2212')}\u2009${typed.unit ?? field.unit}`.trim()];
   });
   return said.join(', ');

@@ -189,9 +189,20 @@ function EditThumbs({ edit }: { readonly edit: RigEdit }) {
           ? [
               <ThumbDome
                 key="back"
-                label={rig === null ? 'Discard draft' : 'Back to the rig'}
-                onComplete={edit.discard}
+                label={rig === null ? 'Back to the rigs' : 'Back to the rig'}
+                onComplete={edit.leave}
               />,
+              ...(edit.touched
+                ? [
+                    <ThumbDome
+                      key="discard"
+                      hold="second"
+                      label="Discard draft"
+                      holdLabel="Hold: discard the draft"
+                      onComplete={edit.discard}
+                    />,
+                  ]
+                : []),
             ]
           : [all]),
       ]}

@@ -9,7 +9,7 @@ interface Props {
 }
 
 const LEFT_PX = 96;
-const RIGHT_PX = 96;
+const RIGHT_PX = 128;
 /** Half the free edge: foils of the two poles end before each other. */
 const SETBACK_PX = 34;
 
@@ -48,7 +48,7 @@ export function SheetDrawing({ name, sheet, supply_kV }: Props) {
             />
           ))}
           {first === undefined ? null : (
-            <text className="sheet-words" x={right + 44} y={(first.top + first.bottom) / 2 + 7}>
+            <text className="sheet-words" x={width} textAnchor="end" y={(first.top + first.bottom) / 2 + 7}>
               {sheet.plies === 1 ? '1 ply' : `${sheet.plies} plies`}
             </text>
           )}

@@ -128,6 +128,9 @@ export function useRigEdit(rig: RigDoc | null) {
     setWhy: (why: string) => set((now) => ({ ...now, why })),
     copyFrom: (revision: string | null) =>
       set((now) => ({ ...EMPTY_EDIT, name: now.name, copied_from: revision })),
+    /** The draft stays. */
+    leave: () => void navigate(rig === null ? paths.rigs() : paths.rig(rig.id)),
+    touched: draft !== EMPTY_EDIT,
     discard: () => {
       clear();
       void navigate(rig === null ? paths.rigs() : paths.rig(rig.id));
