@@ -167,7 +167,7 @@ function eyewearFigure(eyewear: RigDerived['eyewear']): DerivedFigure {
       unit: '1',
       band: { low: density, high: density },
       model: 'Exposure over limit, decades, rounded up to a tenth',
-      valid: 'one pulse; trains and the day\u2019s dose may ask for more',
+      valid: 'a working day in the beam at the envelope\u2019s rate; one end of the channel',
       warnings,
     }),
     words: `At least this at ${beam.line.wavelength_nm}\u2009nm, stated on the eyewear.${assumed}`,
