@@ -110,12 +110,16 @@ function withDips(miss: Miss, points: readonly Point[]): readonly Point[] {
     const after = points[i + 1];
     if (point.y === null || !isPoint(before) || !isPoint(after)) return [point];
     const sign = Math.sign(point.y);
+    const here = Math.abs(point.y);
+    const falls = Math.max(Math.abs(before.y) - here, Math.abs(after.y) - here);
+    // A curve that bends one way goes no deeper between its points than it fell to reach them; twice that is room enough.
     const dips =
       sign !== 0 &&
       Math.sign(before.y) === sign &&
       Math.sign(after.y) === sign &&
-      Math.abs(point.y) <= Math.abs(before.y) &&
-      Math.abs(point.y) <= Math.abs(after.y);
+      here <= Math.abs(before.y) &&
+      here <= Math.abs(after.y) &&
+      here < 2 * falls;
     if (!dips) return [point];
     const bottom = bottomOf((x) => (miss(x) ?? Infinity) * sign, before.x, after.x);
     const y = miss(bottom);

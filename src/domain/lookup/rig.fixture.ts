@@ -1,6 +1,6 @@
-import type { LabSettings, RigSpec } from '../../domain/book/rig-spec';
+import type { LabSettings, RigSpec } from '../book/rig-spec';
 
-export const settings: LabSettings = {
+export const labSettings: LabSettings = {
   name: 'Fixture lab',
   zone: 'Etc/UTC',
   ambient_bar_abs: 0.966,
