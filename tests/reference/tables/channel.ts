@@ -95,7 +95,7 @@ export const CHANNEL: readonly Table[] = [
     ],
     within: 0.06,
     own: true,
-    note: 'A life of 37 ns over 1 + p/15.89 hPa.',
+    note: 'A life of 37 ns over 1 + p/15.89 hPa. The paper was found, its abstract without the figure.',
   },
   {
     family: 'channel.upperStateLifetimeO2',
