@@ -1,5 +1,6 @@
 import type { LabSettings, RigSpec } from '../../../domain/book/rig-spec';
 import { specChanges, type SpecChange } from '../../../domain/rules/loosening';
+import { parseNumber } from '../../../domain/units/parse-number';
 import type { EditField } from './edit-field';
 import { readTyped, toOwn, unitsOf } from './edit-units';
 import { provisionalSpec, readEdit, textOfDraft, type EditDraft, type EditReading } from './edit-form';
@@ -139,8 +140,10 @@ export function stepText(
 ): string {
   const typed = readTyped(text.trim());
   const unit = unitsOf(field.unit, ambient_bar_abs).find((one) => one.key === typed.unit);
-  const number = Number(typed.number.replace(',', '.').replace('\u2212', '-'));
-  const from = !Number.isFinite(number) ? 0 : unit === undefined ? number : toOwn(number, unit);
+  const number = parseNumber(typed.number, field.key, field.label);
+  // Which of its two readings to step from is not ours to choose.
+  if (!number.ok && number.refusal.type === 'ambiguous-comma') return text;
+  const from = !number.ok ? 0 : unit === undefined ? number.value : toOwn(number.value, unit);
   const next = Number((from + direction * field.step).toPrecision(12));
   const least = field.minExcluded ? Math.min(field.step, field.max) : field.min;
   return String(Math.min(field.max, Math.max(least, next)));
