@@ -1,6 +1,7 @@
 import { ALIGNMENT_LOOKUP } from './alignment-lookup';
 import { BEAM_LOOKUP } from './beam-lookup';
 import { CAPACITOR_LOOKUP } from './capacitor-lookup';
+import { CHARGE_LOOKUP } from './charge-lookup';
 import { CIRCUIT_LOOKUP } from './circuit-lookup';
 import { CLEARANCE_LOOKUP } from './clearance-lookup';
 import { DYE_LOOKUP } from './dye-lookup';
@@ -16,6 +17,7 @@ export const LOOKUPS: readonly Lookup[] = [
   CAPACITOR_LOOKUP,
   CIRCUIT_LOOKUP,
   ALIGNMENT_LOOKUP,
+  CHARGE_LOOKUP,
   GAS_LOOKUP,
   CLEARANCE_LOOKUP,
   BEAM_LOOKUP,
