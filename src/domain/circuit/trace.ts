@@ -8,7 +8,7 @@ const HEAD = 2;
 const STRIDE = HEAD + 3 * PIECE;
 
 /** Length of scratch that a trace takes: room for an ordinary run. */
-export const TRACE_SCRATCH = 64 * STRIDE;
+export const TRACE_SCRATCH = 48 * STRIDE;
 
 /** The pieces of a run in order of time, for finding crossings and for drawing. */
 export interface Trace {

@@ -33,14 +33,19 @@ export function solveHexField(shape: HexShape): HexField | undefined {
   return solvePanels(hexOutline(shape), shape.gapOverFlats);
 }
 
-/** The same for any upper half outline left of x = 0, for the check against cylinders. */
+/**
+ * The same for any upper half outline left of x = 0, for the check against cylinders. Each panel starts where the one
+ * before it ends.
+ */
 export function solvePanels(panels: readonly Panel[], gap: number): HexField | undefined {
-  const frames = panels.map(frameOf);
+  const outline = outlineOf(panels);
   const size = panels.length;
   const system = new Float64Array(size * (size + 1));
   panels.forEach((panel, row) => {
     const middle = middleOf(panel);
-    frames.forEach((frame, at) => (system[row * (size + 1) + at] = pairPotential(frame, middle)));
+    for (const mirror of MIRRORS) {
+      addPotentials(system.subarray(row * (size + 1)), outline, { place: middle, mirror });
+    }
     system[row * (size + 1) + size] = 0.5;
   });
   if (!solveLinear(system, size)) return undefined;
@@ -57,11 +62,12 @@ export function solvePanels(panels: readonly Panel[], gap: number): HexField | u
   const loudest = surface(peak);
   const front = surface(0);
   if (loudest === undefined || front === undefined) return undefined;
+  const scaled = charges.map((charge) => (gap * charge) / (2 * Math.PI));
   return {
     fieldFactor: loudest.field,
     peak: loudest,
     front,
-    fieldAt: (place) => fieldOf(frames, place, (index) => gap * (charges[index] ?? 0)),
+    fieldAt: (place) => fieldOf(outline, scaled, place),
   };
 }
 
@@ -75,71 +81,96 @@ function outwardOf({ x0, y0, x1, y1 }: Panel): Point {
   return { x: (y1 - y0) / length, y: -(x1 - x0) / length };
 }
 
-/** A panel's own frame: its start, its direction and its length. */
-interface Frame {
-  readonly x0: number;
-  readonly y0: number;
-  readonly ux: number;
-  readonly uy: number;
-  readonly length: number;
+/** Corners of an outline with the direction and the length of the panel that starts at each. */
+interface Outline {
+  readonly x: Float64Array;
+  readonly y: Float64Array;
+  readonly ux: Float64Array;
+  readonly uy: Float64Array;
+  readonly length: Float64Array;
 }
 
-function frameOf({ x0, y0, x1, y1 }: Panel): Frame {
-  const length = Math.hypot(x1 - x0, y1 - y0);
-  return { x0, y0, ux: (x1 - x0) / length, uy: (y1 - y0) / length, length };
-}
-
-/** Potential of a panel and its mirrors: the same charge below the axis, the opposite one on the other bar. */
-function pairPotential(frame: Frame, { x, y }: Point): number {
-  return (
-    potential(frame, x, y) + potential(frame, x, -y) - potential(frame, -x, y) - potential(frame, -x, -y)
-  );
-}
-
-/** Potential of unit charge density on a panel, -(1/2 pi) times the integral of ln r. */
-function potential({ x0, y0, ux, uy, length }: Frame, x: number, y: number): number {
-  const along = (x - x0) * ux + (y - y0) * uy;
-  const across = (y - y0) * ux - (x - x0) * uy;
-  const rest = length - along;
-  const angle = across === 0 ? 0 : across * (Math.atan(along / across) + Math.atan(rest / across));
-  const sum = halfLog(along, across) + halfLog(rest, across) - length + angle;
-  return -sum / (2 * Math.PI);
-}
-
-function halfLog(along: number, across: number): number {
-  const square = along * along + across * across;
-  return square === 0 ? 0 : 0.5 * along * Math.log(square);
+function outlineOf(panels: readonly Panel[]): Outline {
+  const length = Float64Array.from(panels, ({ x0, y0, x1, y1 }) => Math.hypot(x1 - x0, y1 - y0));
+  const last = panels.at(-1);
+  return {
+    x: Float64Array.from([...panels.map(({ x0 }) => x0), last?.x1 ?? 0]),
+    y: Float64Array.from([...panels.map(({ y0 }) => y0), last?.y1 ?? 0]),
+    ux: Float64Array.from(panels, ({ x0, x1 }, index) => (x1 - x0) / (length[index] ?? 0)),
+    uy: Float64Array.from(panels, ({ y0, y1 }, index) => (y1 - y0) / (length[index] ?? 0)),
+    length,
+  };
 }
 
 // The mirrors by the signs of x and y. The field of a mirrored charge is the mirrored field: seen from the mirrored place,
 // each part keeps or turns its sign with its own axis, and the charge on the other bar turns both once more.
 const MIRRORS = [
-  { x: 1, y: 1, partX: 1, partY: 1 },
-  { x: 1, y: -1, partX: 1, partY: -1 },
-  { x: -1, y: 1, partX: 1, partY: -1 },
-  { x: -1, y: -1, partX: 1, partY: 1 },
+  { x: 1, y: 1, charge: 1, partX: 1, partY: 1 },
+  { x: 1, y: -1, charge: 1, partX: 1, partY: -1 },
+  { x: -1, y: 1, charge: -1, partX: 1, partY: -1 },
+  { x: -1, y: -1, charge: -1, partX: 1, partY: 1 },
 ] as const;
 
-function fieldOf(frames: readonly Frame[], place: Point, chargeAt: (index: number) => number): Point {
+interface Seen {
+  readonly place: Point;
+  readonly mirror: (typeof MIRRORS)[number];
+}
+
+/**
+ * Adds the potential of unit charge density on every panel of a mirrored outline to a row: -(1/2 pi) times the integral of
+ * ln r. A corner's logarithm serves both panels that meet there.
+ */
+function addPotentials(row: Float64Array, outline: Outline, { place, mirror }: Seen): void {
+  const { length } = outline;
+  const scale = -mirror.charge / (2 * Math.PI);
+  let dx = mirror.x * place.x - (outline.x[0] ?? 0);
+  let dy = mirror.y * place.y - (outline.y[0] ?? 0);
+  let log = Math.log(dx * dx + dy * dy);
+  for (let index = 0; index < length.length; index += 1) {
+    const ux = outline.ux[index] ?? 0;
+    const uy = outline.uy[index] ?? 0;
+    const whole = length[index] ?? 0;
+    const along = dx * ux + dy * uy;
+    const rest = whole - along;
+    dx = mirror.x * place.x - (outline.x[index + 1] ?? 0);
+    dy = mirror.y * place.y - (outline.y[index + 1] ?? 0);
+    const across = Math.abs(dy * ux - dx * uy);
+    const next = Math.log(dx * dx + dy * dy);
+    const angle = Math.atan2(across * whole, across * across - along * rest);
+    row[index] = (row[index] ?? 0) + scale * (0.5 * (along * log + rest * next) - whole + across * angle);
+    log = next;
+  }
+}
+
+function fieldOf(outline: Outline, charges: Float64Array, place: Point): Point {
+  const { length } = outline;
   let fieldX = 0;
   let fieldY = 0;
-  frames.forEach(({ x0, y0, ux, uy, length }, index) => {
+  for (const mirror of MIRRORS) {
     let sumX = 0;
     let sumY = 0;
-    for (const mirror of MIRRORS) {
-      const x = mirror.x * place.x - x0;
-      const y = mirror.y * place.y - y0;
-      const along = x * ux + y * uy;
-      const across = y * ux - x * uy;
-      const rest = length - along;
-      const tangent = 0.5 * Math.log((along * along + across * across) / (rest * rest + across * across));
-      const normal = across === 0 ? 0 : Math.atan(along / across) + Math.atan(rest / across);
-      sumX += mirror.partX * (tangent * ux - normal * uy);
-      sumY += mirror.partY * (tangent * uy + normal * ux);
+    let dx = mirror.x * place.x - (outline.x[0] ?? 0);
+    let dy = mirror.y * place.y - (outline.y[0] ?? 0);
+    let square = dx * dx + dy * dy;
+    for (let index = 0; index < length.length; index += 1) {
+      const ux = outline.ux[index] ?? 0;
+      const uy = outline.uy[index] ?? 0;
+      const whole = length[index] ?? 0;
+      const along = dx * ux + dy * uy;
+      const across = dy * ux - dx * uy;
+      dx = mirror.x * place.x - (outline.x[index + 1] ?? 0);
+      dy = mirror.y * place.y - (outline.y[index + 1] ?? 0);
+      const next = dx * dx + dy * dy;
+      const tangent = 0.5 * Math.log(square / next);
+      const angle = Math.atan2(Math.abs(across) * whole, across * across - along * (whole - along));
+      const normal = across < 0 ? -angle : across > 0 ? angle : 0;
+      const charge = charges[index] ?? 0;
+      sumX += charge * (tangent * ux - normal * uy);
+      sumY += charge * (tangent * uy + normal * ux);
+      square = next;
     }
-    const charge = chargeAt(index) / (2 * Math.PI);
-    fieldX += charge * sumX;
-    fieldY += charge * sumY;
-  });
+    fieldX += mirror.partX * sumX;
+    fieldY += mirror.partY * sumY;
+  }
   return { x: fieldX, y: fieldY };
 }

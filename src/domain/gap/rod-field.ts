@@ -10,8 +10,8 @@ interface Ring {
 export interface RodField {
   /** Field over mean field at the tip. */
   readonly fieldFactor: number;
-  /** Largest departure of the potential on the rod's surface from its own, as a share. */
-  readonly residual: number;
+  /** Largest departure of the potential on the rod's surface from its own, as a share: says how good the field is. */
+  readonly residual: () => number;
   /** Field over mean field on the axis, at a share of the gap from one tip. */
   readonly fieldAt: (share: number) => number;
 }
@@ -39,10 +39,23 @@ export function solveRodField(gap: number, length: number): RodField | undefined
     const z = gap * (0.5 - share);
     let field = 0;
     rings.forEach((ring, index) => {
-      field += (charges[index] ?? 0) * (axialField(ring, z) - axialField({ ...ring, place: -ring.place }, z));
+      const { radius, place } = ring;
+      field += (charges[index] ?? 0) * (axialField(radius, z - place) - axialField(radius, z + place));
     });
     return -gap * field;
   };
+  return { fieldFactor: fieldAt(0), residual: () => residualOf({ gap, length, outline, charges }), fieldAt };
+}
+
+interface Solved {
+  readonly gap: number;
+  readonly length: number;
+  readonly outline: ReturnType<typeof rodOutline>;
+  readonly charges: Float64Array;
+}
+
+/** Between the points where the potential was met. */
+function residualOf({ gap, length, outline, charges }: Solved): number {
   let residual = 0;
   for (let index = 1; index < outline.length; index += 1) {
     const a = outline[index - 1]?.surface;
@@ -50,10 +63,10 @@ export function solveRodField(gap: number, length: number): RodField | undefined
     if (a === undefined || b === undefined) continue;
     const between = onRod(0.5 * (a.arc + b.arc), gap, length);
     let sum = 0;
-    rings.forEach((ring, at) => (sum += (charges[at] ?? 0) * pairPotential(ring, between)));
+    outline.forEach(({ inside }, at) => (sum += (charges[at] ?? 0) * pairPotential(inside, between)));
     residual = Math.max(residual, Math.abs(2 * sum - 1));
   }
-  return { fieldFactor: fieldAt(0), residual, fieldAt };
+  return residual;
 }
 
 interface SurfacePoint {
@@ -114,16 +127,17 @@ function arcsFrom(gap: number, whole: number): readonly number[] {
 
 /** Potential of a ring of unit charge and of its opposite on the other rod. */
 function pairPotential(ring: Ring, point: { readonly radius: number; readonly place: number }): number {
-  return ringPotential(ring, point) - ringPotential({ ...ring, place: -ring.place }, point);
+  const { radius } = ring;
+  return (
+    ringPotential(radius, point.radius, point.place - ring.place) -
+    ringPotential(radius, point.radius, point.place + ring.place)
+  );
 }
 
 /** Potential of a ring, charge over its mean distance: 2 K(m)/(pi longest distance), K by Gauss's mean. */
-function ringPotential(
-  ring: Ring,
-  { radius, place }: { readonly radius: number; readonly place: number },
-): number {
-  const longest = Math.hypot(radius + ring.radius, place - ring.place);
-  const shortest = Math.hypot(radius - ring.radius, place - ring.place);
+function ringPotential(ring: number, radius: number, away: number): number {
+  const longest = Math.sqrt((radius + ring) ** 2 + away * away);
+  const shortest = Math.sqrt((radius - ring) ** 2 + away * away);
   return 1 / arithmeticGeometricMean(longest, shortest);
 }
 
@@ -138,7 +152,7 @@ function arithmeticGeometricMean(a: number, b: number): number {
   return upper;
 }
 
-function axialField(ring: Ring, z: number): number {
-  const away = z - ring.place;
-  return away / Math.hypot(ring.radius, away) ** 3;
+function axialField(radius: number, away: number): number {
+  const square = radius * radius + away * away;
+  return away / (square * Math.sqrt(square));
 }
