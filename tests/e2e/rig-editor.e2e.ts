@@ -1,7 +1,7 @@
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { HERON } from '../../seeds/rigs/heron';
-import { goTo, holdSecond, keyIn, press, signInFirst, unlock } from './support/hands';
+import { holdSecond, keyIn, press, signInFirst, unlock } from './support/hands';
 import { openLabServer, type LabServer, type SignIn } from './support/lab-server';
 import { ownEntries } from './support/own-entries';
 import { openTablet, PHONE, TABLET, type Size, type Tablet } from './support/tablet';
@@ -35,7 +35,9 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
   beforeAll(async () => {
     tablet = await openTablet(lab.url, size);
     await signInFirst(tablet.page(), ada);
-    await goTo(tablet.page(), 'Rigs');
+    await tablet.page().goto(`${lab.url}/rigs`);
+    await unlock(tablet.page(), ada.name);
+    await tablet.page().getByRole('button', { name: 'New rig' }).waitFor();
     // The editor's own chunk is in the cache once the worker has it; a reload then needs no network.
     await tablet.page().evaluate(async () => (await navigator.serviceWorker.ready).scope);
     await tablet.cutNetwork(true);

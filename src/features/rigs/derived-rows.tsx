@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { Caution } from '../../components/caution';
 import { FieldRow } from '../../components/field-row';
-import type { RigSpec } from '../../domain/book/rig-spec';
+import type { CapacitorSpec, RigSpec } from '../../domain/book/rig-spec';
 import type { DerivedRow } from './derived-view';
 
 interface DerivedRowsProps {
@@ -59,7 +59,22 @@ function shortWords(row: DerivedRow, spec: RigSpec): { readonly label: string; r
     case 'stored':
       return { label: 'Stored', source: `${supply_kV}\u2009kV, ${supply_mA}\u2009mA` };
     case 'stress_first':
-      return { label: 'Stress', source: limitWords(spec) };
+      return { label: 'Stress', source: limitWords(spec.first) };
+    case 'stress_second':
+      return { label: 'Stress', source: limitWords(spec.second) };
+    case 'margin_first':
+    case 'margin_second':
+      return { label: 'Margin', source: 'limit over stress' };
+    case 'channel_static':
+      return { label: 'Static break', source: row.band ?? '' };
+    case 'rise':
+      return { label: 'Voltage rise', source: row.band ?? '' };
+    case 'current_rise':
+      return { label: 'Current rise', source: row.band ?? '' };
+    case 'gap_current':
+      return { label: 'Gap current', source: row.band ?? '' };
+    case 'eyewear':
+      return { label: 'Eyewear', source: 'density at least' };
     case 'rate':
       return { label: 'Rate', source: 'at most' };
     case 'reach':
@@ -69,6 +84,6 @@ function shortWords(row: DerivedRow, spec: RigSpec): { readonly label: string; r
   }
 }
 
-function limitWords({ first }: RigSpec): string {
-  return first.kind === 'sheet' ? `limit ${first.strength_kV_mm}` : `limit ${first.rated_kV}`;
+function limitWords(capacitor: CapacitorSpec): string {
+  return `limit ${capacitor.kind === 'sheet' ? capacitor.strength_kV_mm : capacitor.rated_kV}`;
 }

@@ -34,9 +34,6 @@ export function RigFigure({ rig, view, settings }: Props) {
         <span className="muted">
           {TOPOLOGY_WORDS[spec.topology]}, gap in <Gas name={spec.gap.gas} />. Short {rings} each by itself.
         </span>
-        <Link to={paths.rigParts(rig.id)} className="rig-link">
-          Parts and wear
-        </Link>
       </div>
       <PartingView rig={rig} zone={settings.zone} />
       <RigCircuit name={rig.name} spec={spec} derived={view.derived} />
@@ -44,6 +41,11 @@ export function RigFigure({ rig, view, settings }: Props) {
         <Wave view={view} />
         <div>
           <PermitBlock rig={rig} zone={settings.zone} />
+          <p>
+            <Link to={paths.rigParts(rig.id)} className="rig-link">
+              Parts and wear
+            </Link>
+          </p>
           <ShortingPoints spec={spec} />
         </div>
       </div>

@@ -7,6 +7,7 @@ import { latestRevision } from '../../../domain/book/documents/rig';
 import { DerivedBlock, Hazard, Wave } from '../derived-block';
 import { DerivedRows } from '../derived-rows';
 import { derivedRows } from '../derived-view';
+import type { DerivedKey } from '../../../domain/rules/rig-derived';
 import { RigCircuit } from '../rig-circuit';
 import { useRigDerived, type RigDerivedView } from '../use-rig-derived';
 import { EditFieldsColumn } from './edit-fields-column';
@@ -27,7 +28,7 @@ export function EditScreen({ edit }: { readonly edit: RigEdit }) {
         <DerivedRows
           label="What comes out"
           spec={figures.spec}
-          rows={derivedRows(view.derived, KEY_FIGURES)}
+          rows={derivedRows(view.derived, KEY_FIGURES[edit.view] ?? USUAL_FIGURES)}
         />
       )}
     </EditFieldsColumn>
@@ -46,7 +47,18 @@ export function EditScreen({ edit }: { readonly edit: RigEdit }) {
   );
 }
 
-const KEY_FIGURES = ['stored', 'self_break', 'channel_peak', 'rate'] as const;
+const USUAL_FIGURES: readonly DerivedKey[] = ['stored', 'self_break', 'channel_peak', 'rate'];
+
+/** What the numbers of a section move most. */
+const KEY_FIGURES: Readonly<Partial<Record<RigEdit['view'], readonly DerivedKey[]>>> = {
+  gap: ['self_break', 'reach', 'channel_peak', 'rate'],
+  first: ['stress_first', 'margin_first', 'stored', 'channel_peak'],
+  second: ['stress_second', 'margin_second', 'stored', 'channel_peak'],
+  channel: ['channel_static', 'channel_peak', 'rise', 'current_rise'],
+  charging: ['stored', 'reach', 'rate', 'self_break'],
+  model: ['channel_peak', 'rise', 'current_rise', 'gap_current'],
+  beam: ['eyewear', 'stored', 'channel_peak'],
+};
 
 function EditFigure({ edit, view }: { readonly edit: RigEdit; readonly view: RigDerivedView | null }) {
   const { rig, underneath, save } = edit;
