@@ -74,14 +74,14 @@ function titleOf({ field, figures }: SweepPlan, { lookup }: LookupView): string 
 function SweepHead({ view, plan }: { readonly view: LookupView; readonly plan: SweepPlan }) {
   const [open, setOpen] = useState(false);
   return (
-    <p className="lookup-sweep-head">
+    <div className="lookup-sweep-head">
       <b>{plan.figures.map((figure) => figure.label).join(' and ')}</b> against{' '}
       <b>{plan.field.label.toLowerCase()}</b>{' '}
       <button type="button" className="lookup-act" onClick={() => setOpen(true)}>
         Change
       </button>
       {open ? <SweepDialog view={view} plan={plan} onClose={() => setOpen(false)} /> : null}
-    </p>
+    </div>
   );
 }
 
