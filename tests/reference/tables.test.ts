@@ -9,8 +9,10 @@ import { GAP } from './tables/gap';
 import { GAS_AND_ROOM } from './tables/gas-and-room';
 import { SPARK_AND_LINE } from './tables/spark-and-line';
 import { isPublished, type Row, type Table } from './tables/table';
+import { UNIFORM_GAP } from './tables/uniform-gap';
 
 const TABLES: readonly Table[] = [
+  ...UNIFORM_GAP,
   ...GAP,
   ...SPARK_AND_LINE,
   ...CAPACITOR,
