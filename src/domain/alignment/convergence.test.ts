@@ -74,12 +74,21 @@ describe('whether an alignment converges', () => {
     expect(types(measured(4, 4), arcs('both-ends'))).toEqual(['bowed']);
     expect(types(measured(4, 4), arcs('even'))).toEqual([]);
     // Arcs from before the turning say nothing about what is now.
-    expect(types(measured(4.1, 3.9), arcs('b-end'), turned(-0.2, 0), measured(3.9, 3.9))).toEqual([]);
+    expect(types(measured(4.1, 3.9), arcs('b-end'), turned(-0.1, 0), measured(4, 3.9))).not.toContain(
+      'arcs-contradict',
+    );
   });
 
   it('says where the feeler is coarser than what is left', () => {
     expect(types(measured(4.05, 3.98, 0.03))).toEqual(['feeler-coarse']);
     expect(types(measured(4.2, 3.8, 0.03))).toEqual([]);
+  });
+
+  it('finds gaps that do not repeat, and turns that led no nearer', () => {
+    expect(types(measured(4.3, 4), measured(4, 4.3))).toEqual(['not-repeated']);
+    expect(types(measured(4.3, 4), arcs('even'), measured(4.31, 4))).toEqual(['turned-away']);
+    const away = judge(measured(4.2, 4), turned(0.2, 0), measured(4.4, 4));
+    expect(away).toMatchObject({ state: 'stuck', reasons: [{ type: 'turned-away' }] });
   });
 
   it('finds somebody who overshoots to and fro', () => {

@@ -34,6 +34,8 @@ export type ConvergenceReason =
   | 'screw-stuck'
   | 'moved-otherwise'
   | 'moved-untouched'
+  | 'not-repeated'
+  | 'turned-away'
   | 'feeler-coarse'
   | 'arcs-contradict'
   | 'bowed'
@@ -66,13 +68,22 @@ export function judgeConvergence(steps: readonly AlignmentStep[], goal: Alignmen
     return { state: 'nothing-measured', lead: 'Measure both ends first.', reasons: [], errors_mm };
   }
   const reasons = [
+    ...repeatReasons(steps),
     ...screwReasons(steps, goal),
     ...arcReasons(steps, last.gaps),
     ...feelerReasons(last.gaps, goal),
     ...swingReasons(measured.map(({ gaps }) => gaps)),
   ];
-  return { ...verdict(last.gaps, { errors_mm, goal, reasons }), reasons, errors_mm };
+  const said = verdict(last.gaps, { errors_mm, goal, reasons });
+  // Every screw did as turned, and yet it is no better: then the turns were the wrong ones.
+  const why = said.state === 'stuck' && reasons.length === 0 ? [TURNED_AWAY] : reasons;
+  return { ...said, reasons: why, errors_mm };
 }
+
+const TURNED_AWAY = {
+  type: 'turned-away',
+  words: 'No nearer to the target: turn as recommended from the last gaps, and measure again.',
+} as const;
 
 function verdict(
   gaps: GapPair,
@@ -111,6 +122,26 @@ function lastTurning(steps: readonly AlignmentStep[]) {
   if (before?.type !== 'measured' || now?.type !== 'measured') return null;
   const turned = steps.slice(from + 1, after).filter((step) => step.type === 'turned');
   return turned.length === 0 ? null : { before: before.gaps, now: now.gaps, turned };
+}
+
+/** Two measurements with no screw turned between them should agree. */
+function repeatReasons(steps: readonly AlignmentStep[]): Convergence['reasons'] {
+  const relevant = steps.filter((step) => step.type !== 'arcs');
+  const [before, now] = relevant.slice(-2);
+  if (before?.type !== 'measured' || now?.type !== 'measured') return [];
+  const noise = 2 * Math.hypot(before.gaps.feeler_mm, now.gaps.feeler_mm);
+  const apart = Math.max(
+    Math.abs(now.gaps.a_mm - before.gaps.a_mm),
+    Math.abs(now.gaps.b_mm - before.gaps.b_mm),
+  );
+  if (apart <= noise) return [];
+  return [
+    {
+      type: 'not-repeated',
+      words:
+        'No screw was turned between the last two measurements, yet they differ: measure again with the same drag on the feeler, and look for play.',
+    },
+  ];
 }
 
 function screwReasons(steps: readonly AlignmentStep[], goal: AlignmentGoal): Convergence['reasons'] {

@@ -35,7 +35,7 @@ export function targetSpec(setting: AlignmentSetting): FigureSpec {
     label: 'Target',
     rule: { ...GAP, field: 'target', name: 'Target' },
     initial: String(setting.target_mm),
-    source: 'rig’s mean spacing',
+    source: 'rig, mean',
   };
 }
 
@@ -43,6 +43,7 @@ export function feelerSpec(setting: AlignmentSetting): FigureSpec {
   return {
     key: 'feeler',
     label: 'Feeler error',
+    short: 'Feeler',
     unit: 'mm',
     step: 0.005,
     rule: { field: 'feeler', name: 'Feeler error', unit: 'mm', min: 0.001, max: 1 },
@@ -85,7 +86,7 @@ export function turnSpecs(
     step: 1,
     rule: { field: `turn${at}`, name: screw.name, unit: 'eighths', min: -800, max: 800 },
     initial: String(recommended?.[at] ?? 0),
-    source: recommended === null ? 'not turned' : 'as recommended',
+    source: recommended === null ? 'not turned' : 'as advised',
   }));
 }
 

@@ -114,10 +114,10 @@ function Figure({
   readonly screen: AlignmentScreen;
   readonly hindrance: string | null;
 }) {
-  const { rig, revision, setting, draft, mode, recommended, logged } = screen;
+  const { rig, revision, setting, draft, mode, advice, advised } = screen;
   const zone = useLab()?.settings.zone ?? 'Etc/UTC';
-  const turned = Array.isArray(screen.turned) ? (screen.turned as readonly [number, number]) : recommended;
-  const after = logged === null || turned === null ? null : gapsAfter(logged, setting, turned);
+  const turned = typeof screen.turned === 'object' && screen.turned !== null ? screen.turned : advice;
+  const after = advised === null || turned === null ? null : gapsAfter(advised, setting, turned);
   return (
     <div className="align">
       <div className="align-head">
@@ -128,8 +128,8 @@ function Figure({
         setting={setting}
         gaps={screen.shown}
         target_mm={screen.goal.target_mm}
-        after={screen.typed === null ? after : null}
-        turns={screen.typed === null && logged !== null ? turned : null}
+        after={after}
+        turns={advised === null ? null : turned}
         arcs={draft.arcs}
         onArcs={(arcs) => screen.set((now) => ({ ...now, mode: 'arcs', arcs }))}
       />

@@ -146,16 +146,6 @@ function GapLabels({ plan, drawn, setting, gaps }: Drawn) {
                 {formatQuantity(gap, 'mm', { digits: { decimals: 2 }, rounding: 'nearest' })}
               </text>
             )}
-            <text
-              className="align-end"
-              x={x}
-              y={plan.floor + plan.bar / 2}
-              textAnchor={anchor}
-              dominantBaseline="central"
-              dx={away}
-            >
-              {end}
-            </text>
           </g>
         );
       })}

@@ -20,8 +20,8 @@ export interface DrawingPlan {
 }
 
 /** Of the height: the room for screws above, and each bar. */
-const ABOVE = 0.2;
-const BAR = 0.17;
+const ABOVE = 0.15;
+const BAR = 0.16;
 
 /** Lengths to scale along the channel; gaps to a larger scale of their own, so that a wedge of hundredths shows. */
 export function drawingPlan(

@@ -21,7 +21,7 @@ export function HistoryTable({
       key: 'when',
       head: 'when',
       align: 'start',
-      cell: ({ doc }) => momentWords(doc.logged.stamp.wall_ms, zone),
+      cell: ({ doc }) => <span className="nowrap">{momentWords(doc.logged.stamp.wall_ms, zone)}</span>,
     },
     {
       key: 'what',
@@ -35,7 +35,7 @@ export function HistoryTable({
       key: 'by',
       head: 'by',
       align: 'start',
-      cell: ({ doc }) => names.get(doc.logged.by ?? '') ?? 'not said',
+      cell: ({ doc }) => <span className="nowrap">{names.get(doc.logged.by ?? '') ?? 'not said'}</span>,
     },
   ];
   if (lines.length === 0) return <p className="muted">Nothing has been measured on this rig yet.</p>;

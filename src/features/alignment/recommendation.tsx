@@ -12,7 +12,7 @@ import type { AlignmentScreen } from './use-alignment-screen';
 
 /** Which screw, which way, how far, and what that gives. */
 export function Recommendation({ screen }: { readonly screen: AlignmentScreen }) {
-  const { setting, logged, plan, recommended, rig, last } = screen;
+  const { setting, advised, plan, advice, rig, last } = screen;
   if (setting.missing !== null || setting.screws === null) {
     return (
       <SaysBlock lead="No recommendation.">
@@ -21,7 +21,7 @@ export function Recommendation({ screen }: { readonly screen: AlignmentScreen })
       </SaysBlock>
     );
   }
-  if (logged === null) {
+  if (advised === null) {
     return (
       <SaysBlock lead="Measure both ends.">
         {last === null
@@ -30,15 +30,15 @@ export function Recommendation({ screen }: { readonly screen: AlignmentScreen })
       </SaysBlock>
     );
   }
-  if (plan === undefined || !plan.ok || recommended === null) {
+  if (plan === undefined || !plan.ok || advice === null) {
     return <SaysBlock lead="No recommendation.">{plan?.ok === false ? plan.refusal.words : ''}</SaysBlock>;
   }
   const [first, second] = setting.screws;
   return (
     <div className="align-plan">
-      <ScrewTurns screw={first} eighths={recommended[0]} />
-      <ScrewTurns screw={second} eighths={recommended[1]} />
-      <Predicted screen={screen} logged={logged} ends={plan.value.ends} recommended={recommended} />
+      <ScrewTurns screw={first} eighths={advice[0]} />
+      <ScrewTurns screw={second} eighths={advice[1]} />
+      <Predicted screen={screen} gaps={advised} ends={plan.value.ends} advice={advice} />
       {plan.value.warnings.map((warning) => (
         <p key={warning.type}>{warning.words}</p>
       ))}
@@ -68,18 +68,18 @@ function ScrewTurns({ screw, eighths }: { readonly screw: ScrewSpec; readonly ei
 
 interface PredictedProps {
   readonly screen: AlignmentScreen;
-  readonly logged: Gaps;
+  readonly gaps: Gaps;
   readonly ends: { readonly left: Answer; readonly right: Answer };
-  readonly recommended: readonly [number, number];
+  readonly advice: readonly [number, number];
 }
 
-function Predicted({ screen, logged, ends, recommended }: PredictedProps) {
-  const after = gapsAfter(logged, screen.setting, recommended);
-  const now = spread_pct(logged, screen.ambient_bar_abs);
+function Predicted({ screen, gaps, ends, advice }: PredictedProps) {
+  const after = gapsAfter(gaps, screen.setting, advice);
+  const now = spread_pct(gaps, screen.ambient_bar_abs);
   const then = after === null ? null : spread_pct(after, screen.ambient_bar_abs);
   return (
     <p>
-      Then A {endWords(ends.left)}, B {endWords(ends.right)}.
+      {screen.typed === null ? '' : 'Not logged yet. '}Then A {endWords(ends.left)}, B {endWords(ends.right)}.
       {now === null || then === null ? null : (
         <span className="muted">
           {' '}

@@ -49,14 +49,10 @@ export function useAlignmentScreen(rig: RigDoc) {
 
   const typed = typedGaps(setting, draft);
   const logged = last?.stands === true ? gapsOf(last.measured.body) : null;
-  const plan =
-    logged === null
-      ? undefined
-      : planFor(logged, setting, { target_mm, feeler_mm: last?.measured.body.feeler_error_mm ?? feeler_mm });
-  const recommended =
-    plan?.ok === true
-      ? ([eighths(plan.value.rounded_turns[0]), eighths(plan.value.rounded_turns[1])] as const)
-      : null;
+  const planOf = (gaps: Gaps, error_mm: number) => planFor(gaps, setting, { target_mm, feeler_mm: error_mm });
+  const plan = logged === null ? undefined : planOf(logged, last?.measured.body.feeler_error_mm ?? feeler_mm);
+  const recommended = eighthsOf(plan);
+  const typedPlan = typed === null ? undefined : planOf(typed, feeler_mm);
   const mode = draft.mode ?? nextMode({ measured: logged !== null, recommended });
   const specs =
     mode === 'gaps' ? gapSpecs(setting) : mode === 'turns' ? turnSpecs(setting, recommended) : ARC_SPECS;
@@ -85,7 +81,10 @@ export function useAlignmentScreen(rig: RigDoc) {
     /** Gaps to draw: what is being entered, else what was measured last. */
     shown: typed ?? (last === null ? null : gapsOf(last.measured.body)),
     logged,
-    plan,
+    /** What the recommendation on the screen is for: gaps being entered go before those logged. */
+    advised: typed ?? logged,
+    plan: typed === null ? plan : typedPlan,
+    advice: typed === null ? recommended : eighthsOf(typedPlan),
     recommended,
     mode,
     figures,
@@ -113,6 +112,8 @@ function nextMode(now: {
   return now.recommended !== null && now.recommended.some((turns) => turns !== 0) ? 'turns' : 'arcs';
 }
 
-function eighths(turns: number): number {
-  return Math.round(turns * 8);
+function eighthsOf(plan: ReturnType<typeof planFor>): readonly [number, number] | null {
+  if (plan?.ok !== true) return null;
+  const [first, second] = plan.value.rounded_turns;
+  return [Math.round(first * 8), Math.round(second * 8)];
 }

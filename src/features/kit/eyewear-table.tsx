@@ -30,9 +30,9 @@ export function EyewearTable({ rigs, kit, now_ms }: Props) {
         rowKey={(row) => row.rig.id}
       />
       <p className="muted">
-        By the rig’s own beam and single pulses; dye light and whatever else is present comes on top. A pair
-        must state a density at every wavelength that is there. The person responsible for laser safety
-        decides.
+        By the rig’s own beam and one pulse at its limit. The dose of the day, dye light and whatever else is
+        present come on top, so eyewear stays on where it reads any. A pair must state a density at every
+        wavelength that is there. The person responsible for laser safety decides.
       </p>
     </div>
   );
@@ -84,5 +84,7 @@ const NM = { digits: { decimals: 1 }, rounding: 'nearest' } as const;
 
 function needWords(need: Extract<EyewearNeed, { type: 'known' }>): string {
   const most = Math.max(...need.lines.map((line) => line.density));
+  // No density would read as "none needed": a single pulse says nothing of the day's dose.
+  if (most === 0) return 'any';
   return formatFigure(most, { digits: { decimals: 1 }, rounding: 'up' });
 }
