@@ -74,7 +74,7 @@ function answer(input: Entered, plot: boolean): Result<LookupAnswer> {
         unit: 'nF',
         weight: 'answer',
       }),
-      energyFigure(energy.value, hazard.value),
+      energyFigure(energy.value, { hazard: hazard.value, large: input.choice('kind') === 'bank' }),
       ...body.figures,
       ...bleed.value.figures,
       ...life,
@@ -110,12 +110,15 @@ function hazardParts(input: Entered, capacitance_F: number): Result<Hazard> {
   return ok({ words: band.value.words, warnings: band.value.warnings });
 }
 
-function energyFigure(energy: Answer, { words }: Hazard): Figure {
+function energyFigure(
+  energy: Answer,
+  { hazard, large }: { readonly hazard: Hazard; readonly large: boolean },
+): Figure {
   return figureOf(['energy', 'stored energy'], energy, {
     rounding: 'up',
-    weight: 'main',
+    weight: large ? 'answer' : 'main',
     digits: 2,
-    note: words ?? NO_SUPPLY,
+    note: hazard.words ?? NO_SUPPLY,
   });
 }
 
