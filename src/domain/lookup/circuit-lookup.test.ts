@@ -180,6 +180,17 @@ describe('the circuit lookup', () => {
     expect(CIRCUIT_LOOKUP.answer({ ...without, ambient_bar_abs: 1 }).ok).toBe(true);
   });
 
+  it('refuses beside a field that is shown', () => {
+    const flat = {
+      ...KETTLE,
+      gap_by: 'strip',
+      strap_spacing_mm: 0.001,
+      strap_width_mm: 5000,
+      strap_length_mm: 1,
+    };
+    expect(CIRCUIT_LOOKUP.answer(flat)).toMatchObject({ refusal: { field: 'gap_by' } });
+  });
+
   it('solves for the peaking capacitor that reaches a peak', () => {
     const solvable = CIRCUIT_LOOKUP.solvable.find((one) => one.field === 'second_nF')!;
     const found = solveFor(CIRCUIT_LOOKUP, KETTLE, { solvable, target: 22 });

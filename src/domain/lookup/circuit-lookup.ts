@@ -19,8 +19,9 @@ import { circuitInput, type CircuitInput } from './circuit-lookup-parts';
 import { circuitPlot } from './circuit-lookup-plot';
 import { circuitStart } from './circuit-lookup-start';
 import { beside, entered, type Entered } from './entered';
+import { shownFields } from './fields';
 import { warningsOf } from './figures';
-import type { Lookup, LookupAnswer } from './lookup';
+import type { Lookup, LookupAnswer, Values } from './lookup';
 
 /** The transient of a rig: channel voltage, currents, rise, energy and gain window (physics D, E and L). */
 export const CIRCUIT_LOOKUP: Lookup = {
@@ -32,7 +33,7 @@ export const CIRCUIT_LOOKUP: Lookup = {
   start: circuitStart,
   answer: (values, wants = { plot: true }) =>
     andThen(entered(CIRCUIT_FIELDS, values), (input) =>
-      beside(answer(input, wants.plot), CIRCUIT_FIELDS, NAMES),
+      besideShown(beside(answer(input, wants.plot), CIRCUIT_FIELDS, NAMES), values),
     ),
   solvable: [
     { field: 'second_nF', figure: 'peak', purpose: 'peak at least', rounding: 'down' },
@@ -83,6 +84,22 @@ const NAMES: Readonly<Record<string, string>> = {
   plate_pairs: 'feed_pairs',
   rise_s: 'wanted_rise_ns',
 };
+
+/** What stands for a field that these values do not show. */
+const INSTEAD: Readonly<Record<string, string>> = {
+  gap_nH: 'gap_by',
+  channel_nH: 'channel_by',
+  second_nF: 'ratio',
+  break_kV: 'over_static',
+};
+
+function besideShown(result: Result<LookupAnswer>, values: Values): Result<LookupAnswer> {
+  if (result.ok || result.refusal.field === undefined) return result;
+  const { field } = result.refusal;
+  const instead = INSTEAD[field];
+  const shown = shownFields({ fields: CIRCUIT_FIELDS }, values).some(({ key }) => key === field);
+  return shown || instead === undefined ? result : refused({ ...result.refusal, field: instead });
+}
 
 function answer(input: Entered, plot: boolean): Result<LookupAnswer> {
   const made = circuitInput(input);
