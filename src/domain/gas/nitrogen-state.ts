@@ -11,6 +11,8 @@ const CRITICAL_MOL_M3 = 11_183.9;
 const GAS_CONSTANT = 8.31451;
 /** Liquid density at the triple point is 2.8 of the critical one; no state of this range lies beyond it. */
 const DENSEST = 2.5;
+/** Of the density, in the terms below. */
+const HIGHEST_POWER = 8;
 /** Z is 1 to seven digits there, and the density too small to search for. */
 const IDEAL_BELOW_BAR = 1e-3;
 
@@ -97,19 +99,25 @@ export function compressibilityOf(pressure_bar_abs: number, temperature_C: numbe
   const kelvin = celsiusToKelvin(temperature.value);
   const tau = CRITICAL_K / kelvin;
   const scale_bar = (CRITICAL_MOL_M3 * GAS_CONSTANT * kelvin) / 1e5;
-  const short = (density: number) => density * scale_bar * factorAt(density, tau) - pressure.value;
+  // Only the density changes in the search.
+  const weights = TERMS.map(([n, temperature]) => n * tau ** temperature);
+  const short = (density: number) => density * scale_bar * factorAt(density, weights) - pressure.value;
   const density = brent(short, { low: 0, high: DENSEST });
   return density.ok && density.value > 0
     ? ok(pressure.value / (density.value * scale_bar))
     : refused({ type: 'no-state', field: 'pressure', words: 'Pressure: no state of the gas was found.' });
 }
 
-/** 1 + delta d(alpha)/d(delta). */
-function factorAt(density: number, tau: number): number {
+/** 1 + delta d(alpha)/d(delta), with the part of each term that depends on temperature alone given. */
+function factorAt(density: number, weights: readonly number[]): number {
+  const powers = [1];
+  for (let power = 1; power <= HIGHEST_POWER; power += 1) powers.push((powers[power - 1] ?? 1) * density);
+  const dampings = [0, 1, 2, 3, 4].map((damping) => (damping === 0 ? 0 : (powers[damping] ?? 0)));
+  const decays = dampings.map((damped) => Math.exp(-damped));
   let sum = 1;
-  for (const [n, temperature, power, damping] of TERMS) {
-    const damped = damping === 0 ? 0 : density ** damping;
-    sum += n * tau ** temperature * density ** power * Math.exp(-damped) * (power - damping * damped);
+  for (const [index, [, , power, damping]] of TERMS.entries()) {
+    const shape = power - damping * (dampings[damping] ?? 0);
+    sum += (weights[index] ?? 0) * (powers[power] ?? 0) * (decays[damping] ?? 1) * shape;
   }
   return sum;
 }

@@ -1,8 +1,13 @@
 import { describe, expect, it } from 'vitest';
+import { DEMO_LAB_SETTINGS } from '../../../seeds/lab';
+import { HERON_SPEC } from '../../../seeds/rigs/heron';
 import { KETTLE_SPEC } from '../../../seeds/rigs/kettle';
 import { ALIGNMENT_LOOKUP as ALIGNMENT } from './alignment-lookup';
-import { asked, figure, refusal } from './asked.fixture';
+import { createAsked } from './asked.fixture';
+import type { Values } from './lookup';
 import { solveFor } from './solve';
+
+const { asked, figure, refusal } = createAsked(ALIGNMENT, { spec: HERON_SPEC, settings: DEMO_LAB_SETTINGS });
 
 /** Bars of 240 mm, feeler and screws at both ends, 0.5 mm a turn, closing clockwise. */
 const WEDGED = {
@@ -28,53 +33,53 @@ const WEDGED = {
 describe('the alignment lookup', () => {
   it('turns each screw as worked by hand, and says which way', () => {
     // 0.1 mm to close at A and 0.15 mm to open at B are 0.2 and 0.3 turns: a quarter each.
-    expect(figure(ALIGNMENT, 'screw1', WEDGED)).toMatchObject({
+    expect(figure('screw1', WEDGED)).toMatchObject({
       value: 0.25,
       label: 'Screw A, clockwise',
       note: 'closes the gap',
     });
-    expect(figure(ALIGNMENT, 'screw2', WEDGED)).toMatchObject({
+    expect(figure('screw2', WEDGED)).toMatchObject({
       value: 0.25,
       label: 'Screw B, anticlockwise',
       note: 'opens the gap',
     });
-    expect(figure(ALIGNMENT, 'gap_a_then', WEDGED).value).toBeCloseTo(2.475, 9);
-    expect(figure(ALIGNMENT, 'gap_b_then', WEDGED).value).toBeCloseTo(2.475, 9);
-    expect(asked(ALIGNMENT, WEDGED).says).toBe(
+    expect(figure('gap_a_then', WEDGED).value).toBeCloseTo(2.475, 9);
+    expect(figure('gap_b_then', WEDGED).value).toBeCloseTo(2.475, 9);
+    expect(asked(WEDGED).says).toBe(
       'Turn Screw A by 1/4 turn clockwise (closes the gap), then Screw B by 1/4 turn anticlockwise (opens the gap). Then measure again.',
     );
   });
 
   it('turns the other way where the screw closes the other way, and by more where its lever is short', () => {
     const other = { ...WEDGED, screw1_closes: 'anticlockwise', screw2_lever: 0.5 };
-    expect(figure(ALIGNMENT, 'screw1', other).label).toBe('Screw A, anticlockwise');
-    expect(figure(ALIGNMENT, 'screw1', other).note).toBe('closes the gap');
-    expect(figure(ALIGNMENT, 'screw2', other).value).toBe(0.625);
+    expect(figure('screw1', other).label).toBe('Screw A, anticlockwise');
+    expect(figure('screw1', other).note).toBe('closes the gap');
+    expect(figure('screw2', other).value).toBe(0.625);
   });
 
   it('names the tight end, and leaves parallel bars alone', () => {
-    expect(asked(ALIGNMENT, WEDGED).warnings.map(({ words }) => words)).toContain(
+    expect(asked(WEDGED).warnings.map(({ words }) => words)).toContain(
       'The B end is the tight one: arcs will sit there.',
     );
-    const even = asked(ALIGNMENT, { ...WEDGED, gap_a_mm: 2.5, gap_b_mm: 2.5 });
+    const even = asked({ ...WEDGED, gap_a_mm: 2.5, gap_b_mm: 2.5 });
     expect(even.says).toMatch(/^Leave both screws/);
     expect(even.figures.find(({ key }) => key === 'spread')).toMatchObject({ value: 0 });
   });
 
   it('carries the feeler to the ends of the discharge, where it is worse than at the places', () => {
     const inset = { ...WEDGED, place_a_mm: 60, place_b_mm: 180 };
-    const width = (change: Parameters<typeof figure>[2]) => {
-      const { low = 0, high = 0 } = figure(ALIGNMENT, 'spread', change);
+    const width = (change: Values) => {
+      const { low = 0, high = 0 } = figure('spread', change);
       return high - low;
     };
     expect(width(inset)).toBeGreaterThan(1.8 * width({ ...WEDGED }));
-    expect(figure(ALIGNMENT, 'spread', { ...WEDGED, feeler_mm: 0 }).low).toBeGreaterThan(-10);
+    expect(figure('spread', { ...WEDGED, feeler_mm: 0 }).low).toBeGreaterThan(-10);
   });
 
   // 3 mm at 1 atm for 1 %: 36 um, by hand (physics F).
   it('allows 36 um at 3 mm and 1 atm for one per cent', () => {
     const at = { target_mm: 3, allowed_percent: 1, ambient_bar_abs: 1.01325 };
-    expect(figure(ALIGNMENT, 'allowed', at).value).toBeCloseTo(36, 0);
+    expect(figure('allowed', at).value).toBeCloseTo(36, 0);
   });
 
   it('finds the gap at B that breaks with A', () => {
@@ -96,6 +101,6 @@ describe('the alignment lookup', () => {
     [{ screw1_closes: 'left' }, 'screw1_closes'],
     [{ gap_a_mm: 0.02, gap_b_mm: 2, place_a_mm: 100 }, 'gap_a_mm'],
   ])('refuses %j beside %s', (change, field) => {
-    expect(refusal(ALIGNMENT, { ...WEDGED, ...change })).toMatchObject({ field });
+    expect(refusal({ ...WEDGED, ...change })).toMatchObject({ field });
   });
 });

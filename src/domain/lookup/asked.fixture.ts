@@ -1,29 +1,23 @@
-import { HERON_SPEC } from '../../../seeds/rigs/heron';
-import { DEMO_LAB_SETTINGS } from '../../../seeds/lab';
-import type { Figure, Lookup, LookupAnswer, Values } from './lookup';
+import type { Figure, Lookup, LookupAnswer, StartFrom, Values } from './lookup';
 
-/** A lookup as it starts from Heron in the demo lab, with some values of its own. */
-export function heronValues(lookup: Lookup, change: Values = {}): Values {
-  return { ...lookup.start({ spec: HERON_SPEC, settings: DEMO_LAB_SETTINGS }).values, ...change };
-}
-
-/** Its answer, or an error with the refusal's words. */
-export function asked(lookup: Lookup, change: Values = {}): LookupAnswer {
-  const result = lookup.answer(heronValues(lookup, change));
-  if (!result.ok) throw new Error(result.refusal.words);
-  return result.value;
-}
-
-/** One figure of the answer. */
-export function figure(lookup: Lookup, key: string, change: Values = {}): Figure {
-  const found = asked(lookup, change).figures.find((each) => each.key === key);
-  if (found === undefined) throw new Error(`${lookup.key} gives no figure ${key}`);
-  return found;
-}
-
-/** Its refusal, or an error where it answers. */
-export function refusal(lookup: Lookup, change: Values) {
-  const result = lookup.answer(heronValues(lookup, change));
-  if (result.ok) throw new Error(`${lookup.key} answers ${JSON.stringify(change)}`);
-  return result.refusal;
+/** A lookup filled in from somewhere, to be asked with some values of the test's own. */
+export function createAsked(lookup: Lookup, from: StartFrom) {
+  const start = lookup.start(from).values;
+  const values = (change: Values = {}): Values => ({ ...start, ...change });
+  const asked = (change: Values = {}): LookupAnswer => {
+    const result = lookup.answer(values(change));
+    if (!result.ok) throw new Error(result.refusal.words);
+    return result.value;
+  };
+  const figure = (key: string, change: Values = {}): Figure => {
+    const found = asked(change).figures.find((each) => each.key === key);
+    if (found === undefined) throw new Error(`${lookup.key} gives no figure ${key}`);
+    return found;
+  };
+  const refusal = (change: Values) => {
+    const result = lookup.answer(values(change));
+    if (result.ok) throw new Error(`${lookup.key} answers ${JSON.stringify(change)}`);
+    return result.refusal;
+  };
+  return { values, asked, figure, refusal };
 }

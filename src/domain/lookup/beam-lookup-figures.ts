@@ -16,17 +16,19 @@ const REFLECTANCE = 1;
 export function densityFigure(
   [key, label]: readonly [string, string],
   { lines }: EyewearAdvice,
-  extra: Pick<Figure, 'weight'> & { readonly note?: string },
+  { weight, note }: Required<Pick<Figure, 'weight' | 'note'>>,
 ): Figure {
-  const [line] = lines;
+  const density = lines[0]?.density ?? 0;
   return {
     key,
     label,
-    value: line?.density ?? 0,
+    value: density,
     unit: '',
     rounding: 'up',
     digits: 2,
-    ...extra,
+    weight,
+    // Nought must not read as a word to take the glasses off.
+    note: density === 0 ? 'one pulse asks for none; trains, lenses and hot spots do' : note,
   };
 }
 

@@ -47,7 +47,8 @@ function fromRig(spec: RigSpec): Values {
     pulse_energy_uJ: planned_uJ,
     wavelength_nm: line.wavelength_nm,
     pulse_ns: Number((line.pulse_s * 1e9).toPrecision(12)),
-    rate_Hz: spec.envelope.max_rate_Hz,
+    rate_Hz: line.train?.rate_Hz ?? spec.envelope.max_rate_Hz,
+    exposure_s: line.train?.exposure_s ?? DAY_S,
     width_mm: line.width_mm,
     height_mm: line.height_mm,
     divergence_width_mrad:

@@ -69,13 +69,13 @@ function answer(entries: Entered): Result<LookupAnswer> {
         weight: 'answer',
         note: 'from each end, for the time in the beam',
       }),
-      densityFigure(['od_train', `eyewear density at ${nm(wavelength_nm)}`], inTrain, {
+      densityFigure(['od', `eyewear density at ${nm(wavelength_nm)}`], inTrain, {
         weight: 'answer',
         note: 'for the time in the beam',
       }),
-      densityFigure(['od', 'eyewear density, one pulse'], eyewear, {
+      densityFigure(['od_pulse', 'eyewear density, one pulse'], eyewear, {
         weight: 'main',
-        note: 'as the rig\u2019s own figures give it',
+        note: 'for an eye that meets the beam once',
       }),
       ...dye.figures,
       figureOf(['distance_pulse', 'over the limit of one pulse within'], onePulse, { rounding: 'up' }),

@@ -11,7 +11,7 @@ import type { Figure, LookupAnswer, Plot } from './lookup';
 /** A flowmeter is rarely better than this share; common practice. */
 const FLOW_ERROR = 0.05;
 const MINUTES_PER_HOUR = 60;
-const CURVE_PIECES = 16;
+const CURVE_PIECES = 20;
 
 interface Use {
   readonly flow_L_min: number;

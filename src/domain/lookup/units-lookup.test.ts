@@ -1,8 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { asked, figure, refusal } from './asked.fixture';
+import { DEMO_LAB_SETTINGS } from '../../../seeds/lab';
+import { HERON_SPEC } from '../../../seeds/rigs/heron';
+import { createAsked } from './asked.fixture';
 import { shownFields } from './fields';
 import { UNITS_LOOKUP as UNITS } from './units-lookup';
 import { QUANTITIES } from './units-lookup-table';
+
+const { asked, figure, refusal } = createAsked(UNITS, { spec: HERON_SPEC, settings: DEMO_LAB_SETTINGS });
 
 describe('the units lookup', () => {
   // Exact by definition: 1 in = 25.4 mm, 1 atm = 1.01325 bar = 760 Torr, 1 psi = 6.894757 kPa, 0 C = 273.15 K.
@@ -20,26 +24,26 @@ describe('the units lookup', () => {
     [{ quantity: 'angle', value: 1, unit_angle: '\u00b0' }, 'mrad', 17.4533],
     [{ quantity: 'field', value: 80, unit_field: 'kV/mm' }, 'kV/cm', 800],
   ])('%j is in %s %d', (change, key, value) => {
-    expect(figure(UNITS, key, change).value / value).toBeCloseTo(1, 5);
+    expect(figure(key, change).value / value).toBeCloseTo(1, 5);
   });
 
   it('comes back to the same number by way of every unit', () => {
     for (const { key, units } of QUANTITIES) {
       for (const unit of units) {
         const from = { quantity: key, value: 300, [`unit_${key}`]: unit.label, ambient_bar_abs: 0.966 };
-        for (const { key: to, value } of asked(UNITS, from).figures) {
+        for (const { key: to, value } of asked(from).figures) {
           const back = { ...from, value, [`unit_${key}`]: to };
-          expect(figure(UNITS, unit.label, back).value, `${unit.label} by ${to}`).toBeCloseTo(300, 6);
+          expect(figure(unit.label, back).value, `${unit.label} by ${to}`).toBeCloseTo(300, 6);
         }
       }
     }
   });
 
   it('never tells gauge from absolute without an ambient', () => {
-    const answer = asked(UNITS, { value: 1, unit_pressure: 'bar(g)', ambient_bar_abs: null });
+    const answer = asked({ value: 1, unit_pressure: 'bar(g)', ambient_bar_abs: null });
     expect(answer.figures.every(({ unit }) => unit.endsWith('(g)'))).toBe(true);
     expect(answer.warnings.map(({ type }) => type)).toEqual(['no-ambient']);
-    expect(refusal(UNITS, { typed: '50 psi' })).toMatchObject({ type: 'gauge-or-absolute', field: 'typed' });
+    expect(refusal({ typed: '50 psi' })).toMatchObject({ type: 'gauge-or-absolute', field: 'typed' });
   });
 
   it.each([
@@ -51,7 +55,7 @@ describe('the units lookup', () => {
     [{ quantity: 'speed' }, 'quantity'],
     [{ unit_pressure: 'bar' }, 'unit_pressure'],
   ])('refuses %j beside %s', (change, field) => {
-    expect(refusal(UNITS, change)).toMatchObject({ field });
+    expect(refusal(change)).toMatchObject({ field });
   });
 
   it('asks for a text or for number and unit, never both', () => {
