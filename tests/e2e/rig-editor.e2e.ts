@@ -1,7 +1,7 @@
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { HERON } from '../../seeds/rigs/heron';
-import { holdSecond, keyIn, press, signInFirst, unlock } from './support/hands';
+import { holdHalfSecond, holdSecond, keyIn, press, signInFirst, unlock } from './support/hands';
 import { openLabServer, type LabServer, type SignIn } from './support/lab-server';
 import { ownEntries } from './support/own-entries';
 import { openTablet, PHONE, TABLET, type Size, type Tablet } from './support/tablet';
@@ -131,6 +131,25 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
     await main.getByText(/is void with it|no permit to lose/).waitFor();
     await main.getByText('Touches safety').waitFor();
     expect(await main.innerText()).toMatch(/Gap\s+2.6\s*mm\s+3.1\s*mm/);
+  });
+
+  it('fits a part with its day, and opens its ledger', async () => {
+    const page = tablet.page();
+    await page.goto(`${lab.url}/rigs/${HERON.id}/parts`);
+    await unlock(page, ada.name);
+    await press(page.getByRole('button', { name: 'Fit a part' }));
+    await page.getByLabel('What it is').fill('PET stack, four plies');
+    await press(page.getByRole('radio', { name: 'C1', exact: true }));
+    await enter(page, /^Fitted on/, '20261120');
+    await enter(page, /^Shots before/, '1200');
+    await holdHalfSecond(page.getByRole('button', { name: 'Hold to fit' }));
+    await press(page.getByRole('button', { name: /PET stack, four plies/ }));
+    const main = page.getByRole('main');
+    await main.getByText('Left, likely').waitFor();
+    const said = await main.innerText();
+    expect(said).toContain('1,200 before');
+    expect(said).toContain('2026-11-20');
+    expect(said).toMatch(/[\d,]+ to [\d,]+ shots/);
   });
 
   it('answers or refuses in words whatever is typed: 100 edits of a fixed seed', async () => {

@@ -16,6 +16,7 @@ import { EditOverview } from './edit-overview';
 import { EditReview } from './edit-review';
 import { EditSection } from './edit-section';
 import { SECTIONS, sectionOf, sectionTitle } from './edit-sections';
+import { useFromTop } from './use-from-top';
 import type { RigEdit } from './use-rig-edit';
 
 /** A rig being written: one section at a time, with everything that its numbers give beside it, live. */
@@ -33,16 +34,13 @@ export function EditScreen({ edit }: { readonly edit: RigEdit }) {
       )}
     </EditFieldsColumn>
   );
+  const top = useFromTop(edit.typing ? `keypad ${edit.field?.key ?? ''}` : edit.view);
   // On a phone the keypad needs the thumb zone's place.
-  if (edit.typing)
-    return (
-      <Screen fields={fields}>
-        <EditKeypad edit={edit} />
-      </Screen>
-    );
   return (
-    <Screen fields={fields} thumbs={<EditThumbs edit={edit} />}>
-      <EditFigure edit={edit} view={view} />
+    <Screen fields={fields} {...(edit.typing ? {} : { thumbs: <EditThumbs edit={edit} /> })}>
+      <div ref={top} className="edit-top">
+        {edit.typing ? <EditKeypad edit={edit} /> : <EditFigure edit={edit} view={view} />}
+      </div>
     </Screen>
   );
 }
