@@ -12,7 +12,7 @@ import { PUSH_MAX_BYTES, PUSH_MAX_ENTRIES } from '../../src/domain/handover/wire
 import { declaredView } from '../../src/domain/rules/declared-view';
 import { checkLapse } from '../../src/domain/rules/check-validity';
 import { missingToFire, standingPermit } from '../../src/domain/rules/readiness';
-import { readingPlausibility } from '../../src/domain/rules/rig-gap';
+import { readingPlausibility } from '../../src/domain/rules/reading-plausibility';
 import { BENCH_TABLET, DEMO_LAB } from '../lab';
 import { must } from '../must';
 import { ADA, MILO } from '../people';

@@ -1,6 +1,6 @@
 import { CARRIABLE, type ReadingValues } from '../../src/domain/book/bodies/firing-bodies';
 import type { RigSpec } from '../../src/domain/book/rig-spec';
-import { readingPlausibility } from '../../src/domain/rules/rig-gap';
+import { readingPlausibility } from '../../src/domain/rules/reading-plausibility';
 import { must } from '../must';
 import type { DemoRig } from '../rigs/demo-rig';
 import type { Dice } from './dice';

@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import type { LookupDoc } from '../book/documents/lookup';
 import { GAP_LOOKUP } from './gap-lookup';
-import { keptBody, pinnedLookups, readKept, recompute, type KeptBody } from './kept';
+import { keptBody, readKept, recompute, type KeptBody } from './kept';
+import { pinnedLookups } from './pinned';
 import { kettleLikeSpec, labSettings } from './rig.fixture';
 
 const { values, known } = GAP_LOOKUP.start({ spec: kettleLikeSpec, settings: labSettings });

@@ -1,7 +1,7 @@
 import type { ReadingValues } from '../book/bodies/firing-bodies';
 import { standingReading, type ReadingDoc } from '../book/documents/reading';
 import type { RigSpec } from '../book/rig-spec';
-import { readingPlausibility } from '../rules/rig-gap';
+import { readingPlausibility } from '../rules/reading-plausibility';
 
 /** One reading of a firing as tables and plots take it. */
 export interface FiringRow {

@@ -1,8 +1,5 @@
-import type { ReadingValues } from '../book/bodies/firing-bodies';
 import type { RigSpec } from '../book/rig-spec';
-import { plausibility, type Plausibility } from '../calibration/plausibility';
 import type { GapInput, GapSetup } from '../gap/gap-input';
-import type { Result } from '../units/result';
 
 /** Errors of settings that the bench reads off a dial; common practice, no source. */
 export const DIAL_ERRORS = { pressure_bar: 0.02, temperature_C: 3 } as const;
@@ -37,20 +34,4 @@ export function gapInputOf(
     ...gapSetupOf(spec, at.temperature_C),
     pressure: { bar_abs: at.pressure_bar_g + at.ambient_bar_abs },
   };
-}
-
-/** How a reading compares with what physics expects of the revision that it was taken on. */
-export function readingPlausibility(
-  spec: RigSpec,
-  values: ReadingValues,
-  before: readonly number[],
-): Result<Plausibility> {
-  const gap = { ...gapInputOf(spec, values), gas: values.gas };
-  return plausibility({
-    gap,
-    how: values.how,
-    voltage_kV: values.voltage_kV,
-    broke: values.looked !== 'gap-dark',
-    before,
-  });
 }

@@ -1,16 +1,12 @@
 import { Fragment, lazy, Suspense, useMemo, type ReactNode } from 'react';
-import { Link } from 'react-router-dom';
 import { Reading } from '../../components/reading';
-import { TwoFaces } from '../../components/two-faces';
-import { paths } from '../../config/paths';
 import { useLookups } from '../../data/use-book';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
-import { selfBreak } from '../../domain/gap/self-break';
-import { pinnedLookups } from '../../domain/lookup/kept';
-import { gapInputOf } from '../../domain/rules/rig-gap';
-import { rigFigures, storedAt_J, type RigFigures } from '../../domain/rules/rig-figures';
-import { formatFigure, formatQuantity } from '../../domain/units/format-quantity';
+import { pinnedLookups } from '../../domain/lookup/pinned';
+import { rigFigures, type RigFigures } from '../../domain/rules/rig-figures';
+import { energyFigure } from './energy-figure';
+import { formatQuantity } from '../../domain/units/format-quantity';
 
 interface Props {
   readonly rig: RigDoc;
@@ -20,6 +16,9 @@ interface Props {
 
 const PLACES = 3;
 
+// The physics of the gap arrives after the state has been drawn.
+const GapPin = lazy(() => import('./gap-pin').then((m) => ({ default: m.GapPin })));
+const WorkingEnergy = lazy(() => import('./gap-pin').then((m) => ({ default: m.WorkingEnergy })));
 const PinnedLookups = lazy(() => import('./pinned-lookups').then((m) => ({ default: m.PinnedLookups })));
 
 /** Three lookups prefilled from the rig: first what was pinned, then gap, stored energy and wait from the supply's limit. */
@@ -50,7 +49,14 @@ export function BenchPins({ rig, revision, settings }: Props) {
 function useDefaults(props: Props): readonly { readonly key: string; readonly pin: ReactNode }[] {
   const { revision, settings } = props;
   const figures = useMemo(() => rigFigures(revision.spec, settings), [revision.spec, settings]);
-  const gap = { key: 'gap', pin: <GapPin {...props} /> };
+  const gap = {
+    key: 'gap',
+    pin: (
+      <Suspense fallback={<div className="bench-pin" />}>
+        <GapPin {...props} />
+      </Suspense>
+    ),
+  };
   if (!figures.ok)
     return [gap, { key: 'figures', pin: <p className="bench-pin">{figures.refusal.words}</p> }];
   return [
@@ -60,51 +66,18 @@ function useDefaults(props: Props): readonly { readonly key: string; readonly pi
   ];
 }
 
-function GapPin({ rig, revision, settings }: Props) {
-  const { lowest_bar_g, highest_bar_g } = revision.spec.gap;
-  const pressure_bar_g = (lowest_bar_g + highest_bar_g) / 2;
-  const answer = selfBreak(
-    gapInputOf(revision.spec, {
-      pressure_bar_g,
-      ambient_bar_abs: settings.ambient_bar_abs,
-      temperature_C: settings.ambient_C,
-    }),
-  );
-  const at = `${formatFigure(pressure_bar_g, { digits: { decimals: 2 }, rounding: 'nearest' })} bar(g)`;
-  return (
-    <Link className="bench-pin" to={paths.gapLookup(rig.id)}>
-      <span className="muted">Gap at {at}: breaks between</span>
-      {answer.ok ? (
-        <TwoFaces
-          label={`Gap at ${at}`}
-          low={one(answer.value.low_kV, 'down')}
-          middle={one(answer.value.law_kV, 'nearest')}
-          high={one(answer.value.high_kV, 'up')}
-          unit="kV"
-        />
-      ) : (
-        <span>{answer.refusal.words}</span>
-      )}
-    </Link>
-  );
-}
-
 function StoredPin({ revision, settings, figures }: Omit<Props, 'rig'> & { readonly figures: RigFigures }) {
   const { supply_kV, supply_mA } = revision.spec.charging;
-  const working = workingPoint_kV(revision, settings);
-  const stored = working === null ? null : storedAt_J(revision.spec, working);
   return (
     <div className="bench-pin">
       <span className="muted">
         Stored at the supply’s limit, {supply_kV} kV and {supply_mA} mA
       </span>
       <span className="bench-pin-row">
-        <Reading value={energy(figures.stored_J)} unit="J" size="pin" />
-        {stored?.ok === true && working !== null ? (
-          <span className="muted nowrap">
-            {energy(stored.value)} J at {one(working, 'nearest')} kV
-          </span>
-        ) : null}
+        <Reading value={energyFigure(figures.stored_J)} unit="J" size="pin" />
+        <Suspense fallback={null}>
+          <WorkingEnergy revision={revision} settings={settings} />
+        </Suspense>
       </span>
       <span className="bench-pin-caution">{sentence(figures.hazard.effect)}</span>
     </div>
@@ -134,27 +107,6 @@ function WaitPin({ revision, settings, figures }: Omit<Props, 'rig'> & { readonl
       </span>
     </div>
   );
-}
-
-function workingPoint_kV(revision: RigRevision, settings: LabSettings): number | null {
-  const { lowest_bar_g, highest_bar_g } = revision.spec.gap;
-  const answer = selfBreak(
-    gapInputOf(revision.spec, {
-      pressure_bar_g: (lowest_bar_g + highest_bar_g) / 2,
-      ambient_bar_abs: settings.ambient_bar_abs,
-      temperature_C: settings.ambient_C,
-    }),
-  );
-  return answer.ok ? answer.value.law_kV : null;
-}
-
-function one(value: number, rounding: 'up' | 'down' | 'nearest'): string {
-  return formatFigure(value, { digits: { decimals: 1 }, rounding });
-}
-
-/** Energies round up: two decimals, three below a tenth of a joule. */
-function energy(value_J: number): string {
-  return formatFigure(value_J, { digits: { decimals: value_J < 0.1 ? 3 : 2 }, rounding: 'up' });
 }
 
 function sentence(words: string): string {

@@ -11,10 +11,10 @@ import type { LabSettings } from '../../domain/book/rig-spec';
 import { figureLine } from '../../domain/lookup/figure-text';
 import { readKept, type Kept } from '../../domain/lookup/kept';
 import type { Figure, Lookup, LookupAnswer, StartFrom } from '../../domain/lookup/lookup';
-import { lookupOf } from '../../domain/lookup/lookups';
 import { standingPermit } from '../../domain/rules/readiness';
 import type { Result } from '../../domain/units/result';
 import { pinAsk, whatIfs } from './pin-ask';
+import { useLookupOf } from './use-lookup-of';
 import { usePinReply } from './use-pin-reply';
 
 interface Props {
@@ -42,8 +42,9 @@ function Pin({
   readonly from: StartFrom;
 }) {
   const kept = useMemo(() => readKept(doc.kept), [doc]);
-  const lookup = lookupOf(doc.kept.lookup);
-  if (kept === null || lookup === undefined) {
+  const lookup = useLookupOf(doc.kept.lookup);
+  if (lookup === undefined) return <div className="bench-pin" />;
+  if (kept === null || lookup === null) {
     return (
       <Link className="bench-pin" to={paths.lookupsOf(rig.id)}>
         <span className="muted">Pinned: {doc.kept.lookup}</span>

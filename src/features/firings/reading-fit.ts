@@ -2,7 +2,7 @@ import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import { standingReading, type ReadingDoc } from '../../domain/book/documents/reading';
 import type { RigSpec } from '../../domain/book/rig-spec';
 import type { Plausibility } from '../../domain/calibration/plausibility';
-import { readingPlausibility } from '../../domain/rules/rig-gap';
+import { readingPlausibility } from '../../domain/rules/reading-plausibility';
 import type { Result } from '../../domain/units/result';
 
 /** A reading that stands, with the values that it has now. */
