@@ -30,10 +30,14 @@ const WRITTEN_VERSION: Partial<Record<Kind, number>> = {
   // 2: screws, laws of gap and channel, shapes of rods and bars, size of the beam. All may be left out, so 1 reads as 2.
   'rig.created': 2,
   'rig.revised': 2,
+  // 2: purposes beyond firing and making safe, rigs, what a step guards. May be left out, so 1 reads as 2.
+  'sheet.published': 2,
   // 2: kit that the step names, such as the eyewear put on. May be left out, so 1 reads as 2.
   'check.step-done': 2,
   // 2: words, for a tag that somebody else hung. May be left out, so 1 reads as 2.
   'hands.out': 2,
+  // 2: output by attenuators and by eye, beam position, trigger, gas in the channel, dye. May be left out, so 1 reads as 2.
+  'firing.reading': 2,
 };
 
 export const KINDS = Object.keys(bodies) as readonly Kind[];

@@ -1,9 +1,9 @@
 import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
-import { nextBase, type Base, type ReadingDraft } from './reading-form';
+import { baseOf, type Base, type ReadingDraft } from './reading-form';
 
 /** The form of a correction: untouched fields say how they came into the reading that is corrected. */
 export function correctionBase(before: ReadingValues): Base {
-  const base = nextBase(before);
+  const base = baseOf(before);
   const carried: readonly string[] = before.carried_over;
   const source = Object.fromEntries(
     Object.keys(base.values).map((key) => [key, carried.includes(key) ? 'carried over then' : 'as logged']),

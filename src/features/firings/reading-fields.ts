@@ -11,6 +11,12 @@ export const QUANTITY_KEYS = [
   'ambient_bar_abs',
   'temperature_C',
   'humidity_pct',
+  'output_attenuators',
+  'beam_x_mm',
+  'beam_y_mm',
+  'trigger_delay_ns',
+  'trigger_jitter_ns',
+  'trigger_misses',
 ] as const;
 export type QuantityKey = (typeof QUANTITY_KEYS)[number];
 
@@ -23,6 +29,8 @@ export interface QuantityTraits {
   readonly rule: NumberRule;
   /** May be left out: then nothing is stored for it. */
   readonly optional: boolean;
+  /** Only whole numbers have a meaning. */
+  readonly whole: boolean;
 }
 
 /** The rules are the bounds of the entry's own schema, so that what is taken here is never refused there. */
@@ -37,7 +45,11 @@ export const QUANTITY_TRAITS: Readonly<Record<QuantityKey, QuantityTraits>> = {
     { name: 'Pressure', unit: 'bar(g)', min: -1.1, max: 20 },
     { step: 0.05, decimals: 2 },
   ),
-  shots: traits('shots', { name: 'Shots', unit: '', min: 0, max: 10_000_000 }, { step: 1, decimals: 0 }),
+  shots: traits(
+    'shots',
+    { name: 'Shots', unit: '', min: 0, max: 10_000_000 },
+    { step: 1, decimals: 0, whole: true },
+  ),
   output_uJ: traits(
     'output_uJ',
     { name: 'Output', unit: 'µJ', min: 0, max: 1e9 },
@@ -68,6 +80,36 @@ export const QUANTITY_TRAITS: Readonly<Record<QuantityKey, QuantityTraits>> = {
     { name: 'Humidity', unit: '%', min: 0, max: 100 },
     { step: 1, decimals: 0, optional: true },
   ),
+  output_attenuators: traits(
+    'output_attenuators',
+    { name: 'Attenuators', unit: '', min: 0, max: 100 },
+    { step: 1, decimals: 0, optional: true, whole: true },
+  ),
+  beam_x_mm: traits(
+    'beam_x_mm',
+    { name: 'Beam right of centre', unit: 'mm', min: -200, max: 200 },
+    { step: 1, decimals: 0, optional: true },
+  ),
+  beam_y_mm: traits(
+    'beam_y_mm',
+    { name: 'Beam above centre', unit: 'mm', min: -200, max: 200 },
+    { step: 1, decimals: 0, optional: true },
+  ),
+  trigger_delay_ns: traits(
+    'trigger_delay_ns',
+    { name: 'Delay', unit: 'ns', min: 0, max: 1e7 },
+    { step: 10, decimals: 0, optional: true },
+  ),
+  trigger_jitter_ns: traits(
+    'trigger_jitter_ns',
+    { name: 'Jitter', unit: 'ns', min: 0, max: 1e6 },
+    { step: 1, decimals: 0, optional: true },
+  ),
+  trigger_misses: traits(
+    'trigger_misses',
+    { name: 'Misses', unit: '', min: 0, max: 10_000_000 },
+    { step: 1, decimals: 0, optional: true, whole: true },
+  ),
 };
 
 export function isQuantity(key: string): key is QuantityKey {
@@ -94,9 +136,14 @@ interface Steps {
   readonly step: number;
   readonly decimals: number;
   readonly optional?: true;
+  readonly whole?: true;
 }
 
-function traits(field: QuantityKey, bounds: Bounds, { step, decimals, optional }: Steps): QuantityTraits {
+function traits(
+  field: QuantityKey,
+  bounds: Bounds,
+  { step, decimals, optional, whole }: Steps,
+): QuantityTraits {
   return {
     label: bounds.name,
     unit: bounds.unit,
@@ -104,5 +151,6 @@ function traits(field: QuantityKey, bounds: Bounds, { step, decimals, optional }
     decimals,
     rule: { ...bounds, field },
     optional: optional === true,
+    whole: whole === true,
   };
 }

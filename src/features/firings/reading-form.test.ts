@@ -70,17 +70,21 @@ describe('the first reading of a firing', () => {
     const body = must(toReading(first, draft));
     expect(body.carried_over).not.toContain('voltage_kV');
     expect(body.carried_over).toContain('ambient_bar_abs');
-    expect(body.carried_over).toHaveLength(CARRIABLE.length - 3);
+    expect(body.carried_over).toEqual(['pressure_bar_g', 'gas', 'ambient_bar_abs', 'temperature_C']);
+    expect(body).not.toHaveProperty('output_attenuators');
     expect(checkBody('firing.reading', body).type).toBe('ok');
   });
 });
+
+/** What the fixture's reading says of the carriable fields. */
+const KNOWN = CARRIABLE.filter((key) => (READING[key] ?? null) !== null);
 
 describe('the next reading', () => {
   const base = nextBase({ ...READING, note: 'loud', carried_over: ['how'] });
 
   it('repeats the one before with every field carried over and without its note', () => {
     const body = must(toReading(base, EMPTY_DRAFT));
-    expect(body).toEqual({ ...READING, note: '', carried_over: [...CARRIABLE] });
+    expect(body).toEqual({ ...READING, note: '', carried_over: KNOWN });
   });
 
   it('counts a field as touched when the same value was entered again', () => {
@@ -107,6 +111,50 @@ describe('the next reading', () => {
       note: 'x',
     };
     expect(afterLogging(draft)).toEqual({ ...EMPTY_DRAFT, summary: 'good run', field: 'rate_Hz' });
+  });
+});
+
+describe('what a bench notes now and then', () => {
+  const seen = {
+    ...READING,
+    output_attenuators: 4,
+    output_eye: 3,
+    beam_x_mm: 2,
+    beam_y_mm: -1,
+    trigger_delay_ns: 250,
+    trigger_misses: 2,
+    channel_gas: 'air' as const,
+    dye_batch: 'R6G 14',
+  };
+
+  it('is left out of the entry until somebody says it, and then carried over', () => {
+    const body = must(toReading(nextBase(seen), EMPTY_DRAFT));
+    expect(body).toMatchObject({ output_attenuators: 4, output_eye: 3, beam_x_mm: 2, dye_batch: 'R6G 14' });
+    expect(body.carried_over).toEqual(
+      expect.arrayContaining(['output_attenuators', 'beam_x_mm', 'dye_batch']),
+    );
+    expect(body.carried_over).not.toContain('trigger_jitter_ns');
+    expect(checkBody('firing.reading', body).type).toBe('ok');
+  });
+
+  it('assumes no misses of the next burst', () => {
+    expect(must(toReading(nextBase(seen), EMPTY_DRAFT))).not.toHaveProperty('trigger_misses');
+    expect(must(toCorrection(seen, enter(EMPTY_DRAFT, 'voltage_kV', 19.1))).trigger_misses).toBe(2);
+  });
+
+  it('takes an emptied batch as not said, and trims what was typed', () => {
+    expect(must(toReading(nextBase(seen), enter(EMPTY_DRAFT, 'dye_batch', '  '))).dye_batch).toBeUndefined();
+    expect(must(toReading(nextBase(seen), enter(EMPTY_DRAFT, 'dye_batch', ' C4 '))).dye_batch).toBe('C4');
+  });
+
+  it('counts attenuators and misses whole', () => {
+    const half = enterText(EMPTY_DRAFT, 'output_attenuators', '2.5');
+    expect(half.ok ? null : half.refusal.words).toBe('Attenuators: only whole numbers can be counted.');
+  });
+
+  it('reads a body of version 1 as one that says nothing of it', () => {
+    expect(nextBase(READING).values).toMatchObject({ output_eye: null, channel_gas: null, beam_x_mm: null });
+    expect(sourceWords(nextBase(READING), EMPTY_DRAFT, 'output_eye')).toBe('not entered');
   });
 });
 

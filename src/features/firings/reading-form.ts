@@ -6,8 +6,10 @@ import { ok, refused, type Refusal, type Result } from '../../domain/units/resul
 import { isQuantity, QUANTITY_KEYS, QUANTITY_TRAITS, type QuantityKey } from './reading-fields';
 
 export type Carriable = (typeof CARRIABLE)[number];
-export type ChoiceKey = 'how' | 'gas' | 'looked';
-export type FieldKey = QuantityKey | ChoiceKey | 'note' | 'summary';
+export type ChoiceKey = 'how' | 'gas' | 'looked' | 'output_eye' | 'channel_gas';
+export type WordsKey = 'note' | 'summary' | 'dye_batch';
+/** `beam` is the grid on which both coordinates are set at once. */
+export type FieldKey = QuantityKey | ChoiceKey | WordsKey | 'beam';
 
 type Quantities = { readonly [K in QuantityKey]: number | null };
 /** A reading as it stands on the form: what is not known yet is null, never a made-up figure. */
@@ -15,6 +17,9 @@ export interface FormValues extends Quantities {
   readonly how: ReadingValues['how'] | null;
   readonly gas: ReadingValues['gas'];
   readonly looked: ReadingValues['looked'] | null;
+  readonly output_eye: number | null;
+  readonly channel_gas: NonNullable<ReadingValues['channel_gas']> | null;
+  readonly dye_batch: string | null;
 }
 type ValueKey = keyof FormValues;
 
@@ -38,6 +43,8 @@ export interface ReadingDraft {
   readonly typing: string | null;
   /** The choice or text of this field is open in the figure's place. */
   readonly open: boolean;
+  /** Groups of seldom fields that stand unfolded. */
+  readonly groups: readonly string[];
 }
 
 export const EMPTY_DRAFT: ReadingDraft = {
@@ -47,6 +54,27 @@ export const EMPTY_DRAFT: ReadingDraft = {
   field: 'voltage_kV',
   typing: null,
   open: false,
+  groups: [],
+};
+
+/** Left out of the entry while nobody has said anything about them. */
+const MAY_BE_ABSENT = [
+  'output_attenuators',
+  'output_eye',
+  'beam_x_mm',
+  'beam_y_mm',
+  'trigger_delay_ns',
+  'trigger_jitter_ns',
+  'trigger_misses',
+  'channel_gas',
+  'dye_batch',
+] as const satisfies readonly ValueKey[];
+
+const NOTHING_SEEN = Object.fromEntries(MAY_BE_ABSENT.map((key) => [key, null])) as {
+  readonly [K in (typeof MAY_BE_ABSENT)[number]]: null;
+};
+const NOT_ENTERED = Object.fromEntries(MAY_BE_ABSENT.map((key) => [key, 'not entered'])) as {
+  readonly [K in (typeof MAY_BE_ABSENT)[number]]: string;
 };
 
 /**
@@ -59,6 +87,7 @@ export function firstBase(spec: RigSpec, revision: string, settings: LabSettings
   const lab = settings === undefined ? none : 'lab setting';
   return {
     values: {
+      ...NOTHING_SEEN,
       voltage_kV: null,
       pressure_bar_g: spec.gap.lowest_bar_g,
       shots: null,
@@ -73,6 +102,7 @@ export function firstBase(spec: RigSpec, revision: string, settings: LabSettings
       looked: null,
     },
     source: {
+      ...NOT_ENTERED,
       voltage_kV: none,
       pressure_bar_g: rig,
       shots: none,
@@ -89,9 +119,23 @@ export function firstBase(spec: RigSpec, revision: string, settings: LabSettings
   };
 }
 
-/** Every later reading stands on the one before. */
+/** Every later reading stands on the one before. Misses belong to their own burst: none are assumed of the next. */
 export function nextBase(before: ReadingValues): Base {
-  const { note: _note, carried_over: _carried, ...values } = before;
+  const { values, source } = baseOf(before);
+  return {
+    values: { ...values, trigger_misses: null },
+    source: { ...source, trigger_misses: 'not entered' },
+  };
+}
+
+/** A reading as it was logged. */
+export function baseOf(before: ReadingValues): Base {
+  const { note: _note, carried_over: _carried, ...logged } = before;
+  const seen = Object.fromEntries(MAY_BE_ABSENT.map((key) => [key, logged[key] ?? null])) as Pick<
+    FormValues,
+    (typeof MAY_BE_ABSENT)[number]
+  >;
+  const values: FormValues = { ...logged, ...seen };
   const keys = Object.keys(values) as ValueKey[];
   const source = Object.fromEntries(
     keys.map((key) => [key, values[key] === null ? 'not entered' : 'carried over']),
@@ -120,12 +164,14 @@ export function enter<K extends ValueKey>(draft: ReadingDraft, key: K, value: Fo
 
 /** A typed text becomes a value, or is refused in words and stays on the keypad. An optional field may be emptied. */
 export function enterText(draft: ReadingDraft, key: QuantityKey, text: string): Result<ReadingDraft> {
-  const { optional, rule, label } = QUANTITY_TRAITS[key];
+  const { optional, whole, rule, label } = QUANTITY_TRAITS[key];
   if (optional && text.trim() === '') return ok(enter(draft, key, null));
   const parsed = parseQuantity(text, rule);
   if (!parsed.ok) return parsed;
-  if (key === 'shots' && !Number.isInteger(parsed.value))
-    return refused({ type: 'not-whole', field: key, words: `${label}: only whole shots can be counted.` });
+  if (whole && !Number.isInteger(parsed.value)) {
+    const what = key === 'shots' ? 'shots' : 'numbers';
+    return refused({ type: 'not-whole', field: key, words: `${label}: only whole ${what} can be counted.` });
+  }
   return ok(enter(draft, key, parsed.value));
 }
 
@@ -159,23 +205,31 @@ export function typedNotEntered(draft: ReadingDraft): Refusal | null {
 
 /** The body of the reading, or what is still missing before it can be logged. */
 export function toReading(base: Base, draft: ReadingDraft): Result<ReadingValues> {
-  const values = formValues(base, draft);
+  const typed = formValues(base, draft);
+  const batch = typed.dye_batch?.trim() ?? '';
+  const values: FormValues = { ...typed, dye_batch: batch === '' ? null : batch };
   if (!isComplete(values)) return refused(firstMissing(values));
   return ok({
-    ...values,
+    ...withoutAbsent(values),
     note: draft.note.trim(),
-    carried_over: CARRIABLE.filter((key) => isCarried(draft, key)),
+    // What nobody has ever said cannot be carried over.
+    carried_over: CARRIABLE.filter((key) => values[key] !== null && isCarried(draft, key)),
   });
+}
+
+function withoutAbsent(values: FormValues & Required): Complete {
+  const absent: readonly string[] = MAY_BE_ABSENT.filter((key) => values[key] === null);
+  return Object.fromEntries(Object.entries(values).filter(([key]) => !absent.includes(key))) as Complete;
 }
 
 /** After a reading is durable the next one starts untouched; the field in hand and the words for closing stay. */
 export function afterLogging(draft: ReadingDraft): ReadingDraft {
-  return { ...EMPTY_DRAFT, summary: draft.summary, field: draft.field };
+  return { ...EMPTY_DRAFT, summary: draft.summary, field: draft.field, groups: draft.groups };
 }
 
 /** A correction starts from the reading as it stands; what was carried over stays so until it is touched. */
 export function toCorrection(before: ReadingValues, draft: ReadingDraft): Result<ReadingValues> {
-  const corrected = toReading(nextBase(before), draft);
+  const corrected = toReading(baseOf(before), draft);
   if (!corrected.ok) return corrected;
   return ok({
     ...corrected.value,
@@ -190,8 +244,12 @@ export function fieldOf(refusal: Refusal): FieldKey | null {
 }
 
 type Complete = Omit<ReadingValues, 'note' | 'carried_over'>;
+type Required = Pick<
+  ReadingValues,
+  'how' | 'looked' | 'voltage_kV' | 'pressure_bar_g' | 'shots' | 'ambient_bar_abs' | 'temperature_C'
+>;
 
-function isComplete(values: FormValues): values is FormValues & Complete {
+function isComplete(values: FormValues): values is FormValues & Required {
   return (
     values.how !== null &&
     values.looked !== null &&

@@ -2,10 +2,13 @@ import type { ReactNode } from 'react';
 import { Choice } from '../../components/choice';
 import { HoldButton } from '../../components/hold-button';
 import { Keypad, type KeypadWords } from '../../components/keypad';
-import { HOW_MEASURED, type ReadingValues } from '../../domain/book/bodies/firing-bodies';
+import { CHANNEL_GASES, HOW_MEASURED, type ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import { GAS_WORDS, HOW_WORDS, LOOK_WORDS } from '../../domain/report/words';
+import { BeamGrid } from './beam-grid';
+import { EYE_SCALE } from './eye-scale';
 import { FAILURES } from './looks';
 import { isQuantity, QUANTITY_TRAITS, shownQuantity } from './reading-fields';
+import type { WordsKey } from './reading-form';
 import type { ReadingForm } from './use-reading-form';
 
 const KEYPAD_WORDS: KeypadWords = {
@@ -96,6 +99,40 @@ function OpenField({ form }: { readonly form: ReadingForm }) {
           />
         </Panel>
       );
+    case 'output_eye':
+      return (
+        <Panel title="How bright on white card, by eye" form={form}>
+          <Choice
+            label="How bright on white card, by eye"
+            options={EYE_SCALE.map((label, level) => ({ value: String(level), label }))}
+            value={values.output_eye === null ? null : String(values.output_eye)}
+            onChange={(level) => {
+              form.pick('output_eye', Number(level));
+            }}
+          />
+          <p className="muted">On the card, never into the beam. It is never turned into an energy.</p>
+        </Panel>
+      );
+    case 'channel_gas':
+      return (
+        <Panel title="Gas in the laser channel" form={form}>
+          <Choice
+            label="Gas in the laser channel"
+            options={CHANNEL_GASES.map((value) => ({ value, label: GAS_WORDS[value] }))}
+            value={values.channel_gas}
+            onChange={(gas) => {
+              form.pick('channel_gas', gas);
+            }}
+          />
+        </Panel>
+      );
+    case 'beam':
+      return (
+        <Panel title="Where the beam sits" form={form} done="Done">
+          <BeamGrid x_mm={values.beam_x_mm} y_mm={values.beam_y_mm} onPlace={form.place} />
+        </Panel>
+      );
+    case 'dye_batch':
     case 'note':
     case 'summary':
       return <WordsPanel field={draft.field} form={form} />;
@@ -105,21 +142,28 @@ function OpenField({ form }: { readonly form: ReadingForm }) {
 }
 
 interface WordsPanelProps {
-  readonly field: 'note' | 'summary';
+  readonly field: WordsKey;
   readonly form: ReadingForm;
 }
 
+const WORDS_TITLES: Readonly<Record<WordsKey, string>> = {
+  note: 'Note to this reading',
+  summary: 'Words for closing the firing',
+  dye_batch: 'Batch of the dye',
+};
+
 function WordsPanel({ field, form }: WordsPanelProps) {
-  const title = field === 'note' ? 'Note to this reading' : 'Words for closing the firing';
+  const title = WORDS_TITLES[field];
+  const isBatch = field === 'dye_batch';
   return (
     <Panel title={title} form={form} done="Done">
       <textarea
         className="firing-words"
         aria-label={title}
-        rows={5}
-        maxLength={2000}
+        rows={isBatch ? 1 : 5}
+        maxLength={isBatch ? 120 : 2000}
         autoFocus
-        value={form.draft[field]}
+        value={isBatch ? (form.values.dye_batch ?? '') : form.draft[field]}
         onChange={(event) => {
           form.write(field, event.target.value);
         }}

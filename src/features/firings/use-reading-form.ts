@@ -1,5 +1,4 @@
 import { useState } from 'react';
-import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import type { Refusal, Result } from '../../domain/units/result';
 import { isQuantity } from './reading-fields';
 import {
@@ -15,6 +14,7 @@ import {
   type FieldKey,
   type FormValues,
   type ReadingDraft,
+  type WordsKey,
 } from './reading-form';
 
 /** Where the draft is kept; every change of it is on the disk within a blink. */
@@ -36,8 +36,11 @@ export interface ReadingForm {
   readonly type: (text: string) => void;
   readonly enterTyped: (text: string) => void;
   readonly step: (direction: -1 | 1) => void;
-  readonly pick: <K extends ChoiceKey>(key: K, value: ReadingValues[K]) => void;
-  readonly write: (key: 'note' | 'summary', words: string) => void;
+  readonly pick: <K extends ChoiceKey>(key: K, value: FormValues[K]) => void;
+  readonly write: (key: WordsKey, words: string) => void;
+  /** Sets the spot on its grid; null takes it away. */
+  readonly place: (at: { readonly x_mm: number; readonly y_mm: number } | null) => void;
+  readonly fold: (group: string) => void;
   readonly refuse: (refusal: Refusal) => void;
   /** The reading is durable: the next one starts. */
   readonly startNext: () => void;
@@ -94,7 +97,25 @@ export function useReadingForm(base: Base, store: DraftStore): ReadingForm {
       set((now) => enter(now, key, value));
     },
     write: (key, words) => {
-      set((now) => ({ ...now, [key]: words }));
+      set((now) =>
+        key === 'dye_batch'
+          ? { ...now, entered: { ...now.entered, dye_batch: words === '' ? null : words } }
+          : { ...now, [key]: words },
+      );
+    },
+    place: (at) => {
+      set((now) => ({
+        ...now,
+        entered: { ...now.entered, beam_x_mm: at?.x_mm ?? null, beam_y_mm: at?.y_mm ?? null },
+      }));
+    },
+    fold: (group) => {
+      set((now) => ({
+        ...now,
+        groups: now.groups.includes(group)
+          ? now.groups.filter((one) => one !== group)
+          : [...now.groups, group],
+      }));
     },
     refuse: (next) => {
       setRefusal(next);

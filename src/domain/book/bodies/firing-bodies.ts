@@ -45,7 +45,38 @@ export const CARRIABLE = [
   'humidity_pct',
   'output_uJ',
   'looked',
+  'output_attenuators',
+  'output_eye',
+  'beam_x_mm',
+  'beam_y_mm',
+  'trigger_delay_ns',
+  'trigger_jitter_ns',
+  'channel_gas',
+  'dye_batch',
 ] as const;
+
+/** Gases that a laser channel of this kind runs on. */
+export const CHANNEL_GASES = ['air', 'N2'] as const;
+
+const beam_mm = z.number().check(z.gte(-200), z.lte(200));
+
+/** What version 2 added: each may be left out, so that a reading of version 1 reads as one of version 2. */
+const addedInVersion2 = {
+  /** Attenuators through which the spot is still seen. A count by eye: it never becomes an energy. */
+  output_attenuators: z.optional(z.int().check(z.gte(0), z.lte(100))),
+  /** Brightness by eye, 0 for nothing to 5. It never becomes an energy either. */
+  output_eye: z.optional(z.int().check(z.gte(0), z.lte(5))),
+  /** Where the spot sits on the millimetre grid, from its centre: right and up are positive. */
+  beam_x_mm: z.optional(beam_mm),
+  beam_y_mm: z.optional(beam_mm),
+  trigger_delay_ns: z.optional(z.number().check(z.gte(0), z.lte(1e7))),
+  trigger_jitter_ns: z.optional(z.number().check(z.gte(0), z.lte(1e6))),
+  /** Triggers of this burst that nothing followed. */
+  trigger_misses: z.optional(shots),
+  /** Gas in the laser channel; `flow_L_min` is its flow, `gas` stands in the spark gap. */
+  channel_gas: z.optional(z.enum(CHANNEL_GASES)),
+  dye_batch: z.optional(shortText),
+} as const;
 
 export const readingSchema = z.object({
   voltage_kV: kV,
@@ -61,6 +92,7 @@ export const readingSchema = z.object({
   ambient_bar_abs,
   temperature_C: celsius,
   humidity_pct: z.nullable(percent),
+  ...addedInVersion2,
   note: optionalWords,
   /** Names of the fields that nobody touched since the reading before. */
   carried_over: z.array(z.enum(CARRIABLE)),
