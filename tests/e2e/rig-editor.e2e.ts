@@ -1,5 +1,5 @@
 import type { Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { HERON } from '../../seeds/rigs/heron';
 import { holdHalfSecond, holdSecond, keyIn, press, signInFirst, unlock } from './support/hands';
 import { openLabServer, type LabServer, type SignIn } from './support/lab-server';
@@ -45,6 +45,13 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
 
   afterAll(async () => {
     await tablet?.close();
+  });
+
+  // A picture says why a step failed; it is only taken where somebody asked for it.
+  afterEach(async ({ task }) => {
+    const folder = process.env['HOLDOFF_E2E_PICTURES'];
+    if (folder === undefined || task.result?.state !== 'fail') return;
+    await tablet.page().screenshot({ path: `${folder}/${task.id}-${name}.png` });
   });
 
   it('builds a rig from nothing to a simulated waveform and its first revision', async () => {

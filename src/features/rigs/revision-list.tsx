@@ -1,7 +1,7 @@
 import { revisionById, type RigDoc, type RigRevision } from '../../domain/book/documents/rig';
-import { specChangeWords } from '../../domain/report/spec-words';
 import { momentWords } from '../../domain/report/time-words';
 import { specChanges } from '../../domain/rules/loosening';
+import { ChangeRow } from './change-row';
 import { useNames } from '../../data/use-names';
 
 /** Every revision, newest first, with what it changed and what it cost. */
@@ -45,10 +45,7 @@ function Revision({
       </p>
       <p>{revision.why}</p>
       {changes.map((change) => (
-        <p key={change.field} className="muted">
-          {specChangeWords(change, revision.spec.topology)}
-          {change.loosens ? '. Loosens.' : ''}
-        </p>
+        <ChangeRow key={change.field} change={change} topology={revision.spec.topology} />
       ))}
       {lost === undefined || lost.withdrawn !== null || lost.until_ms <= revision.stamp.wall_ms ? null : (
         <p className="muted">It cost the permit granted by {nameOf(lost.by)}.</p>

@@ -5,7 +5,7 @@ import { WordsField } from '../../../components/words-field';
 import { useNow } from '../../../data/use-now';
 import type { RigDoc } from '../../../domain/book/documents/rig';
 import { envelopeWords, permitWords } from '../../../domain/report/permit-words';
-import { specDifference } from '../../../domain/report/spec-words';
+import { ChangeRow } from '../change-row';
 import { voidedBy } from '../voided-by';
 import { useNames } from '../../../data/use-names';
 import { sectionOf, sectionTitle, topologyOf } from './edit-sections';
@@ -92,17 +92,11 @@ function Changes({ edit }: { readonly edit: RigEdit }) {
     <section aria-label="Changes" aria-live="polite">
       <h2>{changes.length === 1 ? 'One change' : `${changes.length} changes`}</h2>
       <ul className="rig-list">
-        {changes.map((change) => {
-          const { label, before, after } = specDifference(change, topologyOf(textOf));
-          return (
-            <li key={change.field} className="rig-change">
-              <span>{label}</span>
-              <span className="muted">{before}</span>
-              <b>{after}</b>
-              <span>{change.loosens ? 'Loosens' : change.safety ? 'Touches safety' : ''}</span>
-            </li>
-          );
-        })}
+        {changes.map((change) => (
+          <li key={change.field}>
+            <ChangeRow change={change} topology={topologyOf(textOf)} />
+          </li>
+        ))}
       </ul>
       {loosens ? (
         <Caution>
