@@ -8,6 +8,8 @@ export interface TimeBase {
   readonly column: number | null;
   /** By point, in seconds from the instrument's own zero; points themselves where nobody says. */
   readonly seconds: Float64Array;
+  /** Seconds for one of the column, or between two points; null where nobody says and one is assumed. */
+  readonly unit_s: number | null;
   /** Said beside the plot where something had to be assumed. */
   readonly words: string;
 }
@@ -34,6 +36,7 @@ export function findTime(
       type: 'column',
       column,
       seconds: size === 1 ? values : values.map((value) => value * (size ?? 1)),
+      unit_s: size ?? null,
       words: size === undefined ? 'The file does not say the unit of its time; seconds are assumed.' : '',
     };
   }
@@ -44,6 +47,7 @@ export function findTime(
       type: 'interval',
       column: null,
       seconds: Float64Array.from({ length: count }, (_, i) => i * interval_s),
+      unit_s: interval_s,
       words: '',
     };
   }
@@ -51,6 +55,7 @@ export function findTime(
     type: 'none',
     column: null,
     seconds: Float64Array.from({ length: count }, (_, i) => i),
+    unit_s: null,
     words: 'The file has no time: enter the time between two points.',
   };
 }
