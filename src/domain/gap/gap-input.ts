@@ -1,12 +1,8 @@
 import { checkNumber, type NumberRule } from '../units/check-number';
-import { firstRefusal, ok, refused, type Refusal, type Result } from '../units/result';
-import { LARGEST_GAP_OVER_RADIUS, tooSharp } from './curved-gap';
+import { firstRefusal, refused, type Refusal, type Result } from '../units/result';
+import { badGapFor, checkElectrodes, type CheckedElectrodes, type Electrodes } from './electrodes';
 import { TEMPERATURE_RULE } from './gas-density';
 import type { GasName } from './gas-table';
-
-/** Domed electrodes are counted as spheres of their face's radius; plane ones need no radius. */
-export const ELECTRODE_SHAPES = ['domed', 'sphere', 'cylinder', 'plane'] as const;
-export type ElectrodeShape = (typeof ELECTRODE_SHAPES)[number];
 
 /**
  * A spark gap as it is set. Every `u_` is the error that the setting may have; give 0 only where it is known.
@@ -14,7 +10,7 @@ export type ElectrodeShape = (typeof ELECTRODE_SHAPES)[number];
  */
 export interface GapInput {
   readonly gas: GasName;
-  readonly electrodes: { readonly shape: ElectrodeShape; readonly radius_mm?: number | null | undefined };
+  readonly electrodes: Electrodes;
   readonly gap_mm: number;
   readonly u_gap_mm: number;
   readonly pressure: { readonly bar_abs: number };
@@ -72,17 +68,8 @@ const TEMPERATURE_ERROR_RULE: NumberRule = {
   min: 0,
   max: 100,
 };
-const RADIUS_RULE: NumberRule = {
-  field: 'radius_mm',
-  name: 'Electrode radius',
-  unit: 'mm',
-  min: 0.1,
-  max: 1000,
-  maxReason: 'choose plane electrodes',
-};
-
-/** Radius of curved electrodes, or undefined for plane ones; refused by field when anything is out of range. */
-export function checkSetup(setup: GapSetup): Result<{ readonly radius_mm: number | undefined }> {
+/** The electrodes with all their numbers; refused by field when anything of the gap is out of range. */
+export function checkSetup(setup: GapSetup): Result<CheckedElectrodes> {
   const bad =
     firstRefusal([
       checkNumber(setup.gap_mm, GAP_RULE),
@@ -91,26 +78,19 @@ export function checkSetup(setup: GapSetup): Result<{ readonly radius_mm: number
       checkNumber(setup.temperature_C, TEMPERATURE_RULE),
       checkNumber(setup.u_temperature_C, TEMPERATURE_ERROR_RULE),
     ]) ??
-    badChoice(setup) ??
+    uvNotSaid(setup) ??
     errorLargerThanSetting(setup);
   if (bad !== undefined) return refused(bad);
-  if (setup.electrodes.shape === 'plane') return ok({ radius_mm: undefined });
-  const radius = checkNumber(setup.electrodes.radius_mm, RADIUS_RULE);
-  if (!radius.ok) return radius;
-  const widest_mm = setup.gap_mm + setup.u_gap_mm;
-  return widest_mm > LARGEST_GAP_OVER_RADIUS * radius.value
-    ? refused(tooSharp())
-    : ok({ radius_mm: radius.value });
+  const electrodes = checkElectrodes(setup.electrodes);
+  if (!electrodes.ok) return electrodes;
+  const bare = badGapFor(electrodes.value, {
+    narrow_mm: setup.gap_mm - setup.u_gap_mm,
+    wide_mm: setup.gap_mm + setup.u_gap_mm,
+  });
+  return bare === undefined ? electrodes : refused(bare);
 }
 
-function badChoice(setup: GapSetup): Refusal | undefined {
-  if (!ELECTRODE_SHAPES.some((shape) => shape === setup.electrodes.shape)) {
-    return {
-      type: 'shape-unknown',
-      field: 'electrodes',
-      words: 'Electrodes: choose domed, sphere, cylinder or plane.',
-    };
-  }
+function uvNotSaid(setup: GapSetup): Refusal | undefined {
   if (typeof setup.irradiated !== 'boolean') {
     return {
       type: 'uv-not-said',

@@ -1,19 +1,19 @@
-import { allRoots } from '../numerics/all-roots';
-import { borderOf } from '../numerics/bisect';
 import { checkNumber } from '../units/check-number';
 import { formatFigure, type Rounding } from '../units/format-quantity';
 import { andThen, ok, refused, type Refusal, type Result } from '../units/result';
 import { celsiusToKelvin } from '../units/temperature';
-import { LARGEST_GAP_OVER_RADIUS } from './curved-gap';
+import { bordersOf, borderNear, type BorderSearch } from './gap-borders';
+import { checkElectrodes, gapLimits, type CheckedElectrodes } from './electrodes';
 import {
   GAP_PRESSURE_RULE,
+  FULLY_VALID_FROM_BAR_CM,
   GAP_RULE,
   HIGHEST_BAR_ABS,
   HIGHEST_X_BAR_CM,
   LOWEST_X_BAR_CM,
   type GapSetup,
 } from './gap-input';
-import { buildGapModel, voltagesAt, type GapVoltages } from './gap-model';
+import { buildGapModel, checkGap, modelSideAt, sideAt, type CheckedGap, type GapSide } from './gap-model';
 import { selfBreakAt, type GapAnswer } from './self-break';
 
 /**
@@ -41,9 +41,9 @@ export interface GapSolution {
   readonly gap: GapAnswer;
 }
 
-const PIECES = 48;
 // A hair inside the range, so that the ends themselves are never refused by a rounding error.
 const INSIDE = 1e-9;
+const MM_PER_CM = 10;
 
 /**
  * The absolute pressure that meets a target at a given gap, bar. Refused in words, with the nearest limit, when
@@ -52,16 +52,17 @@ const INSIDE = 1e-9;
 export function pressureFor(setup: GapSetup, target: GapTarget): Result<GapSolution> {
   const model = buildGapModel(setup);
   if (!model.ok) return model;
-  const narrow_cm = (setup.gap_mm - setup.u_gap_mm) / 10;
-  const coldest = lowestPd(setup) / narrow_cm + setup.u_pressure_bar;
-  const densest = (HIGHEST_X_BAR_CM * density(setup.temperature_C)) / (setup.gap_mm / 10);
+  const narrow_cm = (setup.gap_mm - setup.u_gap_mm) / MM_PER_CM;
+  const atX = (x_bar_cm: number) => (x_bar_cm * lowDensity(setup)) / narrow_cm + setup.u_pressure_bar;
+  const densest = (HIGHEST_X_BAR_CM * density(setup.temperature_C)) / (setup.gap_mm / MM_PER_CM);
   return solve({
     target,
     unit: 'bar(abs)',
     field: 'pressure',
-    low: coldest * (1 + INSIDE),
+    low: atX(LOWEST_X_BAR_CM) * (1 + INSIDE),
     high: Math.min(HIGHEST_BAR_ABS, densest * (1 - INSIDE)),
-    at: (bar) => voltagesAt(model.value, bar),
+    jump: atX(FULLY_VALID_FROM_BAR_CM),
+    at: (bar, side) => modelSideAt(model.value, bar, side),
     describe: (bar) => selfBreakAt(model.value, bar),
   });
 }
@@ -74,40 +75,43 @@ export function gapFor(
   const pressure = checkNumber(setup.pressure.bar_abs, GAP_PRESSURE_RULE);
   if (!pressure.ok) return pressure;
   const bar = pressure.value;
-  const modelAt = (gap_mm: number) => buildGapModel({ ...setup, gap_mm });
-  const range = gapRange(setup, bar);
+  const electrodes = checkElectrodes(setup.electrodes);
+  if (!electrodes.ok) return electrodes;
+  const range = gapRange(setup, electrodes.value, bar);
   // A gap that could be in range brings out what is wrong with the other fields, by name.
   const spare_mm = GAP_RULE.min + 2 * setup.u_gap_mm;
   const likely_mm = range.high > range.low ? 0.5 * (range.low + range.high) : spare_mm;
-  const probe = modelAt(Number.isFinite(likely_mm) ? likely_mm : 1);
+  const probe = checkGap({ ...setup, gap_mm: Number.isFinite(likely_mm) ? likely_mm : 1 });
   if (!probe.ok) return probe;
+  const bars = electrodes.value.shape === 'hex-bars';
+  const sideOf = (gap: CheckedGap) => (gap_mm: number, side: GapSide) =>
+    sideAt({ ...gap, setup: { ...setup, gap_mm } }, bar, side);
   return solve({
     target,
     unit: 'mm',
     field: 'gap_mm',
     ...range,
-    at: (gap_mm) => andThen(modelAt(gap_mm), (model) => voltagesAt(model, bar)),
-    describe: (gap_mm) => andThen(modelAt(gap_mm), (model) => selfBreakAt(model, bar)),
+    ...(bars ? { like: sideOf({ ...probe.value, electrodes: { shape: 'plane' } }) } : {}),
+    at: sideOf(probe.value),
+    describe: (gap_mm) => andThen(buildGapModel({ ...setup, gap_mm }), (model) => selfBreakAt(model, bar)),
   });
 }
 
-function gapRange(setup: Omit<GapSetup, 'gap_mm'>, bar: number) {
+function gapRange(setup: Omit<GapSetup, 'gap_mm'>, electrodes: CheckedElectrodes, bar: number) {
   const lowBar = bar - setup.u_pressure_bar;
-  const narrowest = lowBar > 0 ? (10 * lowestPd(setup)) / lowBar + setup.u_gap_mm : Infinity;
-  const widest = (10 * HIGHEST_X_BAR_CM * density(setup.temperature_C)) / bar;
-  const { shape, radius_mm } = setup.electrodes;
-  const roundest =
-    shape === 'plane' || typeof radius_mm !== 'number'
-      ? Infinity
-      : LARGEST_GAP_OVER_RADIUS * radius_mm - setup.u_gap_mm;
+  const atX = (x_bar_cm: number) =>
+    lowBar > 0 ? (MM_PER_CM * x_bar_cm * lowDensity(setup)) / lowBar + setup.u_gap_mm : Infinity;
+  const densest = (MM_PER_CM * HIGHEST_X_BAR_CM * density(setup.temperature_C)) / bar;
+  const { narrowest_mm, widest_mm } = gapLimits(electrodes);
   return {
-    low: Math.max(GAP_RULE.min, narrowest) * (1 + INSIDE),
-    high: Math.min(GAP_RULE.max, widest, roundest) * (1 - INSIDE),
+    low: Math.max(GAP_RULE.min, atX(LOWEST_X_BAR_CM), narrowest_mm + setup.u_gap_mm) * (1 + INSIDE),
+    high: Math.min(GAP_RULE.max, densest, widest_mm - setup.u_gap_mm) * (1 - INSIDE),
+    jump: atX(FULLY_VALID_FROM_BAR_CM),
   };
 }
 
-function lowestPd(setup: Pick<GapSetup, 'temperature_C' | 'u_temperature_C'>): number {
-  return LOWEST_X_BAR_CM * density(setup.temperature_C + setup.u_temperature_C);
+function lowDensity(setup: Pick<GapSetup, 'temperature_C' | 'u_temperature_C'>): number {
+  return density(setup.temperature_C + setup.u_temperature_C);
 }
 
 function density(temperature_C: number): number {
@@ -120,7 +124,12 @@ interface Search {
   readonly field: string;
   readonly low: number;
   readonly high: number;
-  readonly at: (setting: number) => Result<GapVoltages>;
+  /** Where the low side changes its factor and jumps. */
+  readonly jump: number;
+  /** A cheap curve not far from it, where one question takes milliseconds. */
+  readonly like?: Search['at'];
+  /** One side at a setting; NaN where there is none. */
+  readonly at: (setting: number, side: GapSide) => number;
   readonly describe: (setting: number) => Result<GapAnswer>;
 }
 
@@ -146,11 +155,8 @@ function solve(search: Search): Result<GapSolution> {
     });
   }
   const side = SIDE[target.purpose];
-  const voltage = (setting: number) => {
-    const voltages = search.at(setting);
-    return voltages.ok ? voltages.value[`${side}_kV`] : Number.NaN;
-  };
-  const all = settingsFor(search, voltage);
+  const voltage = (setting: number) => search.at(setting, side);
+  const all = settingsFor(search, side);
   const value = target.purpose === 'hold-off-at-least' ? all[0] : all.at(-1);
   if (value === undefined) return refused(noSolution(search, voltage));
   const gap = search.describe(value);
@@ -166,32 +172,20 @@ function solve(search: Search): Result<GapSolution> {
   });
 }
 
-function settingsFor({ target, low, high }: Search, voltage: (setting: number) => number): readonly number[] {
-  const wanted = target.voltage_kV;
-  if (target.purpose === 'law') {
-    return allRoots((setting) => voltage(setting) - wanted, { low, high, pieces: PIECES, logarithmic: true });
-  }
-  // The low side jumps where the small-pd factor ends, so a border is sought and not a zero.
-  const holds =
-    target.purpose === 'hold-off-at-least'
-      ? (setting: number) => voltage(setting) >= wanted
-      : (setting: number) => voltage(setting) <= wanted;
-  const borders: number[] = [];
-  let before = { setting: low, good: holds(low) };
-  for (let piece = 1; piece <= PIECES; piece += 1) {
-    const setting = piece === PIECES ? high : low * (high / low) ** (piece / PIECES);
-    const good = holds(setting);
-    if (good !== before.good) {
-      borders.push(
-        borderOf(
-          holds,
-          good ? { fails: before.setting, holds: setting } : { fails: setting, holds: before.setting },
-        ),
-      );
-    }
-    before = { setting, good };
-  }
-  return borders;
+function settingsFor(search: Search, side: GapSide): readonly number[] {
+  const { target, like, at, low, high, jump } = search;
+  const bordersFor = (curve: Search['at']): BorderSearch => ({
+    low,
+    high,
+    jump,
+    voltage_kV: (setting) => curve(setting, side),
+    wanted_kV: target.voltage_kV,
+    keep: target.purpose === 'break-at-most' ? 'at-most' : 'at-least',
+  });
+  // The high side is that of a uniform gap for every shape.
+  if (like === undefined || side === 'high') return bordersOf(bordersFor(at));
+  const [hint = high] = bordersOf(bordersFor(like));
+  return borderNear(bordersFor(at), hint);
 }
 
 function noSolution(

@@ -3,9 +3,9 @@ import { describe, expect, it } from 'vitest';
 import type { Answer } from '../units/answer';
 import type { Result } from '../units/result';
 import { bareClearance } from './clearance';
-import { rodBreakdown, rodFieldFactor, rodSelfBreak } from './capped-rods';
+import { rodBreakdown, rodFieldFactor } from './capped-rods';
 import { sphereBreakdown } from './curved-gap';
-import { hexBarBreakdown, hexBarSelfBreak, hexFieldFactor } from './hex-bars';
+import { hexBarBreakdown, hexFieldFactor } from './hex-bars';
 import { selfBreak } from './self-break';
 
 const value = (result: Result<Answer>) => (result.ok ? result.value.value : Number.NaN);
@@ -82,26 +82,44 @@ describe('hexBarBreakdown', () => {
   });
 });
 
-describe('hexBarSelfBreak', () => {
+describe('the self-break of bars', () => {
+  const HEX = { shape: 'hex-bars', flats_mm: 10, corner_mm: 0.5, facing: 'flats' } as const;
+  const bars = (change: object = {}, setup: object = {}) =>
+    selfBreak({ ...SETUP, ...setup, electrodes: { ...HEX, ...change } });
+
   it('has both sides around the law, the low one by the edges', () => {
-    const both = hexBarSelfBreak({ ...SETUP, bars: BARS });
-    const edge = hexBarSelfBreak({ ...SETUP, bars: { ...BARS, orientation: 'edge' } });
+    const both = bars();
+    const edge = bars({ facing: 'edges' });
     if (!both.ok || !edge.ok) throw new Error('refused');
     expect(both.value.low_kV).toBe(edge.value.low_kV);
     expect(both.value.low_kV).toBeLessThan(edge.value.law_kV);
     expect(both.value.law_kV).toBeGreaterThan(edge.value.law_kV);
     expect(both.value.high_kV).toBeGreaterThan(both.value.law_kV);
-    expect(both.value.warnings.map(({ type }) => type)).toContain('bars-by-computation');
+    const types = both.value.warnings.map(({ type }) => type);
+    expect(types).toContain('bars-by-computation');
+    expect(types).toContain('plan-with-edges');
+    expect(both.value.model).toContain('hexagonal bars flat to flat, 10\u2009mm across flats');
   });
 
-  it('refuses a gas without a law and a bad setting', () => {
-    expect(hexBarSelfBreak({ ...SETUP, gas: 'O2', bars: BARS })).toMatchObject({
-      refusal: { type: 'gas-without-law' },
-    });
-    expect(hexBarSelfBreak({ ...SETUP, gap_mm: Number.NaN, bars: BARS }).ok).toBe(false);
-    expect(hexBarSelfBreak({ ...SETUP, u_gap_mm: 3, bars: BARS })).toMatchObject({
-      refusal: { field: 'u_gap_mm' },
-    });
+  it('has the voltage of the bars alone as its law', () => {
+    const both = bars();
+    expect(both.ok && both.value.law_kV).toBe(value(hexBarBreakdown({ ...BARS, ...POINT })));
+  });
+
+  it.each([
+    [{}, { gas: 'O2' }, 'gas'],
+    [{}, { gap_mm: Number.NaN }, 'gap_mm'],
+    [{}, { u_gap_mm: 3 }, 'u_gap_mm'],
+    [{}, { gap_mm: 0.22 }, 'gap_mm'],
+    [{}, { gap_mm: 20 }, 'gap_mm'],
+    [{ flats_mm: null }, {}, 'flats_mm'],
+    [{ flats_mm: 600 }, {}, 'flats_mm'],
+    [{ corner_mm: undefined }, {}, 'corner_mm'],
+    [{ corner_mm: 0.04 }, {}, 'corner_mm'],
+    [{ corner_mm: 4.6 }, {}, 'corner_mm'],
+    [{ facing: null }, {}, 'facing'],
+  ])('refuses bars %j in a setting %j beside %s', (change, setup, field) => {
+    expect(bars(change, setup)).toMatchObject({ ok: false, refusal: { field } });
   });
 });
 
@@ -120,12 +138,31 @@ describe('rods', () => {
   });
 
   it('have both sides, the low one never above the spheres\u2019', () => {
-    const rods = rodSelfBreak({ ...SETUP, radius_mm: 3 });
+    const rods = selfBreak({ ...SETUP, electrodes: { shape: 'capped-rods', radius_mm: 3 } });
     const spheres = selfBreak({ ...SETUP, electrodes: { shape: 'sphere', radius_mm: 3 } });
     if (!rods.ok || !spheres.ok) throw new Error('refused');
     expect(rods.value.low_kV).toBeLessThanOrEqual(spheres.value.low_kV * 1.001);
     expect(rods.value.high_kV).toBe(spheres.value.high_kV);
     expect(rods.value.law_kV).toBeGreaterThan(rods.value.low_kV);
+  });
+
+  it.each([
+    [{ radius_mm: null }, 'radius_mm'],
+    [{ radius_mm: 0 }, 'radius_mm'],
+    [{ radius_mm: 0.5 }, 'gap_mm'],
+    [{ rod_length_mm: 1 }, 'rod_length_mm'],
+    [{ rod_length_mm: Number.NaN }, 'rod_length_mm'],
+    [{ rod_length_mm: 700 }, 'rod_length_mm'],
+  ])('refuse %j beside %s', (change, field) => {
+    const electrodes = { shape: 'capped-rods', radius_mm: 3, ...change } as const;
+    expect(selfBreak({ ...SETUP, electrodes })).toMatchObject({ ok: false, refusal: { field } });
+  });
+
+  it('take twenty radii for a straight part that is not said', () => {
+    const at = (rod_length_mm?: number) =>
+      selfBreak({ ...SETUP, electrodes: { shape: 'capped-rods', radius_mm: 3, rod_length_mm } });
+    expect(at()).toEqual(at(60));
+    expect(at()).not.toEqual(at(6));
   });
 
   it.each([

@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { gapCurve } from './gap-curve';
-import type { ElectrodeShape, GapInput } from './gap-input';
+import type { ElectrodeShape } from './electrodes';
+import type { GapInput } from './gap-input';
 import type { GasName } from './gas-table';
 import { holdOffLow, selfBreak, selfBreakHigh, type GapAnswer } from './self-break';
 

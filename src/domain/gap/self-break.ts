@@ -1,7 +1,8 @@
 import type { Answer, Warning } from '../units/answer';
 import { ok, type Result } from '../units/result';
 import { CHECKED_GAP_OVER_RADIUS } from './curved-gap';
-import { FULLY_VALID_FROM_BAR_CM, type ElectrodeShape, type GapInput } from './gap-input';
+import type { CheckedElectrodes } from './electrodes';
+import { FULLY_VALID_FROM_BAR_CM, type GapInput } from './gap-input';
 import { buildGapModel, voltagesAt, type GapModel, type GapVoltages } from './gap-model';
 import type { GasName } from './gas-table';
 import { HIGH_FIELD_MV_M } from './high-field';
@@ -87,22 +88,38 @@ function oneSide(input: GapInput, side: 'low_kV' | 'high_kV'): Result<Answer> {
 }
 
 const GAS_WORDS: Readonly<Partial<Record<GasName, string>>> = { N2: 'nitrogen', H2: 'hydrogen' };
-const SHAPE_WORDS: Readonly<Record<ElectrodeShape, string>> = {
+
+function modelWords({ setup, electrodes }: GapModel): string {
+  const gas = GAS_WORDS[setup.gas] ?? setup.gas;
+  return electrodes.shape === 'plane'
+    ? `Law: uniform field in ${gas}, plane electrodes`
+    : `Law: streamer integral in ${gas}, ${shapeWords(electrodes)}`;
+}
+
+function shapeWords(electrodes: Exclude<CheckedElectrodes, { readonly shape: 'plane' }>): string {
+  if (electrodes.shape === 'hex-bars') {
+    const { flats_mm, corner_mm, facing } = electrodes;
+    const way = facing === 'flats' ? 'flat to flat' : 'edge to edge';
+    return `hexagonal bars ${way}, ${String(flats_mm)}\u2009mm across flats, corners of ${String(corner_mm)}\u2009mm radius`;
+  }
+  return `${ROUND_WORDS[electrodes.shape]} of ${String(electrodes.radius_mm)}\u2009mm radius`;
+}
+
+const ROUND_WORDS = {
   domed: 'domed electrodes taken as spheres',
   sphere: 'spheres',
   cylinder: 'parallel cylinders',
-  plane: 'plane electrodes',
-};
+  'capped-rods': 'round-ended rods',
+} as const;
 
-function modelWords({ setup, radius_mm }: GapModel): string {
-  const gas = GAS_WORDS[setup.gas] ?? setup.gas;
-  const { shape } = setup.electrodes;
-  if (radius_mm === undefined) return `Law: uniform field in ${gas}, ${SHAPE_WORDS[shape]}`;
-  return `Law: streamer integral in ${gas}, ${SHAPE_WORDS[shape]} of ${String(radius_mm)}\u2009mm radius`;
+/** Radius that the gap's width is judged by. */
+function radiusOf(electrodes: CheckedElectrodes): number | undefined {
+  return 'radius_mm' in electrodes ? electrodes.radius_mm : undefined;
 }
 
 function warningsFor(model: GapModel, voltages: GapVoltages, pressure_bar_abs: number): readonly Warning[] {
-  const { setup, radius_mm, law } = model;
+  const { setup, electrodes, law } = model;
+  const radius_mm = radiusOf(electrodes);
   const warnings: Warning[] = [];
   const warn = (type: string, words: string) => warnings.push({ type, words });
   if (!setup.irradiated) {
@@ -134,6 +151,15 @@ function warningsFor(model: GapModel, voltages: GapVoltages, pressure_bar_abs: n
       'gas-from-memory',
       `This gas is known to within ${String(Math.round(law.relative * 100))} % only; both sides count that in.`,
     );
+  }
+  if (electrodes.shape === 'hex-bars') {
+    warn(
+      'bars-by-computation',
+      'Hexagonal bars rest on computed fields alone. Burrs and bar ends break lower.',
+    );
+  }
+  if (electrodes.shape === 'hex-bars' && electrodes.facing === 'flats') {
+    warn('plan-with-edges', 'Flat to flat they break at their corners: the low side takes edge to edge.');
   }
   if (settingError(model, pressure_bar_abs) > LARGE_SETTING_ERROR) {
     warn(

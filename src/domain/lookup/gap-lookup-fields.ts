@@ -1,4 +1,4 @@
-import { ELECTRODE_SHAPES, type ElectrodeShape } from '../gap/gap-input';
+import { ELECTRODE_SHAPES, type ElectrodeShape } from '../gap/electrodes';
 import { GAS_NAMES } from '../gap/gas-table';
 import type { Field, UnitChoice } from './lookup';
 import { numberAt, textAt } from './fields';

@@ -1,5 +1,6 @@
 import { reachableVoltage, supplyReach, type Charging } from '../charging/supply-reach';
-import { ELECTRODE_SHAPES, type GapInput, type GapSetup } from '../gap/gap-input';
+import { ELECTRODE_SHAPES } from '../gap/electrodes';
+import type { GapInput, GapSetup } from '../gap/gap-input';
 import { gapFor, pressureFor, type GapPurpose } from '../gap/gap-solve';
 import { isGasName } from '../gap/gas-table';
 import { selfBreak, type GapAnswer } from '../gap/self-break';

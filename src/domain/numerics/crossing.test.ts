@@ -2,8 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { crossingBetween } from './crossing';
 
-const search = (f: (x: number) => number, [a, b]: readonly [number, number], relative = 1e-12) =>
-  crossingBetween(f, { a, fa: f(a), b, fb: f(b) }, relative);
+const search = (f: (x: number) => number, [a, b]: readonly [number, number], precision = 1e-12) =>
+  crossingBetween(f, { a, fa: f(a), b, fb: f(b) }, precision);
 
 describe('crossingBetween', () => {
   it('ends on both sides of the root of two, close together', () => {
