@@ -83,7 +83,8 @@ function Predicted({ screen, gaps, ends, advice }: PredictedProps) {
       {now === null || then === null ? null : (
         <span className="muted">
           {' '}
-          The ends break within {pct(then)} of each other, now {pct(now)}; even to the eye is about 2 %.
+          The ends break within {pct(then)} of each other, now {pct(now)}; even to the eye is about{' '}
+          {'2\u2009%'}.
         </span>
       )}
     </p>
