@@ -1,4 +1,8 @@
-/** How the app looks on this tablet: kept apart from the Book, since it must be known before the first paint. */
+/** What a wired foot key may send; `either` listens for the two commonest. */
+export const FOOT_KEY_SETTINGS = ['either', 'F13', 'F14', 'PageDown', 'PageUp'] as const;
+export type FootKeySetting = (typeof FOOT_KEY_SETTINGS)[number];
+
+/** How the app looks on this tablet and what is wired to it: kept apart from the Book, since it must be known before the first paint. */
 export interface DisplaySettings {
   readonly hand: 'right' | 'left';
   /** By place: dark at the bench, daylight at the Desk. */
@@ -8,6 +12,9 @@ export interface DisplaySettings {
   readonly scale: number;
   /** Measured with the ruler; null leaves the reference tablet's figure. */
   readonly px_per_mm: number | null;
+  readonly foot_key: FootKeySetting;
+  /** What a short press does: log the reading again, or start and stop a burst. Held for a second it stands the rig down. */
+  readonly foot_does: 'log' | 'burst';
 }
 
 export const DEFAULT_DISPLAY: DisplaySettings = {
@@ -16,6 +23,8 @@ export const DEFAULT_DISPLAY: DisplaySettings = {
   eyewear: false,
   scale: 1,
   px_per_mm: null,
+  foot_key: 'either',
+  foot_does: 'log',
 };
 
 const KEY = 'holdoff.display';
@@ -37,13 +46,15 @@ export function readDisplay(store: TextStore): DisplaySettings {
   } catch {
     return DEFAULT_DISPLAY;
   }
-  const { hand, theme, eyewear, scale, px_per_mm } = kept;
+  const { hand, theme, eyewear, scale, px_per_mm, foot_key, foot_does } = kept;
   return {
     hand: hand === 'left' ? 'left' : 'right',
     theme: theme === 'dark' || theme === 'daylight' ? theme : 'by-place',
     eyewear: eyewear === true,
     scale: typeof scale === 'number' && scale >= 1 && scale <= 2 ? scale : 1,
     px_per_mm: typeof px_per_mm === 'number' && px_per_mm >= 2 && px_per_mm <= 20 ? px_per_mm : null,
+    foot_key: FOOT_KEY_SETTINGS.find((each) => each === foot_key) ?? 'either',
+    foot_does: foot_does === 'burst' ? 'burst' : 'log',
   };
 }
 

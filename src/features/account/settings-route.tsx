@@ -4,10 +4,19 @@ import { Screen } from '../../components/frame';
 import { ThumbDome } from '../../components/thumb-dome';
 import { ThumbZone } from '../../components/thumb-zone';
 import { paths } from '../../config/paths';
+import { FOOT_KEY_SETTINGS, type FootKeySetting } from '../../data/display-settings';
 import { useDisplay } from '../../data/use-display';
 import { useSession, useSessionActions } from '../../data/use-session';
 import { Ruler } from './ruler';
 import './account.css';
+
+const FOOT_KEY_WORDS: Readonly<Record<FootKeySetting, string>> = {
+  either: 'F13 or Page Down',
+  F13: 'F13 alone',
+  F14: 'F14',
+  PageDown: 'Page Down alone',
+  PageUp: 'Page Up',
+};
 
 /** How this tablet looks and who holds it. */
 export function SettingsRoute() {
@@ -72,6 +81,24 @@ export function SettingsRoute() {
           value={String(settings.scale)}
           onChange={(scale) => change({ ...settings, scale: Number(scale) })}
         />
+        <p className="muted">Wired foot key</p>
+        <Choice
+          label="Wired foot key"
+          options={FOOT_KEY_SETTINGS.map((value) => ({ value, label: FOOT_KEY_WORDS[value] }))}
+          value={settings.foot_key}
+          onChange={(foot_key) => change({ ...settings, foot_key })}
+        />
+        <p className="muted">A short press of it</p>
+        <Choice
+          label="A short press of it"
+          options={[
+            { value: 'log', label: 'logs the reading again' },
+            { value: 'burst', label: 'starts and stops a burst' },
+          ]}
+          value={settings.foot_does}
+          onChange={(foot_does) => change({ ...settings, foot_does })}
+        />
+        <p className="muted">Held for a second it stands the rig down, whatever is chosen here.</p>
         <Ruler px_per_mm={settings.px_per_mm} onChange={(px_per_mm) => change({ ...settings, px_per_mm })} />
         {session.state === 'open' ? (
           <p>

@@ -1,6 +1,7 @@
 import { Reading } from '../../components/reading';
 import { dayWords } from '../../domain/report/time-words';
 import { formatFigure } from '../../domain/units/format-quantity';
+import { burstLine, type BurstView } from './burst';
 import { shownQuantity } from './reading-fields';
 import { isCarried } from './reading-form';
 import type { FiringFacts } from './use-firing-facts';
@@ -11,15 +12,16 @@ interface FiringHeadProps {
   readonly facts: FiringFacts;
   readonly form: ReadingForm;
   readonly said: Said | null;
+  readonly burst: BurstView;
 }
 
 /** Shots so far, and the burst, the rate and the permit that the next reading stands on, always in view. */
-export function FiringHead({ facts, form, said }: FiringHeadProps) {
+export function FiringHead({ facts, form, said, burst }: FiringHeadProps) {
   return (
     <div className="firing-head">
       <ShotsTotal shots={facts.firing.shots} />
       <div className="firing-head-words">
-        <p>{burstWords(form)}</p>
+        <p>{burstLine(burst) ?? burstWords(form)}</p>
         <p className="muted">
           {[rateSource(form), permitWords(facts)].filter((word) => word !== '').join('; ')}
         </p>

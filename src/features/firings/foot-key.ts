@@ -8,6 +8,11 @@ export const FOOT_STAND_DOWN_MS = 1000;
 /** What the key sends: F13 where the wiring can, Page Down as the cheap presenters and pedals do. */
 export const FOOT_KEYS: readonly string[] = ['F13', 'PageDown'];
 
+/** The keys to listen for, by the tablet's setting. */
+export function footKeysOf(setting: string): readonly string[] {
+  return setting === 'either' ? FOOT_KEYS : [setting];
+}
+
 export type FootKeyState =
   | { readonly phase: 'up' }
   | { readonly phase: 'down'; readonly since_ms: number }

@@ -5,11 +5,13 @@ import { SaysBlock } from '../../components/says-block';
 import { ThumbDome } from '../../components/thumb-dome';
 import { ThumbZone } from '../../components/thumb-zone';
 import { useBookState } from '../../data/use-book';
+import { useDisplay } from '../../data/use-display';
 import { useDraft } from '../../data/use-draft';
 import { useResume } from '../../data/use-resume';
 import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import type { ReadingDoc } from '../../domain/book/documents/reading';
 import { beyondEnvelope } from './beyond-envelope';
+import type { BurstView } from './burst';
 import { CorrectDialog } from './correct-dialog';
 import { FIRING_CHART_WORDS, firingChart } from './firing-chart';
 import { FiringHead } from './firing-head';
@@ -18,8 +20,10 @@ import { LookedChoice } from './looked-choice';
 import { fitOf, sigmasOf } from './reading-fit';
 import { ReadingFieldsColumn } from './reading-fields-column';
 import { EMPTY_DRAFT, firstBase, nextBase, type Base } from './reading-form';
+import { footKeysOf } from './foot-key';
 import { isPanelOpen, ReadingPanel } from './reading-panel';
 import { ReadingsTable } from './readings-table';
+import { useBurst } from './use-burst';
 import type { FiringFacts } from './use-firing-facts';
 import { useFiringLog, type Said } from './use-firing-log';
 import { useFootKey } from './use-foot-key';
@@ -27,6 +31,12 @@ import { useReadingForm, type ReadingForm } from './use-reading-form';
 
 /** Rows that a hand scrolls through at a bench; the closed firing shows them all. */
 const MOST_ROWS = 60;
+
+const BURST_DOME: Readonly<Record<BurstView['type'], string>> = {
+  none: 'Start burst',
+  running: 'Stop burst',
+  interrupted: 'Count burst',
+};
 
 /** A firing that goes on: log, look, log again. */
 export function OpenFiring({ facts }: { readonly facts: FiringFacts }) {
@@ -46,9 +56,12 @@ export function OpenFiring({ facts }: { readonly facts: FiringFacts }) {
   });
   const log = useFiringLog({ facts, form, onLogged: noteLogged });
   const [correcting, setCorrecting] = useState<ReadingDoc | null>(null);
+  const burst = useBurst({ firing, form, onSaid: log.say });
+  const { foot_key, foot_does } = useDisplay().settings;
   useFootKey({
     enabled: true,
-    onLog: () => void log.log(),
+    keys: footKeysOf(foot_key),
+    onLog: () => void (foot_does === 'burst' ? burst.toggle() : log.log()),
     onStandDown: () => void log.standDown(),
   });
 
@@ -78,6 +91,12 @@ export function OpenFiring({ facts }: { readonly facts: FiringFacts }) {
               holdLabel="Hold: close firing"
               onComplete={log.close}
             />,
+            <ThumbDome
+              key="burst"
+              label={BURST_DOME[burst.view.type]}
+              hold="half-second"
+              onComplete={burst.toggle}
+            />,
           ]}
         />
       }
@@ -85,7 +104,7 @@ export function OpenFiring({ facts }: { readonly facts: FiringFacts }) {
       {isPanelOpen(form) ? (
         <ReadingPanel form={form} />
       ) : (
-        <OpenFigure facts={facts} form={form} said={log.said} onPick={setCorrecting} />
+        <OpenFigure facts={facts} form={form} said={log.said} burst={burst.view} onPick={setCorrecting} />
       )}
       {correcting === null ? null : (
         <CorrectDialog
@@ -104,10 +123,11 @@ interface OpenFigureProps {
   readonly facts: FiringFacts;
   readonly form: ReadingForm;
   readonly said: Said | null;
+  readonly burst: BurstView;
   readonly onPick: (reading: ReadingDoc) => void;
 }
 
-function OpenFigure({ facts, form, said, onPick }: OpenFigureProps) {
+function OpenFigure({ facts, form, said, burst, onPick }: OpenFigureProps) {
   const { revision, rows, readings } = facts;
   const { spec } = revision;
   const { values } = form;
@@ -128,7 +148,7 @@ function OpenFigure({ facts, form, said, onPick }: OpenFigureProps) {
   );
   return (
     <div className="firing-figure">
-      <FiringHead facts={facts} form={form} said={said} />
+      <FiringHead facts={facts} form={form} said={said} burst={burst} />
       <OtherTablet facts={facts} />
       <LookedChoice form={form} length_mm={spec.channel.length_mm} />
       {last === undefined || fit === null ? (

@@ -14,6 +14,7 @@ export interface Said {
 
 export interface FiringLog {
   readonly said: Said | null;
+  readonly say: (said: Said) => void;
   /** Both the dome and the foot key come through here. */
   readonly log: () => Promise<HoldOutcome>;
   readonly close: () => Promise<HoldOutcome>;
@@ -58,6 +59,7 @@ export function useFiringLog({ facts, form, onLogged }: FiringLogOptions): Firin
 
   return {
     said,
+    say: setSaid,
     log: async () => {
       if (facts.loading) return failed('The readings of this firing are still being read.');
       if (writing.current) return failed('The reading before is still being written.');

@@ -41,6 +41,8 @@ export interface ReadingForm {
   /** Sets the spot on its grid; null takes it away. */
   readonly place: (at: { readonly x_mm: number; readonly y_mm: number } | null) => void;
   readonly fold: (group: string) => void;
+  /** The shots of this burst are in the Book already. */
+  readonly countedElsewhere: () => void;
   readonly refuse: (refusal: Refusal) => void;
   /** The reading is durable: the next one starts. */
   readonly startNext: () => void;
@@ -108,6 +110,9 @@ export function useReadingForm(base: Base, store: DraftStore): ReadingForm {
         ...now,
         entered: { ...now.entered, beam_x_mm: at?.x_mm ?? null, beam_y_mm: at?.y_mm ?? null },
       }));
+    },
+    countedElsewhere: () => {
+      set((now) => ({ ...now, entered: { ...now.entered, shots: 0 } }));
     },
     fold: (group) => {
       set((now) => ({
