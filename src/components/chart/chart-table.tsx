@@ -16,9 +16,8 @@ const MOST_ROWS = 40;
 export function ChartTable({ title, data, words }: ChartTableProps) {
   const stops = cursorStops(data);
   const every = Math.max(1, Math.ceil(stops.length / MOST_ROWS));
-  const rows = stops
-    .filter((_, i) => i % every === 0 || i === stops.length - 1)
-    .map((x) => valuesAt(data, x));
+  const shown = stops.filter((_, i) => i % every === 0 || i === stops.length - 1);
+  const rows = shown.map((x, i) => withExtremes(data, valuesAt(data, x), shown[i + 1] ?? Infinity));
   const xDecimals = data.x.decimals ?? 2;
   const yDecimals = data.y.decimals ?? 1;
   const column = (
@@ -68,6 +67,18 @@ export function ChartTable({ title, data, words }: ChartTableProps) {
       )}
     </>
   );
+}
+
+/** A row of an envelope stands for all of its points up to the next row. */
+function withExtremes({ band }: ChartData, row: CursorValues, until: number): CursorValues {
+  if (band?.extremes !== true) return row;
+  const inside = band.points.filter(({ x }) => x >= row.x && x < until);
+  if (inside.length === 0) return row;
+  return {
+    ...row,
+    low: Math.min(...inside.map((point) => point.low)),
+    high: Math.max(...inside.map((point) => point.high)),
+  };
 }
 
 function readingColumns(

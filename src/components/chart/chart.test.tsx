@@ -112,6 +112,26 @@ describe('chart', () => {
     expect(screen.getByRole('button', { name: 'Chart' }).getAttribute('aria-pressed')).toBe('true');
   });
 
+  it('leaves the spike of an envelope in its table, though rows are left out', () => {
+    const points = Array.from({ length: 900 }, (_, x) => ({
+      x,
+      low: x === 777 ? -9 : 0,
+      high: x === 431 ? 7 : 1,
+    }));
+    const band = { points, above: '', below: '', extremes: true };
+    const shown: ChartData = {
+      x: { min: 0, max: 900, unit: 'ns' },
+      y: { min: -10, max: 10, unit: 'kV' },
+      band,
+    };
+    render(<Chart title="Trace" words={words} data={shown} />);
+    const cells = within(screen.getByRole('table', { name: 'Trace' })).getAllByRole('cell');
+    const texts = cells.map((cell) => cell.textContent);
+    expect(texts).toContain('\u22129.0');
+    expect(texts).toContain('7.0');
+    expect(texts.length).toBeLessThan(200);
+  });
+
   it('bears no data and a single point', () => {
     const { container } = render(
       <Chart

@@ -72,7 +72,13 @@ export interface ChartData {
   readonly x: Axis;
   readonly y: Axis;
   /** Two solid bodies and the void between them. */
-  readonly band?: { readonly points: readonly BandPoint[]; readonly above: string; readonly below: string };
+  readonly band?: {
+    readonly points: readonly BandPoint[];
+    readonly above: string;
+    readonly below: string;
+    /** Each point holds the extremes from it to the next: what the table leaves out leaves its extremes behind. */
+    readonly extremes?: boolean;
+  };
   /** Dotted. */
   readonly law?: readonly Point[];
   /** Heavy, over the range in which it was measured. */

@@ -1,12 +1,17 @@
-import type { TraceReading } from '../book/bodies/note-bodies';
 import type { Envelope } from './extremes';
 import type { PulseFigures, Ring } from './measure';
 import type { TraceSurvey } from './survey';
 
-export type ChannelReading = TraceReading['channels'][number];
+/** What somebody said of a channel. */
+export interface ChannelScale {
+  /** Volts, or amperes, for one of the file's figures, the probe left out. */
+  readonly unit_V_or_A: number;
+  readonly probe_ratio: number;
+  readonly inverted: boolean;
+}
 
 /** What one of the file's figures is worth, V or A: unit, probe and sign. Every figure of a channel goes with it. */
-export function channelScale({ unit_V_or_A, probe_ratio, inverted }: ChannelReading): number {
+export function channelScale({ unit_V_or_A, probe_ratio, inverted }: ChannelScale): number {
   return unit_V_or_A * probe_ratio * (inverted ? -1 : 1);
 }
 
