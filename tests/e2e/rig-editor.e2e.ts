@@ -35,7 +35,7 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
   beforeAll(async () => {
     tablet = await openTablet(lab.url, size);
     await signInFirst(tablet.page(), ada);
-    await tablet.page().goto(`${lab.url}/rigs`);
+    await tablet.page().goto(`${lab.url}/rigs`, { waitUntil: 'commit' });
     await unlock(tablet.page(), ada.name);
     await tablet.page().getByRole('button', { name: 'New rig' }).waitFor();
     // The editor's own chunk is in the cache once the worker has it; a reload then needs no network.
@@ -119,7 +119,7 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
 
   it('keeps a half-typed number through a kill, and says before the hold what a revision voids', async () => {
     const page = tablet.page();
-    await page.goto(`${lab.url}/rigs/${HERON.id}/revise`);
+    await page.goto(`${lab.url}/rigs/${HERON.id}/revise`, { waitUntil: 'commit' });
     await unlock(page, ada.name);
     await press(page.getByRole('button', { name: /Spark gap/ }));
     await press(page.getByRole('button', { name: /^Gap/ }).first());
@@ -142,7 +142,7 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
 
   it('fits a part with its day, and opens its ledger', async () => {
     const page = tablet.page();
-    await page.goto(`${lab.url}/rigs/${HERON.id}/parts`);
+    await page.goto(`${lab.url}/rigs/${HERON.id}/parts`, { waitUntil: 'commit' });
     await unlock(page, ada.name);
     await press(page.getByRole('button', { name: 'Fit a part' }));
     await page.getByLabel('What it is').fill('PET stack, four plies');
@@ -162,7 +162,7 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
   it('answers or refuses in words whatever is typed: 100 edits of a fixed seed', async () => {
     const page = tablet.page();
     const roll = dice(size.width);
-    await page.goto(`${lab.url}/rigs/${HERON.id}/revise`);
+    await page.goto(`${lab.url}/rigs/${HERON.id}/revise`, { waitUntil: 'commit' });
     await unlock(page, ada.name);
     await page.locator('.edit-overview, .edit-section').waitFor();
     if (await page.locator('.edit-section').isVisible())
