@@ -16,7 +16,7 @@ import {
 import { alignHeron, copyRegister } from './kit-and-alignment';
 import { fireRig, type FiringPlan } from './fire-rig';
 import { answerIncident, reportFlashover, returnRig } from './incident';
-import { bringInCrew, createRig } from './people-and-sheets';
+import { bringInCrew, createRig, publishLaterSheets } from './people-and-sheets';
 import { reviewFirings } from './review-firings';
 import { grantPermit, reviseRig } from './revisions-and-permits';
 import type { Weather } from './weather';
@@ -166,6 +166,7 @@ export function planMonth(bench: Bench, lastDay: WorkingDay): readonly Appointme
     // At the end of the plan: an entry before would shift every die roll behind it.
     [21, 1700, () => alignHeron(bench)],
     [21, 1730, () => copyRegister(bench, lastDay)],
+    [21, 1745, () => publishLaterSheets(bench)],
   ];
 }
 

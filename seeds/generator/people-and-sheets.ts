@@ -2,7 +2,7 @@ import type { WorkingDay } from './working-days';
 import { BENCH_TABLET, DESK_TABLET } from '../lab';
 import { ADA, DEMO_PEOPLE, INGE, MILO } from '../people';
 import type { DemoRig } from '../rigs/demo-rig';
-import { DEMO_SHEETS } from '../sheets/demo-sheets';
+import { DEMO_SHEETS, LATER_SHEETS } from '../sheets/demo-sheets';
 import type { Bench } from './bench';
 
 /** Inge, who founded the lab, brings the others in, and Milo publishes the check sheets. */
@@ -17,6 +17,15 @@ export function bringInCrew(bench: Bench): void {
   }
   bench.handOver(DESK_TABLET);
   bench.pull(BENCH_TABLET);
+}
+
+/** Gas, dye and weekly care get sheets of their own, from the desk. */
+export function publishLaterSheets(bench: Bench): void {
+  for (const { id, spec } of Object.values(LATER_SHEETS)) {
+    bench.pass(120);
+    bench.write(DESK_TABLET, 'sheet.published', { author: MILO.id, id, body: { spec, replaces: null } });
+  }
+  bench.handOver(DESK_TABLET);
 }
 
 /** Ada builds the rig; Inge authorises her and Milo to fire it, well beyond the demo. */

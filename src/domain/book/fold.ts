@@ -19,7 +19,7 @@ import type { Reason, SealedEntry, Verdict } from './entry';
 import { readEntry, type EntryOf, type ReadableEntry } from './read-body';
 
 /** Raised whenever a fold gives other documents from the same entries: every store then refolds (protocol 1.9). */
-export const FOLD_VERSION = 2;
+export const FOLD_VERSION = 3;
 
 export interface Judgement {
   readonly verdict: Verdict;

@@ -1,5 +1,6 @@
 import * as z from 'zod/mini';
 import { optionalWords, shortText, words } from './bodies/fields';
+import { uuid } from './ids';
 
 const waive = z.enum(['never', 'reviewer', 'operator']);
 const stepBase = {
@@ -8,6 +9,8 @@ const stepBase = {
   detail: optionalWords,
   /** Who may leave this step out, with a reason. Shorting, beam stop and second person: never. */
   waive,
+  /** What the step guards, if nobody may ever leave it out; version 1 had no such mark. */
+  guards: z.optional(z.enum(['shorting', 'beam-stop'])),
 };
 
 export const stepSchema = z.discriminatedUnion('type', [
@@ -35,13 +38,20 @@ export const stepSchema = z.discriminatedUnion('type', [
 ]);
 export type Step = z.infer<typeof stepSchema>;
 export type StepType = Step['type'];
+export type StepGuard = NonNullable<Step['guards']>;
+
+/** Version 1 knew the first two alone. */
+export const PURPOSES = ['before-firing', 'make-safe', 'gas-change', 'dye-handling', 'weekly-care'] as const;
 
 export const sheetSpecSchema = z.object({
   title: shortText,
-  purpose: z.enum(['before-firing', 'make-safe']),
+  purpose: z.enum(PURPOSES),
   /** Topologies that it is for. */
   topologies: z.array(z.enum(['lc-inversion', 'charge-transfer'])).check(z.minLength(1)),
+  /** Rigs that it is for; left out or empty: every rig of its topologies. */
+  rigs: z.optional(z.array(uuid).check(z.maxLength(40))),
   caution: words,
   steps: z.array(stepSchema).check(z.minLength(1), z.maxLength(60)),
 });
 export type SheetSpec = z.infer<typeof sheetSpecSchema>;
+export type SheetPurpose = SheetSpec['purpose'];

@@ -50,6 +50,9 @@ export const VERDICT_WORDS: Readonly<Record<Verdict, string>> = {
 export const PURPOSE_WORDS: Readonly<Record<SheetSpec['purpose'], string>> = {
   'before-firing': 'Before firing',
   'make-safe': 'Make safe',
+  'gas-change': 'Gas change',
+  'dye-handling': 'Dye handling',
+  'weekly-care': 'Weekly care',
 };
 
 export const TOPOLOGY_WORDS: Readonly<Record<RigSpec['topology'], string>> = {

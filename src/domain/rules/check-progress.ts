@@ -5,6 +5,7 @@ import type { Step } from '../book/sheet-spec';
 import type { StepResult } from '../book/bodies/check-bodies';
 import type { Role } from '../book/bodies/people-bodies';
 import { isRole } from './roles';
+import { neverWaived } from './sheet-check';
 
 export interface StepProgress {
   readonly step: Step;
@@ -80,7 +81,7 @@ export function withinLimits(step: Step, value: number, spec: RigSpec): boolean 
 
 /** Each step says who may leave it out: never, a reviewer, or the operator. */
 export function mayWaive(step: Step, role: Role | null): boolean {
-  if (step.waive === 'never') return false;
+  if (step.waive === 'never' || neverWaived(step)) return false;
   if (step.waive === 'reviewer') return isRole(role, 'reviewer', 'lead');
   return isRole(role, 'operator', 'reviewer', 'lead');
 }

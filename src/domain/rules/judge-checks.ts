@@ -7,6 +7,8 @@ import type { SheetSpec, Step } from '../book/sheet-spec';
 import { checkProgress, mayWaive, SHORTEST_WAIT_S, withinLimits } from './check-progress';
 import type { JudgeContext } from './judge-context';
 import { objection, type Objection } from './objection';
+import { sheetRefusal } from './sheet-check';
+import { namesRig } from './sheet-fits';
 
 type StepEntry = EntryOf<'check.step-done' | 'check.step-waived' | 'check.closed' | 'check.abandoned'>;
 type CheckEntry = StepEntry | EntryOf<'check.opened' | 'sheet.published' | 'sheet.retired'>;
@@ -27,15 +29,19 @@ export function* checkObjection(entry: CheckEntry, context: JudgeContext): Effec
 }
 
 function* sheetObjection(spec: SheetSpec, replaces: string | null): Effect<Objection | null> {
-  const keys = new Set(spec.steps.map((step) => step.key));
-  if (keys.size !== spec.steps.length)
-    return objection('step-keys', 'Two steps of the sheet have the same key.');
-  if (spec.steps.some((step) => step.type === 'second-person' && step.waive !== 'never')) {
-    return objection('second-person-waivable', 'The second person may never be waived.');
-  }
-  if (replaces !== null && (yield* getDoc('sheet', replaces)) === undefined)
+  const broken = sheetRefusal(spec);
+  if (broken !== null) return objection(broken.code, broken.words);
+  if (replaces === null) return null;
+  const before = yield* getDoc('sheet', replaces);
+  if (before === undefined)
     return objection('unknown-sheet', 'The sheet that it replaces is not in the Book.');
-  return null;
+  return before.retired === null
+    ? null
+    : objection(
+        'sheet-replaced',
+        'The sheet that it replaces was replaced or retired meanwhile.',
+        before.retired.at,
+      );
 }
 
 function* openingObjection(entry: EntryOf<'check.opened'>): Effect<Objection | null> {
@@ -50,6 +56,7 @@ function* openingObjection(entry: EntryOf<'check.opened'>): Effect<Objection | n
     return objection('sheet-retired', 'This check sheet was retired.', sheetDoc.retired.at);
   if (!sheetDoc.spec.topologies.includes(revision.spec.topology))
     return objection('sheet-topology', 'This check sheet is for another kind of circuit.');
+  if (!namesRig(sheetDoc.spec, rig)) return objection('sheet-rig', 'This check sheet is for other rigs.');
   if (entry.meta.author === null && sheetDoc.spec.purpose !== 'make-safe') {
     return objection('author-open', 'Only making safe may be walked before a PIN.');
   }

@@ -8,6 +8,7 @@ import { useBookState, useSheets } from '../../data/use-book';
 import { useAppend, type AppendOutcome } from '../../data/use-append';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { DeclaredView } from '../../domain/rules/declared-view';
+import { sheetFits } from '../../domain/rules/sheet-fits';
 import { checkLapse } from '../../domain/rules/check-validity';
 import { isRetractable } from '../../domain/rules/judge-rigs';
 import type { DueNext } from './due-next';
@@ -60,9 +61,7 @@ function useGo(rig: RigDoc) {
     if (due.type === 'go-on-check') return void navigate(paths.check(due.check));
     if (due.type === 'open-firing') return void navigate(paths.openFiring(rig.id));
     const revision = latestRevision(rig);
-    const fitting = sheets.filter(
-      ({ spec }) => spec.purpose === due.purpose && spec.topologies.includes(revision.spec.topology),
-    );
+    const fitting = sheets.filter(({ spec }) => spec.purpose === due.purpose && sheetFits(spec, rig));
     const [only] = fitting;
     if (only === undefined || fitting.length > 1) return void navigate(paths.checks(rig.id));
     const outcome = await append({

@@ -2,6 +2,7 @@ import type { CheckDoc } from '../../domain/book/documents/check';
 import type { FiringDoc } from '../../domain/book/documents/firing';
 import type { RigDoc } from '../../domain/book/documents/rig';
 import type { SheetSpec } from '../../domain/book/sheet-spec';
+import { PURPOSE_WORDS } from '../../domain/report/words';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import type { Missing } from '../../domain/rules/readiness';
 
@@ -38,7 +39,8 @@ export function dueNext({ rig, view, missing, openFiring, openCheck }: Facts): D
       why: 'is open',
     };
   if (openCheck !== undefined) {
-    const title = openCheck.purpose === 'make-safe' ? 'Make safe' : 'Before-firing check';
+    const title =
+      openCheck.purpose === 'before-firing' ? 'Before-firing check' : PURPOSE_WORDS[openCheck.purpose];
     return { type: 'go-on-check', check: openCheck.id, title, why: 'is open' };
   }
   if (missing.length === 0) return { type: 'open-firing', title: 'Firing', why: 'check and permit stand' };

@@ -3,7 +3,7 @@ import type { EntryOf } from '../read-body';
 import type { SheetSpec } from '../sheet-spec';
 import { getDoc, putDoc, type Effect } from './effect';
 import { kitNote, type KitNote } from './kit';
-import { declare, updateRig } from './rig';
+import { declare, updateRig, voidCheck } from './rig';
 import { traceOf, type Standing, type Trace } from './trace';
 
 export interface StepRecord extends Trace {
@@ -82,6 +82,8 @@ export function* foldCheck(entry: CheckEntry, standing: Standing): Effect {
         ...rig,
         open_checks: rig.open_checks.filter((id) => id !== check.id),
       }));
+      // Left half done: a check that was closed in between did not see how.
+      yield* voidAfter(check, trace);
       return;
     case 'check.closed':
       yield* closeCheck(check, trace, standing);
@@ -105,12 +107,39 @@ function* openCheck(entry: EntryOf<'check.opened'>, trace: Trace): Effect {
     steps: {},
     ended: null,
   });
-  yield* updateRig(rig, (doc) => ({ ...doc, open_checks: [...doc.open_checks, id] }));
+  const begun = WORK[purpose]?.begun;
+  yield* updateRig(rig, (doc) => {
+    const opened = { ...doc, open_checks: [...doc.open_checks, id] };
+    return begun === undefined ? opened : voidCheck(opened, trace, begun);
+  });
+}
+
+interface Why {
+  readonly code: string;
+  readonly words: string;
+}
+
+/** Work that takes the rig out of the state that its before-firing check saw, from its beginning to its end. */
+const WORK: Partial<Record<SheetSpec['purpose'], { readonly begun: Why; readonly ended: Why }>> = {
+  'gas-change': {
+    begun: { code: 'gas-changed', words: 'A gas change was begun after the check.' },
+    ended: { code: 'gas-changed', words: 'The gas was changed after the check.' },
+  },
+  'weekly-care': {
+    begun: { code: 'weekly-care', words: 'Weekly care was begun after the check.' },
+    ended: { code: 'weekly-care', words: 'Weekly care was done after the check.' },
+  },
+};
+
+function* voidAfter(check: CheckDoc, trace: Trace): Effect {
+  const worked = WORK[check.purpose];
+  if (worked !== undefined) yield* updateRig(check.parent, (rig) => voidCheck(rig, trace, worked.ended));
 }
 
 /**
  * A closed check declares: before firing "short off", make safe "shorted". An irregular closing (a step missing) keeps
- * its place in the history and declares nothing but the danger: short off.
+ * its place in the history and declares nothing but the danger: short off. The others declare nothing; a closed gas
+ * change is a change of the gas.
  */
 function* closeCheck(check: CheckDoc, trace: Trace, standing: Standing): Effect {
   if (check.ended !== null) return;
@@ -120,6 +149,11 @@ function* closeCheck(check: CheckDoc, trace: Trace, standing: Standing): Effect 
     const without = { ...rig, open_checks: rig.open_checks.filter((id) => id !== check.id) };
     if (check.purpose === 'make-safe')
       return standing.irregular === null ? declare(without, trace, 'shorted') : without;
+    const worked = WORK[check.purpose];
+    if (check.purpose === 'gas-change' && worked !== undefined)
+      return voidCheck({ ...without, gas_changed: trace }, trace, worked.ended);
+    if (check.purpose !== 'before-firing')
+      return worked === undefined ? without : voidCheck(without, trace, worked.ended);
     const declared = declare(without, trace, 'short-off');
     if (standing.irregular !== null) return declared;
     const ready_check = {

@@ -1,4 +1,4 @@
-import type { Step } from '../../src/domain/book/sheet-spec';
+import type { Step } from '../../book/sheet-spec';
 
 /** Steps that both circuits share. Common practice, no source. */
 export const SUPPLY_OFF: readonly Step[] = [
@@ -49,6 +49,7 @@ export const PROVE: readonly Step[] = [
   {
     key: 'shorts-left-on',
     type: 'confirm',
+    guards: 'shorting',
     title: 'Shorts left on',
     detail:
       'Film and ceramic give charge back over minutes. The shorts stay on until the next check takes them off.',

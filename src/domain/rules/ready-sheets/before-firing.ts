@@ -1,4 +1,4 @@
-import type { SheetSpec } from '../../src/domain/book/sheet-spec';
+import type { SheetSpec } from '../../book/sheet-spec';
 
 /** Common practice at benches of this kind, no source; local rules and the person responsible come first. */
 export const BEFORE_FIRING: SheetSpec = {
@@ -58,6 +58,7 @@ export const BEFORE_FIRING: SheetSpec = {
     {
       key: 'beam-stop',
       type: 'confirm',
+      guards: 'beam-stop',
       title: 'Beam stop in, door sign out',
       detail: 'Both ends emit: a stop at each. The sign hangs outside, the door is shut.',
       waive: 'never',

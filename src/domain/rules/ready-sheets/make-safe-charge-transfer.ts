@@ -1,4 +1,4 @@
-import type { SheetSpec } from '../../src/domain/book/sheet-spec';
+import type { SheetSpec } from '../../book/sheet-spec';
 import { GAS_AND_LAST, PROVE, SUPPLY_OFF } from './make-safe-steps';
 
 /** Common practice at benches of this kind, no source; local rules and the person responsible come first. */
@@ -14,6 +14,7 @@ export const MAKE_SAFE_CHARGE_TRANSFER: SheetSpec = {
     {
       key: 'short-dump',
       type: 'confirm',
+      guards: 'shorting',
       title: 'Dump capacitor: resistor tip, then hard short',
       detail: 'Earth clamp on first. Hold the resistor tip on for ten slow breaths before the hard tip.',
       waive: 'never',
@@ -21,6 +22,7 @@ export const MAKE_SAFE_CHARGE_TRANSFER: SheetSpec = {
     {
       key: 'short-peaking',
       type: 'confirm',
+      guards: 'shorting',
       title: 'Peaking capacitor: resistor tip, then hard short',
       detail: 'By itself: the gap parts it from the dump capacitor.',
       waive: 'never',
@@ -28,6 +30,7 @@ export const MAKE_SAFE_CHARGE_TRANSFER: SheetSpec = {
     {
       key: 'short-gap-and-supply',
       type: 'confirm',
+      guards: 'shorting',
       title: 'Gap and supply node: resistor tip, then hard short',
       detail: 'The cable and the output of the supply hold charge too.',
       waive: 'never',

@@ -1,4 +1,4 @@
-import type { SheetSpec } from '../../src/domain/book/sheet-spec';
+import type { SheetSpec } from '../../book/sheet-spec';
 import { GAS_AND_LAST, PROVE, SUPPLY_OFF } from './make-safe-steps';
 
 /** Common practice at benches of this kind, no source; local rules and the person responsible come first. */
@@ -14,6 +14,7 @@ export const MAKE_SAFE_LC_INVERSION: SheetSpec = {
     {
       key: 'short-c1',
       type: 'confirm',
+      guards: 'shorting',
       title: 'C1: resistor tip, then hard short',
       detail: 'Earth clamp on first. Hold the resistor tip on for ten slow breaths before the hard tip.',
       waive: 'never',
@@ -21,6 +22,7 @@ export const MAKE_SAFE_LC_INVERSION: SheetSpec = {
     {
       key: 'short-c2',
       type: 'confirm',
+      guards: 'shorting',
       title: 'C2: resistor tip, then hard short',
       detail: 'By itself, whatever C1 showed.',
       waive: 'never',
@@ -28,6 +30,7 @@ export const MAKE_SAFE_LC_INVERSION: SheetSpec = {
     {
       key: 'short-middle',
       type: 'confirm',
+      guards: 'shorting',
       title: 'Middle plate: resistor tip, then hard short',
       detail: 'It floats; it may sit at any voltage when one capacitor was emptied before the other.',
       waive: 'never',
@@ -35,6 +38,7 @@ export const MAKE_SAFE_LC_INVERSION: SheetSpec = {
     {
       key: 'short-channel',
       type: 'confirm',
+      guards: 'shorting',
       title: 'Across the channel: resistor tip, then hard short',
       detail: 'From electrode to electrode, not each to earth alone.',
       waive: 'never',
@@ -42,6 +46,7 @@ export const MAKE_SAFE_LC_INVERSION: SheetSpec = {
     {
       key: 'short-gap-and-supply',
       type: 'confirm',
+      guards: 'shorting',
       title: 'Gap and supply node: resistor tip, then hard short',
       detail: 'The cable and the output of the supply hold charge too.',
       waive: 'never',

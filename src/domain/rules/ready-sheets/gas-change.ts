@@ -1,0 +1,136 @@
+import type { SheetSpec } from '../../book/sheet-spec';
+
+/** Common practice at benches of this kind, no source; local rules and the person responsible come first. */
+export const GAS_CHANGE: SheetSpec = {
+  title: 'Gas change',
+  purpose: 'gas-change',
+  topologies: ['lc-inversion', 'charge-transfer'],
+  caution:
+    'A full cylinder empties a room of air in minutes: door open, extraction on, nobody alone. A fitting that is undone ' +
+    'under pressure hits whoever stands before it. Never oil or grease on an oxygen fitting. The gas and its pressure ' +
+    'change where the gap breaks: the before-firing check lapses, and nothing fires until it is walked again.',
+  steps: [
+    {
+      key: 'shorted',
+      type: 'confirm',
+      guards: 'shorting',
+      title: 'Rig made safe, shorts seen on',
+      detail: 'Look at every short yourself: gas lines run beside charged parts.',
+      waive: 'never',
+    },
+    {
+      key: 'air',
+      type: 'confirm',
+      title: 'Door open, extraction on, oxygen alarm live',
+      detail:
+        'Where the room has an alarm, look at its reading. No alarm: nobody stays in with the door shut.',
+      waive: 'never',
+    },
+    {
+      key: 'old-shut',
+      type: 'confirm',
+      title: 'Old cylinder valve shut',
+      detail: 'Hand-tight, never with a wrench that lengthens the arm.',
+      waive: 'never',
+    },
+    {
+      key: 'line-vented',
+      type: 'reading',
+      title: 'Line and vessel vented',
+      detail:
+        'Vent through the extraction until the gauge rests. The gauge next to the fitting that is undone counts.',
+      quantity: 'Gauge pressure',
+      unit: 'bar(g)',
+      lowest: -0.02,
+      highest: 0.02,
+      highest_from_rig: null,
+      waive: 'never',
+    },
+    {
+      key: 'regulator-out',
+      type: 'confirm',
+      title: 'Regulator spring let off',
+      detail: 'Turned out until it is loose, so that the new cylinder meets a closed regulator.',
+      waive: 'never',
+    },
+    {
+      key: 'label',
+      type: 'confirm',
+      title: 'New cylinder: label read, not the colour',
+      detail:
+        'Gas, grade and test date, read aloud. Note the cylinder’s number. Chained before its cap comes off.',
+      waive: 'never',
+    },
+    {
+      key: 'seat',
+      type: 'confirm',
+      title: 'Seat clean, thread fits by hand',
+      detail: 'Thread of this gas only, no adapter, no tape on a face seal. Washer new where it takes one.',
+      waive: 'reviewer',
+    },
+    {
+      key: 'cylinder-pressure',
+      type: 'reading',
+      title: 'Cylinder pressure',
+      detail: 'Valve opened slowly, standing to the side. Above the regulator’s inlet rating: shut it again.',
+      quantity: 'Gauge pressure',
+      unit: 'bar(g)',
+      lowest: 5,
+      highest: 200,
+      highest_from_rig: null,
+      waive: 'reviewer',
+    },
+    {
+      key: 'leaks',
+      type: 'confirm',
+      title: 'Every joint looked at for bubbles',
+      detail: 'Leak fluid on each joint that was touched. Vent before any joint is tightened.',
+      waive: 'reviewer',
+    },
+    {
+      key: 'line-creep',
+      type: 'reading',
+      title: 'Pressure lost over 5 min, line shut in',
+      detail: 'Cylinder shut, line at working pressure. It falls with the room’s temperature as well.',
+      quantity: 'Fall over 5 min',
+      unit: 'bar',
+      lowest: -0.02,
+      highest: 0.05,
+      highest_from_rig: null,
+      waive: 'reviewer',
+    },
+    {
+      key: 'purged',
+      type: 'confirm',
+      title: 'Line and vessel purged',
+      detail: 'Five volumes or more through the gap and the channel, into the extraction. Note how many.',
+      waive: 'reviewer',
+    },
+    {
+      key: 'vessel-set',
+      type: 'reading',
+      title: 'Vessel pressure as left',
+      detail: 'Not above what the rig’s envelope allows. Open gap: 0.',
+      quantity: 'Gauge pressure',
+      unit: 'bar(g)',
+      lowest: 0,
+      highest: null,
+      highest_from_rig: 'envelope.max_bar_g',
+      waive: 'never',
+    },
+    {
+      key: 'second-person',
+      type: 'second-person',
+      title: 'Second person: gas and joints seen',
+      detail: 'Reads the label on the cylinder and says the gas aloud.',
+      waive: 'never',
+    },
+    {
+      key: 'old-away',
+      type: 'confirm',
+      title: 'Old cylinder capped, marked, chained',
+      detail: 'Marked with what is left in it.',
+      waive: 'operator',
+    },
+  ],
+};
