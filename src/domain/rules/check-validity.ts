@@ -1,9 +1,8 @@
-import type { ReadyCheck, RigDoc } from '../book/documents/rig';
+import { CHECK_IDLE_MS, type ReadyCheck, type RigDoc } from '../book/documents/rig';
 import { elapsedMs, type StampPoint } from '../book/stamp';
 
 const MINUTE_MS = 60_000;
-/** A before-firing check lapses after this much idling, or after four hours whatever happens (PRODUCT: Checks). */
-export const CHECK_IDLE_MS = 30 * MINUTE_MS;
+/** Whatever happens, a before-firing check is over after four hours (PRODUCT: Checks). */
 export const CHECK_AGE_MS = 240 * MINUTE_MS;
 
 export interface Lapse {

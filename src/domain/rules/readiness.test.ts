@@ -3,7 +3,8 @@ import { PureBench } from '../../../tests/support/pure-bench';
 import { ADA, idOf, MILO, MORNING_MS, TABLET_A, TABLET_B, TARIQ } from '../../../tests/support/pure-book';
 import { testSpec } from '../../../tests/support/test-lab';
 import type { StampPoint } from '../book/stamp';
-import { CHECK_AGE_MS, CHECK_IDLE_MS, checkLapse, checkTimeLeftMs } from './check-validity';
+import { CHECK_IDLE_MS } from '../book/documents/rig';
+import { CHECK_AGE_MS, checkLapse, checkTimeLeftMs } from './check-validity';
 import { declaredView, DECLARED_FOR_MS } from './declared-view';
 import { missingToFire, standingPermit, type ReadinessInput } from './readiness';
 

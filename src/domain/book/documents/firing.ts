@@ -2,7 +2,7 @@ import type { BodyOf } from '../kinds';
 import type { EntryOf } from '../read-body';
 import { getDoc, putDoc, type Effect } from './effect';
 import type { ReadingDoc } from './reading';
-import { updateRig } from './rig';
+import { holdBy, keepActive, updateRig } from './rig';
 import { traceOf, type Standing, type Trace } from './trace';
 
 export interface FiringReview extends Trace {
@@ -106,12 +106,9 @@ function* openFiring(entry: EntryOf<'firing.opened'>, trace: Trace, standing: St
     closed: null,
     reviews: [],
   });
-  yield* updateRig(rig, (doc) => ({
-    ...doc,
-    open_firings: [...doc.open_firings, id],
-    last_firing: id,
-    holder: trace.device,
-  }));
+  yield* updateRig(rig, (doc) =>
+    holdBy({ ...doc, open_firings: [...doc.open_firings, id], last_firing: id }, trace),
+  );
 }
 
 function* addReading(firing: FiringDoc, entry: EntryOf<'firing.reading'>, standing: Standing): Effect {
@@ -141,16 +138,9 @@ function* addReading(firing: FiringDoc, entry: EntryOf<'firing.reading'>, standi
 }
 
 function* keepCheckActive(firing: FiringDoc, trace: Trace): Effect {
-  yield* updateRig(firing.parent, (rig) => {
-    const { ready_check } = rig;
-    if (
-      ready_check === null ||
-      ready_check.check !== firing.check ||
-      ready_check.closed.device !== trace.device
-    )
-      return rig;
-    return { ...rig, ready_check: { ...ready_check, active: trace.stamp } };
-  });
+  yield* updateRig(firing.parent, (rig) =>
+    rig.ready_check?.check === firing.check ? keepActive(rig, trace) : rig,
+  );
 }
 
 function withReview(firing: FiringDoc, review: FiringReview): FiringDoc {

@@ -1,7 +1,7 @@
 import type { BodyOf } from '../kinds';
 import type { EntryOf } from '../read-body';
 import type { RigSpec } from '../rig-spec';
-import type { StampPoint } from '../stamp';
+import { elapsedMs, type StampPoint } from '../stamp';
 import { getDoc, putDoc, type Effect } from './effect';
 import type { KitNote } from './kit';
 import { traceOf, type Standing, type Trace } from './trace';
@@ -105,13 +105,38 @@ export function voidCheck(
   return { ...rig, ready_check: { ...ready_check, voided: { ...why, at: by.at } } };
 }
 
+/** Once another tablet has had the rig, the check of this one stays void when the rig comes back. */
+export function holdBy(rig: RigDoc, trace: Trace): RigDoc {
+  const held = { ...rig, holder: trace.device };
+  if (rig.ready_check === null || rig.ready_check.closed.device === trace.device) return held;
+  return voidCheck(held, trace, {
+    code: 'other-tablet',
+    words: 'Another tablet took the rig over after the check.',
+  });
+}
+
+/** A before-firing check lapses after this much idling (PRODUCT: Checks). */
+export const CHECK_IDLE_MS = 30 * 60_000;
+
+/** Work on the rig keeps its check alive; one that has lapsed by idling stays void, whatever is done afterwards. */
+export function keepActive(rig: RigDoc, trace: Trace): RigDoc {
+  const { ready_check } = rig;
+  if (ready_check === null || ready_check.closed.device !== trace.device) return rig;
+  const idle_ms = elapsedMs(ready_check.active, trace.stamp);
+  if (idle_ms === null) return rig;
+  if (idle_ms > CHECK_IDLE_MS)
+    return voidCheck(rig, trace, { code: 'idle', words: 'The check lapsed after 30 min without activity.' });
+  return { ...rig, ready_check: { ...ready_check, active: trace.stamp } };
+}
+
 export function declare(rig: RigDoc, trace: Trace, state: Declaration['state']): RigDoc {
-  const declared = { ...rig, declared: { ...trace, state }, holder: trace.device };
-  if (state === 'short-off') return declared;
-  return voidCheck({ ...declared, last_short: trace }, trace, {
+  const declared = { ...rig, declared: { ...trace, state } };
+  if (state === 'short-off') return holdBy(declared, trace);
+  const safe = voidCheck({ ...declared, last_short: trace }, trace, {
     code: 'made-safe',
     words: 'The rig was made safe after the check.',
   });
+  return holdBy(safe, trace);
 }
 
 type RigEntry = EntryOf<
@@ -184,7 +209,11 @@ function changed(
     case 'rig.revised':
       return revise(rig, entry.body, trace);
     case 'rig.declared':
-      return declare(rig, trace, entry.body.state);
+      // A short that comes off by itself is not the one that the check took off.
+      return voidCheck(declare(rig, trace, entry.body.state), trace, {
+        code: 'declared',
+        words: 'The state of the rig was declared after the check.',
+      });
     case 'rig.stood-down':
       return standDown(rig, trace, entry.body.why);
     case 'rig.stand-down-retracted':
@@ -222,10 +251,14 @@ function changed(
         ),
       };
     case 'parting.settled':
-      return {
-        ...rig,
-        heads: [...rig.heads.filter((head) => !entry.body.settles.includes(head)), entry.body.keeps],
-      };
+      return voidCheck(
+        {
+          ...rig,
+          heads: [...rig.heads.filter((head) => !entry.body.settles.includes(head)), entry.body.keeps],
+        },
+        trace,
+        { code: 'parting-settled', words: 'A parting of the rig was settled after the check.' },
+      );
   }
 }
 
