@@ -17,6 +17,16 @@ export interface PlausibilityInput {
   readonly broke: boolean;
   /** Sigmas of the readings just before, newest first, for the rule of two in three. */
   readonly before: readonly number[];
+  /** What the rig's own calibration expects here; it then decides on a self-break in the law's place. */
+  readonly own?: OwnExpectation | undefined;
+}
+
+/** Self-break by the rig's own curve, with one sigma of single shots. */
+export interface OwnExpectation {
+  readonly expected_kV: number;
+  readonly sigma_kV: number;
+  /** Beyond the gaps and pressures that were read, where the law goes on deciding. */
+  readonly extrapolated: boolean;
 }
 
 /** A cause that would explain the reading, with how far the setting would have to be off. */
@@ -27,6 +37,8 @@ export interface RankedCause {
 }
 
 export interface Plausibility extends Basis {
+  /** By the rig's own curve or by the law. */
+  readonly against: 'own' | 'law';
   readonly expected_kV: number;
   readonly low_kV: number;
   readonly high_kV: number;
@@ -46,6 +58,7 @@ export interface Plausibility extends Basis {
 }
 
 const MODEL = 'Reading against the law, sigma of law, settings and scatter together';
+const OWN_MODEL = 'Reading against the rig\u2019s own curve, sigma of its single shots';
 const VALID = 'where the gap\u2019s law holds; a rig\u2019s own fit knows its scatter better';
 
 /** Speaks at 3 sigma, or at two of three beyond 2 sigma on the same side. */
@@ -64,30 +77,39 @@ export function plausibility(input: PlausibilityInput): Result<Plausibility> {
   const sides = selfBreak(input.gap);
   if (!sides.ok) return refused(sides.refusal);
   const { law_kV, low_kV, high_kV } = sides.value;
-  const sigma_kV = law_kV * relativeSigma(input.gap);
+  const own = input.own === undefined || input.own.extrapolated ? null : input.own;
+  const expected_kV = own?.expected_kV ?? law_kV;
+  const sigma_kV = own?.sigma_kV ?? law_kV * relativeSigma(input.gap);
+  const model = own === null ? MODEL : OWN_MODEL;
   const common = {
-    expected_kV: law_kV,
+    against: own === null ? ('law' as const) : ('own' as const),
+    expected_kV,
     low_kV,
     high_kV,
     sigma_kV,
-    expected: withBand(answer({ value: law_kV, unit: 'kV', relative: 0, model: MODEL, valid: VALID }), {
-      low: law_kV - sigma_kV,
-      high: law_kV + sigma_kV,
+    expected: withBand(answer({ value: expected_kV, unit: 'kV', relative: 0, model, valid: VALID }), {
+      low: expected_kV - sigma_kV,
+      high: expected_kV + sigma_kV,
     }),
-    model: MODEL,
+    model,
     valid: VALID,
   };
   if (input.how === 'self-break' && input.broke) {
-    const sigma = (input.voltage_kV - law_kV) / sigma_kV;
+    const sigma = (input.voltage_kV - expected_kV) / sigma_kV;
     const speaks = Math.abs(sigma) >= ALONE_SIGMA || repeats(sigma, input.before);
-    const causes = speaks ? rankedCauses(input) : [];
+    // Against the own curve a slip is measured from where this gap really breaks, not from the law.
+    const asByLaw = { ...input, voltage_kV: (input.voltage_kV * law_kV) / expected_kV };
+    const causes = speaks ? rankedCauses(asByLaw) : [];
     return ok({
       ...common,
       sigma,
       fits: !speaks,
-      words: selfBreakWords(sigma, input.voltage_kV / law_kV - 1, speaks),
+      words: selfBreakWords(
+        { sigma, share: input.voltage_kV / expected_kV - 1, speaks },
+        own === null ? 'the law' : 'its own curve',
+      ),
       causes,
-      deviation: deviationOf(sigma),
+      deviation: deviationOf(sigma, model),
       warnings: speaks ? [DOES_NOT_FIT] : [],
     });
   }
@@ -111,8 +133,8 @@ const MAY_SIT_CHARGED: Warning = {
 };
 
 /** A reading a sigma off its own scatter shifts the count by one. */
-function deviationOf(sigma: number): Answer {
-  const one = answer({ value: sigma, unit: 'sigma', relative: 0, model: MODEL, valid: VALID });
+function deviationOf(sigma: number, model: string): Answer {
+  const one = answer({ value: sigma, unit: 'sigma', relative: 0, model, valid: VALID });
   return withBand(one, { low: sigma - 1, high: sigma + 1 });
 }
 
@@ -140,12 +162,18 @@ function repeats(sigma: number, before: readonly number[]): boolean {
     .some((earlier) => Math.abs(earlier) >= REPEATED_SIGMA && Math.sign(earlier) === Math.sign(sigma));
 }
 
-function selfBreakWords(sigma: number, share: number, speaks: boolean): string {
+interface Judged {
+  readonly sigma: number;
+  readonly share: number;
+  readonly speaks: boolean;
+}
+
+function selfBreakWords({ sigma, share, speaks }: Judged, what: string): string {
   const side = sigma < 0 ? 'below' : 'above';
   const size = formatFigure(Math.abs(sigma), { digits: { decimals: 1 }, rounding: 'nearest' });
-  if (!speaks) return `Fits: ${size} σ ${side} the law.`;
+  if (!speaks) return `Fits: ${size} σ ${side} ${what}.`;
   const percent = formatFigure(Math.abs(share) * 100, { digits: { decimals: 0 }, rounding: 'nearest' });
-  return `Does not fit: ${percent} % ${sigma < 0 ? 'low' : 'high'}, ${size} σ ${side} the law.`;
+  return `Does not fit: ${percent} % ${sigma < 0 ? 'low' : 'high'}, ${size} σ ${side} ${what}.`;
 }
 
 function withoutSelfBreak(input: PlausibilityInput, low_kV: number, high_kV: number) {
