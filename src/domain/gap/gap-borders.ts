@@ -72,11 +72,18 @@ interface Point {
   readonly y: number;
 }
 
-/** Zero or more where the target is kept. Logarithms straighten the curve, and a straight one is found in few steps. */
+/**
+ * Zero or more exactly where the target is kept, whatever a logarithm's last digit says. Logarithms straighten the curve,
+ * and a straight one is found in few steps.
+ */
 function excessOf({ voltage_kV, wanted_kV, keep }: BorderSearch): (logSetting: number) => number {
   const sign = keep === 'at-least' ? 1 : -1;
   const logWanted = Math.log(wanted_kV);
-  return (logSetting) => sign * (Math.log(voltage_kV(Math.exp(logSetting))) - logWanted);
+  return (logSetting) => {
+    const here_kV = voltage_kV(Math.exp(logSetting));
+    const excess = sign * (Math.log(here_kV) - logWanted);
+    return sign * (here_kV - wanted_kV) >= 0 ? Math.max(0, excess) : Math.min(-Number.EPSILON, excess);
+  };
 }
 
 function borderBetween(
