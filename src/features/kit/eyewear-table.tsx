@@ -30,9 +30,9 @@ export function EyewearTable({ rigs, kit, now_ms }: Props) {
         rowKey={(row) => row.rig.id}
       />
       <p className="muted">
-        By the rig’s own beam and one pulse at its limit. The dose of the day, dye light and whatever else is
-        present come on top, so eyewear stays on where it reads any. A pair must state a density at every
-        wavelength that is there. The person responsible for laser safety decides.
+        By the rig’s own beam for a working day at its highest rate, with the larger of the declared energy
+        and a thousandth of what it stores. Dye light and whatever else is present come on top. A pair must
+        state a density at every wavelength that is there. The person responsible for laser safety decides.
       </p>
     </div>
   );

@@ -6,10 +6,10 @@ const due = (days: number) => dueOf(kitDoc({ due_ms: NOW_MS + days * DAY_MS }), 
 
 describe('when a piece is due', () => {
   it.each([
-    [-12.5, 'overdue', 'inspection overdue, 12 d'],
+    [-12.5, 'overdue', 'inspection overdue, 12\u00a0d'],
     [-0.2, 'overdue', 'inspection overdue, since today'],
     [0.5, 'soon', 'inspection due today'],
-    [9.9, 'soon', 'inspection due in 9 d'],
+    [9.9, 'soon', 'inspection due in 9\u00a0d'],
     [31, 'fine', 'inspection due 1 Jan 2027'],
   ])('%d days ahead is %s', (days, state, words) => {
     expect(due(days)).toMatchObject({ state, words });

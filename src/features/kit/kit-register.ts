@@ -24,12 +24,12 @@ export function dueOf(kit: KitDoc, now_ms: number, zone: string): Due {
   const what = kit.item.type === 'meter' ? 'calibration' : 'inspection';
   if (left_ms < 0) {
     const days = Math.floor(-left_ms / DAY_MS);
-    const since = days < 1 ? 'since today' : `${days} d`;
+    const since = days < 1 ? 'since today' : `${days}\u00a0d`;
     return { state: 'overdue', words: `${what} overdue, ${since}`, left: 0 };
   }
   if (left_ms <= KIT_NOTICE_MS) {
     const days = Math.floor(left_ms / DAY_MS);
-    const words = days < 1 ? `${what} due today` : `${what} due in ${days} d`;
+    const words = days < 1 ? `${what} due today` : `${what} due in ${days}\u00a0d`;
     return { state: 'soon', words, left: left_ms / KIT_NOTICE_MS };
   }
   return { state: 'fine', words: `${what} due ${monthWords(due_ms, zone)}`, left: 1 };

@@ -17,7 +17,7 @@ const row = (kit: KitDoc) => {
 describe('a row of the register', () => {
   it('says who has it, its densities and that it is overdue, by words and shape', () => {
     const { text, mark } = row(kitDoc({ due_ms: NOW_MS - 12 * DAY_MS }));
-    for (const words of ['E1', 'UV pair', 'OD 6 at 190 to 375', 'Ada Brook', 'inspection overdue, 12 d'])
+    for (const words of ['E1', 'UV pair', 'OD 6 at 190 to 375', 'Ada Brook', 'inspection overdue, 12\u00a0d'])
       expect(text).toContain(words);
     expect(mark?.classList.contains('overdue')).toBe(true);
   });
