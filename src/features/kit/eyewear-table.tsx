@@ -30,9 +30,9 @@ export function EyewearTable({ rigs, kit, now_ms }: Props) {
         rowKey={(row) => row.rig.id}
       />
       <p className="muted">
-        By the rig’s own beam for a working day at its highest rate, with the larger of the declared energy
-        and a thousandth of what it stores. Dye light and whatever else is present come on top. A pair must
-        state a density at every wavelength that is there. The person responsible for laser safety decides.
+        By the rig’s own beam; dye light and whatever else is present comes on top, so eyewear stays on where
+        it reads any. A pair must state a density at every wavelength that is there. The person responsible
+        for laser safety decides.
       </p>
     </div>
   );
@@ -84,7 +84,7 @@ const NM = { digits: { decimals: 1 }, rounding: 'nearest' } as const;
 
 function needWords(need: Extract<EyewearNeed, { type: 'known' }>): string {
   const most = Math.max(...need.lines.map((line) => line.density));
-  // No density would read as "none needed": a single pulse says nothing of the day's dose.
+  // A density of 0 would read as "none needed".
   if (most === 0) return 'any';
   return formatFigure(most, { digits: { decimals: 1 }, rounding: 'up' });
 }
