@@ -36,6 +36,9 @@ const OpenFiringRoute = lazy(() =>
 const FiringRoute = lazy(() =>
   import('../features/firings/firing-route').then((m) => ({ default: m.FiringRoute })),
 );
+const TracesRoute = lazy(() =>
+  import('../features/traces/traces-route').then((m) => ({ default: m.TracesRoute })),
+);
 const RigsRoute = lazy(() => import('../features/rigs/rigs-route').then((m) => ({ default: m.RigsRoute })));
 const RigRoute = lazy(() => import('../features/rigs/rig-route').then((m) => ({ default: m.RigRoute })));
 const ReviseRigRoute = lazy(() =>
@@ -101,6 +104,7 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.openFiring, screen: OpenFiringRoute, area: 'Firings' },
   { path: patterns.firings, screen: FiringsRoute, area: 'Firings' },
   { path: patterns.firing, screen: FiringRoute, area: 'Firings' },
+  { path: patterns.traces, screen: TracesRoute, area: 'Firings' },
   { path: patterns.rigs, screen: RigsRoute, area: 'Rigs' },
   { path: patterns.newRig, screen: NewRigRoute, area: 'Rigs' },
   { path: patterns.rigParts, screen: RigPartsRoute, area: 'Rigs' },

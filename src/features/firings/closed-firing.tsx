@@ -14,6 +14,7 @@ import { CorrectDialog } from './correct-dialog';
 import { FIRING_CHART_WORDS, firingChart } from './firing-chart';
 import { limitWords, permitWords, ShotsTotal } from './firing-head';
 import { firingFlags, firingStateWords, nameIn } from './firing-state';
+import { FiringLinks } from './firing-links';
 import { FitSays } from './fit-says';
 import { fitOf, sigmasOf } from './reading-fit';
 import { firstBase, nextBase } from './reading-form';
@@ -138,6 +139,7 @@ function ClosedHead({ facts }: { readonly facts: FiringFacts }) {
           <SaysBlock lead="Missing then:">{unready.missing.map((one) => one.words).join(' ')}</SaysBlock>
         </>
       )}
+      <FiringLinks firing={firing.id} />
       {closed !== null && closed.summary !== '' ? (
         <SaysBlock lead="Closing words:">{closed.summary}</SaysBlock>
       ) : null}

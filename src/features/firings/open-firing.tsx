@@ -15,6 +15,7 @@ import type { BurstView } from './burst';
 import { CorrectDialog } from './correct-dialog';
 import { FIRING_CHART_WORDS, firingChart } from './firing-chart';
 import { FiringHead } from './firing-head';
+import { FiringLinks } from './firing-links';
 import { FitSays } from './fit-says';
 import { LookedChoice } from './looked-choice';
 import { fitOf, sigmasOf } from './reading-fit';
@@ -150,6 +151,7 @@ function OpenFigure({ facts, form, said, burst, onPick }: OpenFigureProps) {
     <div className="firing-figure">
       <FiringHead facts={facts} form={form} said={said} burst={burst} />
       <OtherTablet facts={facts} />
+      <FiringLinks firing={facts.firing.id} />
       <LookedChoice form={form} length_mm={spec.channel.length_mm} />
       {last === undefined || fit === null ? (
         <SaysBlock muted>
