@@ -6,6 +6,7 @@ import {
   firingAnswerSchema,
   firingListSchema,
   heldBackAnswerSchema,
+  rigReportSchema,
   waitingAnswerSchema,
 } from '../../src/domain/report/desk-shapes';
 import type { Database } from '../db/database';
@@ -56,6 +57,15 @@ export function createDesk({
       params: idSchema,
       answers: { 200: firingAnswerSchema },
       handler: async ({ caller, params }) => ({ body: await desk.firing(caller.lab, params.id) }),
+    }),
+    declareRoute({
+      method: 'GET',
+      path: '/api/desk/rigs/:id/report',
+      summary: 'The newest revision of a rig with its derived figures, as they stand on its papers',
+      permission: EVERY_ROLE,
+      params: idSchema,
+      answers: { 200: rigReportSchema },
+      handler: async ({ caller, params }) => ({ body: await desk.rigReport(caller.lab, params.id) }),
     }),
     declareRoute({
       method: 'GET',

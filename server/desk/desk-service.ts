@@ -4,9 +4,11 @@ import type { JudgedEntry } from '../../src/domain/book/entry';
 import type {
   FiringAnswer,
   FiringList,
+  RigReportAnswer,
   WaitingAnswer,
   WaitingItem,
 } from '../../src/domain/report/desk-shapes';
+import { rigReport } from '../../src/domain/report/rig-report';
 import { NotThere } from '../http/problems';
 import type { DeskStore } from './desk-store';
 import {
@@ -165,6 +167,16 @@ export function createDeskService(store: DeskStore, now: () => number) {
         book,
         people: await people(lab, mentioned),
       };
+    },
+
+    async rigReport(lab: string, id: string): Promise<RigReportAnswer> {
+      const rig = (await store.findDocument(lab, 'rig', id))?.doc;
+      const settings = (await store.findDocument(lab, 'lab', lab))?.doc.settings;
+      const book = await store.bookPoint(lab);
+      if (rig === undefined || settings === undefined || book === undefined)
+        throw new NotThere('There is no such rig in this lab.');
+      const report = rigReport(rig, settings);
+      return { ...report, rows: report.rows.map((row) => ({ ...row, warnings: [...row.warnings] })), book };
     },
 
     async entries(lab: string, query: { readonly since: number; readonly limit: number }) {

@@ -7,11 +7,14 @@ import {
   firingAnswerSchema,
   firingListSchema,
   heldBackAnswerSchema,
+  rigReportSchema,
   waitingAnswerSchema,
   type WaitingItem,
 } from '../../src/domain/report/desk-shapes';
+import { derivedRows } from '../../src/domain/report/derived-rows';
+import { rigDerived } from '../../src/domain/rules/rig-derived';
 import { openTestFiring, type TestBench } from '../../tests/support/test-bench';
-import { createTestLab, testSpec, type TestLab } from '../../tests/support/test-lab';
+import { createTestLab, testSettings, testSpec, type TestLab } from '../../tests/support/test-lab';
 import { startTestServer, type TestServer } from '../../tests/support/test-server';
 import { ask, type TestTablet } from '../../tests/support/test-tablet';
 
@@ -32,6 +35,19 @@ describe('the Desk and Crew', () => {
   const waiting = async (): Promise<readonly WaitingItem[]> =>
     waitingAnswerSchema.parse((await get('/api/desk/waiting')).body).waiting;
   const waitingOf = async (id: string) => (await waiting()).filter((one) => one.id === id);
+
+  it('gives a rig on paper with the digits that the tablet computes, and where it stands in the Book', async () => {
+    const answer = await get(`/api/desk/rigs/${bench.rig}/report`);
+    expect(answer.status).toBe(200);
+    const report = rigReportSchema.parse(answer.body);
+    const here = rigDerived(testSpec, testSettings);
+    expect(report.rows.map(({ key, value }) => [key, value])).toEqual(
+      derivedRows(here).map(({ key, value }) => [key, value]),
+    );
+    expect(report).toMatchObject({ name: 'Kettle', book: { epoch: lab.epoch } });
+    expect(Number(report.gap.low)).toBeLessThan(Number(report.gap.law));
+    expect((await get(`/api/desk/rigs/${randomUUID()}/report`)).status).toBe(404);
+  });
 
   it('shows a firing from its closing to its review, with where it stands in the Book', async () => {
     const { operator, firing, read } = bench;

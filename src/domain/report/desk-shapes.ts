@@ -114,3 +114,34 @@ export const crewAnswerSchema = z.object({
   ),
 });
 export type CrewAnswer = z.infer<typeof crewAnswerSchema>;
+
+const reportRowSchema = z.object({
+  key: z.string(),
+  label: z.string(),
+  value: z.nullable(z.string()),
+  unit: z.string(),
+  refusal: z.nullable(z.string()),
+  words: z.string(),
+  caution: z.boolean(),
+  band: z.nullable(z.string()),
+  model: z.string(),
+  valid: z.string(),
+  warnings: z.array(z.string()),
+});
+
+/** A rig on paper, with the place in the Book that it was taken from. */
+export const rigReportSchema = z.object({
+  rig: uuid,
+  name: z.string(),
+  revision: z.object({ number: z.string(), entry: uuid }),
+  rows: z.array(reportRowSchema),
+  gap: z.object({
+    at_bar_g: z.number(),
+    low: z.nullable(z.string()),
+    law: z.nullable(z.string()),
+    high: z.nullable(z.string()),
+    refusal: z.nullable(z.string()),
+  }),
+  book: z.object({ epoch: uuid, revision: count, hash: sha256Hex }),
+});
+export type RigReportAnswer = z.infer<typeof rigReportSchema>;

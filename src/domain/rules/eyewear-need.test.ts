@@ -1,26 +1,36 @@
 import { describe, expect, it } from 'vitest';
-import { testSpec } from '../../../tests/support/test-lab';
+import { HERON } from '../../../seeds/rigs/heron';
+import { KETTLE } from '../../../seeds/rigs/kettle';
+import { WREN } from '../../../seeds/rigs/wren';
 import { eyewearNeed, statedDensity, unmetLine } from './eyewear-need';
+import { derivedFigure, rigDerived } from './rig-derived';
+
+const SETTINGS = { discharged_below_V: 50, ambient_bar_abs: 0.966, ambient_C: 21 };
 
 describe('eyewear that a rig asks for', () => {
-  it('is not guessed where the beam is not known', () => {
-    expect(eyewearNeed(testSpec)).toMatchObject({
-      type: 'not-known',
-      words: 'Not known: the rig’s numbers lack pulse length, beam width, beam height.',
-    });
+  it('is the figure that the rig’s own screen shows', () => {
+    for (const { spec } of [HERON, KETTLE, WREN]) {
+      const derived = derivedFigure(rigDerived(spec, SETTINGS, { transient: false }), 'eyewear');
+      const need = eyewearNeed(spec);
+      expect(need.type === 'known' && need.lines[0]?.density).toBe(
+        derived.figure.ok && derived.figure.value.value,
+      );
+    }
   });
 
-  // By hand: 5600 t^(1/4) J/m2 (thermal limit from 315 to 400 nm, from memory) is 47.1 J/m2 at 5 ns. 150 uJ over 8 mm2 is
-  // 18.8 J/m2, under it; over the 1 mm aperture it is 191 J/m2, a factor of 4.06 and a density of 0.61.
-  it.each([
-    [2, 4, 0],
-    [0.5, 1, 0.7],
-  ])('of a beam of %d by %d mm is a density of %d, rounded up to tenths', (width_mm, height_mm, density) => {
-    const beam = { ...testSpec.beam, pulse_ns: 5, width_mm, height_mm };
-    expect(eyewearNeed({ ...testSpec, beam })).toMatchObject({
+  it('counts what the rig may emit where it is more than what was declared, and says so', () => {
+    const faint = { ...KETTLE.spec, beam: { ...KETTLE.spec.beam, pulse_energy_uJ: 1 } };
+    const need = eyewearNeed(faint);
+    expect(need).toMatchObject({
       type: 'known',
-      lines: [{ wavelength_nm: 337.1, density }],
+      assumed: expect.arrayContaining(['pulse energy, a thousandth of what the rig stores']) as string[],
     });
+    expect(need.type === 'known' && need.lines[0]?.density).toBeGreaterThan(1);
+  });
+
+  it('is not guessed at a wavelength without a limit', () => {
+    const deep = { ...KETTLE.spec, beam: { ...KETTLE.spec.beam, wavelength_nm: 193 } };
+    expect(eyewearNeed(deep)).toMatchObject({ type: 'not-known' });
   });
 });
 

@@ -6,7 +6,7 @@ import type { LabSettings, RigSpec } from '../../domain/book/rig-spec';
 import type { RigTransient } from '../../domain/rules/rig-circuit';
 import { breakChart } from './break-chart';
 import { DerivedRows } from './derived-rows';
-import { derivedRows } from './derived-view';
+import { derivedRows } from '../../domain/report/derived-rows';
 import { GainBars } from './gain-bars';
 import type { RigDerivedView } from './use-rig-derived';
 import { WaitList } from './wait-list';

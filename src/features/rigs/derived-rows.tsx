@@ -2,7 +2,7 @@ import { useState } from 'react';
 import { Caution } from '../../components/caution';
 import { FieldRow } from '../../components/field-row';
 import type { CapacitorSpec, RigSpec } from '../../domain/book/rig-spec';
-import type { DerivedRow } from './derived-view';
+import type { DerivedRow } from '../../domain/report/derived-rows';
 
 interface DerivedRowsProps {
   readonly rows: readonly DerivedRow[];

@@ -4,7 +4,8 @@ import { circuitAnswer } from '../../domain/circuit/circuit-answer';
 import { rigDerived } from '../../domain/rules/rig-derived';
 import { WAVE_POINTS } from '../../domain/rules/rig-circuit';
 import { breakChart } from './break-chart';
-import { circuitToSolve, derivedOf, derivedRows, transientOf, withTransient } from './derived-view';
+import { derivedRows } from '../../domain/report/derived-rows';
+import { circuitToSolve, derivedOf, transientOf, withTransient } from './derived-view';
 import { HERON, KETTLE } from './rigs.fixture';
 import { waveChart } from './wave-chart';
 

@@ -6,7 +6,7 @@ import { CAPACITOR_WORDS, TOPOLOGY_WORDS } from '../../domain/report/words';
 import { formatQuantity } from '../../domain/units/format-quantity';
 import { circuitPlan, type CircuitPlan, type Plates } from './circuit-plan';
 import { coilPath, facesOf, ringPlaces, type RingPlace } from './circuit-shapes';
-import { derivedRows } from './derived-view';
+import { derivedRows } from '../../domain/report/derived-rows';
 
 interface Props {
   readonly name: string;

@@ -11,7 +11,7 @@ import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import type { RigDerived } from '../../domain/rules/rig-derived';
 import { DerivedRows } from './derived-rows';
-import { derivedRows } from './derived-view';
+import { derivedRows } from '../../domain/report/derived-rows';
 import { RigFigure } from './rig-figure';
 import { useRigDerived } from './use-rig-derived';
 import { secondsText } from './wait-list';

@@ -6,7 +6,7 @@ import { ThumbZone } from '../../../components/thumb-zone';
 import { latestRevision } from '../../../domain/book/documents/rig';
 import { DerivedBlock, Hazard, Wave } from '../derived-block';
 import { DerivedRows } from '../derived-rows';
-import { derivedRows } from '../derived-view';
+import { derivedRows } from '../../../domain/report/derived-rows';
 import type { DerivedKey } from '../../../domain/rules/rig-derived';
 import { RigCircuit } from '../rig-circuit';
 import { useRigDerived, type RigDerivedView } from '../use-rig-derived';
@@ -37,7 +37,7 @@ export function EditScreen({ edit }: { readonly edit: RigEdit }) {
   const top = useFromTop(edit.typing ? `keypad ${edit.field?.key ?? ''}` : edit.view);
   // On a phone the keypad needs the thumb zone's place.
   return (
-    <Screen fields={fields} {...(edit.typing ? {} : { thumbs: <EditThumbs edit={edit} /> })}>
+    <Screen fields={fields} {...(edit.typing ? {} : { thumbs: <EditThumbs key={edit.view} edit={edit} /> })}>
       <div ref={top} className="edit-top">
         {edit.typing ? <EditKeypad edit={edit} /> : <EditFigure edit={edit} view={view} />}
       </div>
@@ -157,6 +157,7 @@ function Derived({ edit, view }: { readonly edit: RigEdit; readonly view: RigDer
   );
 }
 
+// Keyed by the view where it is used: a thumb that lets go must not press the dome that has come under it.
 function EditThumbs({ edit }: { readonly edit: RigEdit }) {
   const { view, hindrance, rig, next, draft } = edit;
   const all =
