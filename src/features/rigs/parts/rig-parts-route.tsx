@@ -32,7 +32,7 @@ export function RigPartsRoute() {
 function Parts({ rig }: { readonly rig: RigDoc }) {
   const parts = useRigParts(rig);
   return (
-    <Screen thumbs={<PartThumbs parts={parts} />} fields={<span />}>
+    <Screen thumbs={<PartThumbs key={parts.view} parts={parts} />} fields={<span />}>
       <div className="rig-page">
         <div className="rig-head">
           <h1>Parts of {rig.name}</h1>
@@ -46,6 +46,7 @@ function Parts({ rig }: { readonly rig: RigDoc }) {
   );
 }
 
+// Keyed by the view where it is used: a thumb that lets go after a hold must not press the dome that has come under it.
 function PartThumbs({ parts }: { readonly parts: RigParts }) {
   const navigate = useNavigate();
   const may = useMay();
