@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { formatFigure, type Rounding } from '../../domain/units/format-quantity';
 import { Table, type Column } from '../table';
 import { cursorStops, labelledCurves, valuesAt } from './chart-paths';
@@ -13,7 +14,8 @@ export interface ChartTableProps {
 const MOST_ROWS = 40;
 
 /** The chart's figures. The low side is rounded down and the high side up, as everywhere. */
-export function ChartTable({ title, data, words }: ChartTableProps) {
+export const ChartTable = memo(function ChartTable({ title, data: whole, words }: ChartTableProps) {
+  const data = upToWall(whole);
   const stops = cursorStops(data);
   const every = Math.max(1, Math.ceil(stops.length / MOST_ROWS));
   const shown = stops.filter((_, i) => i % every === 0 || i === stops.length - 1);
@@ -67,7 +69,7 @@ export function ChartTable({ title, data, words }: ChartTableProps) {
       )}
     </>
   );
-}
+});
 
 /** A row of an envelope stands for all of its points up to the next row. */
 function withExtremes({ band }: ChartData, row: CursorValues, until: number): CursorValues {
@@ -79,6 +81,12 @@ function withExtremes({ band }: ChartData, row: CursorValues, until: number): Cu
     low: Math.min(...inside.map((point) => point.low)),
     high: Math.max(...inside.map((point) => point.high)),
   };
+}
+
+/** Nothing is said of what lies beyond a wall. */
+function upToWall(data: ChartData): ChartData {
+  if (data.wall === undefined) return data;
+  return { ...data, x: { ...data.x, max: Math.min(data.x.max, data.wall.from) } };
 }
 
 function readingColumns(

@@ -1,4 +1,4 @@
-import { useRef, useState } from 'react';
+import { useDeferredValue, useMemo, useRef, useState } from 'react';
 import { useSize } from '../use-size';
 import { ChartAxes } from './chart-axes';
 import { ChartCursor, plainWords } from './chart-cursor';
@@ -50,6 +50,8 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
   // Nothing is drawn beyond a wall, so the axis ends there.
   const x = data.wall === undefined ? data.x : { ...data.x, max: Math.min(data.x.max, data.wall.from) };
   const walled: ChartData = { ...data, x };
+  // The table is read, not watched: while a thumb slides, the drawing goes first.
+  const tabled = useDeferredValue(useMemo(() => ({ title, data, words }), [title, data, words]));
   const plot: Plot = {
     ...layout,
     x: scaleOf(x, layout.left, layout.right),
@@ -112,7 +114,7 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
         ) : null}
       </div>
       <div className={asTable ? 'chart-table' : 'heard-only'}>
-        <ChartTable title={title} data={walled} words={words} />
+        <ChartTable {...tabled} />
       </div>
       <button
         type="button"

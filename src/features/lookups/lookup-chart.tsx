@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { Chart } from '../../components/chart/chart';
 import type { ChartData, ChartWords, Slice, SliceFace } from '../../components/chart/types';
 import { figureLine } from '../../domain/lookup/figure-text';
@@ -5,15 +6,10 @@ import type { Figure, LookupAnswer, Plot } from '../../domain/lookup/lookup';
 
 /** The curve beside the answer, with the answer as its slice where the answer is an interval. */
 export function LookupChart({ answer, plot, lean }: Props) {
+  const data = useMemo(() => chartData(plot), [plot]);
+  const words = useMemo(() => wordsOf(answer), [answer]);
   const slice = sliceOf(answer, lean);
-  return (
-    <Chart
-      title={plot.title}
-      data={chartData(plot)}
-      words={wordsOf(answer)}
-      {...(slice === null ? {} : { slice })}
-    />
-  );
+  return <Chart title={plot.title} data={data} words={words} {...(slice === null ? {} : { slice })} />;
 }
 
 interface Props {
