@@ -1,17 +1,24 @@
 import { benchCircuit } from './bench-circuit';
 import { benchGap } from './bench-gap';
+import { benchLookups } from './bench-lookups';
 
-const BENCHES: Readonly<Record<string, () => void>> = { circuit: benchCircuit, gap: benchGap };
+const BENCHES: Readonly<Record<string, () => void | Promise<void>>> = {
+  circuit: benchCircuit,
+  gap: benchGap,
+  lookups: benchLookups,
+};
 
-function main(args: readonly string[]): number {
+async function main(args: readonly string[]): Promise<number> {
   const [name, ...rest] = args;
   const bench = name !== undefined && Object.hasOwn(BENCHES, name) ? BENCHES[name] : undefined;
   if (bench === undefined || rest.length > 0) {
     process.stderr.write(`usage: npm run bench -- ${Object.keys(BENCHES).join(' | ')}\n`);
     return 2;
   }
-  bench();
+  await bench();
   return 0;
 }
 
-process.exitCode = main(process.argv.slice(2));
+void main(process.argv.slice(2)).then((code) => {
+  process.exitCode = code;
+});
