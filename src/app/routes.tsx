@@ -39,6 +39,12 @@ const FiringRoute = lazy(() =>
 const TracesRoute = lazy(() =>
   import('../features/traces/traces-route').then((m) => ({ default: m.TracesRoute })),
 );
+const CalibrationRoute = lazy(() =>
+  import('../features/firings/calibration-route').then((m) => ({ default: m.CalibrationRoute })),
+);
+const CompareRoute = lazy(() =>
+  import('../features/firings/compare-route').then((m) => ({ default: m.CompareRoute })),
+);
 const RigsRoute = lazy(() => import('../features/rigs/rigs-route').then((m) => ({ default: m.RigsRoute })));
 const RigRoute = lazy(() => import('../features/rigs/rig-route').then((m) => ({ default: m.RigRoute })));
 const ReviseRigRoute = lazy(() =>
@@ -103,6 +109,8 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.check, screen: CheckRoute, area: 'Checks', open: true },
   { path: patterns.openFiring, screen: OpenFiringRoute, area: 'Firings' },
   { path: patterns.firings, screen: FiringsRoute, area: 'Firings' },
+  { path: patterns.calibration, screen: CalibrationRoute, area: 'Firings' },
+  { path: patterns.compareFirings, screen: CompareRoute, area: 'Firings' },
   { path: patterns.firing, screen: FiringRoute, area: 'Firings' },
   { path: patterns.traces, screen: TracesRoute, area: 'Firings' },
   { path: patterns.rigs, screen: RigsRoute, area: 'Rigs' },

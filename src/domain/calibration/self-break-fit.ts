@@ -34,6 +34,8 @@ export interface SelfBreakFit extends Basis {
   /** Gaps and pressures among the readings that were used. */
   readonly read: SettingRange;
   readonly freedom: number;
+  /** Relative, of the readings that were kept, in their order. */
+  readonly residuals: readonly number[];
   readonly outliers: readonly Outlier[];
   readonly drift: Drift;
   /** The fitted numbers as answers, intervals at 95 % as their bands. */
@@ -127,7 +129,7 @@ interface Finished {
 }
 
 function finish({ rig, kept, fitted, outliers }: Finished): SelfBreakFit {
-  const { residuals, ...numbers } = fitted;
+  const { residuals } = fitted;
   const drift = testDrift(kept.map(({ shot }, index) => ({ shot, residual: residuals[index] ?? 0 })));
   const warnings: Warning[] = [];
   if (fitted.type === 'scale-alone') {
@@ -144,7 +146,7 @@ function finish({ rig, kept, fitted, outliers }: Finished): SelfBreakFit {
     pressure_bar_abs: rangeOf(kept.map(({ pressure_bar_abs }) => pressure_bar_abs)),
   };
   return {
-    ...numbers,
+    ...fitted,
     rig,
     used: kept.length,
     read,

@@ -166,5 +166,9 @@ function pointOf({ firing, reading, values, spec }: Found, shot: number): Calibr
 }
 
 function keyOf(gap: RigGap): string {
-  return JSON.stringify([gap.gas, gap.irradiated, Object.entries(gap.electrodes).sort()]);
+  return JSON.stringify([
+    gap.gas,
+    gap.irradiated,
+    Object.entries(gap.electrodes).toSorted(([a], [b]) => a.localeCompare(b)),
+  ]);
 }

@@ -1,24 +1,27 @@
 import { useMemo, useState } from 'react';
-import { useNavigate } from 'react-router-dom';
+import { Link, useNavigate } from 'react-router-dom';
 import { Chart } from '../../components/chart/chart';
 import { Screen } from '../../components/frame';
 import { SaysBlock } from '../../components/says-block';
 import { ThumbDome } from '../../components/thumb-dome';
 import { ThumbZone } from '../../components/thumb-zone';
 import { paths } from '../../config/paths';
-import { useEntryState, usePeople } from '../../data/use-book';
+import { useEntryState, useFirings, usePeople } from '../../data/use-book';
 import { standingReview } from '../../domain/book/documents/firing';
 import type { ReadingDoc } from '../../domain/book/documents/reading';
+import type { RigCalibration } from '../../domain/rules/rig-calibration';
 import { momentWords } from '../../domain/report/time-words';
 import { CorrectDialog } from './correct-dialog';
 import { FIRING_CHART_WORDS, firingChart } from './firing-chart';
 import { limitWords, permitWords, ShotsTotal } from './firing-head';
 import { firingFlags, firingStateWords, nameIn } from './firing-state';
+import { FiringSummary } from './firing-summary-view';
 import { FiringLinks } from './firing-links';
 import { FitSays } from './fit-says';
 import { fitOf, sigmasOf } from './reading-fit';
 import { firstBase, nextBase } from './reading-form';
 import { ReadingsTable } from './readings-table';
+import { useCalibrationBefore } from './use-rig-calibration';
 import type { FiringFacts } from './use-firing-facts';
 
 interface ClosedFiringProps {
@@ -36,9 +39,10 @@ export function ClosedFiring({ facts, mayCorrect }: ClosedFiringProps) {
   const [most, setMost] = useState(FIRST_ROWS);
   const navigate = useNavigate();
   const shown = picked ?? rows.at(-1)?.reading;
+  const own = useCalibrationBefore(facts.rig, firing);
   const fit = useMemo(
-    () => (shown === undefined ? null : fitOf(revision.spec, rows, shown.id)),
-    [revision.spec, rows, shown],
+    () => (shown === undefined ? null : fitOf({ spec: revision.spec, own }, rows, shown.id)),
+    [revision.spec, own, rows, shown],
   );
   return (
     <Screen
@@ -58,6 +62,8 @@ export function ClosedFiring({ facts, mayCorrect }: ClosedFiringProps) {
       <div className="firing-figure">
         <ClosedHead facts={facts} />
         {shown === undefined || fit === null ? null : <FitSays no={shown.no} fit={fit} />}
+        <FiringSummary facts={facts} />
+        <CompareLink facts={facts} />
         <div className="firing-past">
           <div className="firing-table">
             {readings.length === 0 && !facts.loading ? (
@@ -83,7 +89,7 @@ export function ClosedFiring({ facts, mayCorrect }: ClosedFiringProps) {
               </button>
             ) : null}
           </div>
-          <ClosedChart facts={facts} />
+          <ClosedChart facts={facts} own={own} />
         </div>
       </div>
       {picked === null || !mayCorrect ? null : (
@@ -96,6 +102,20 @@ export function ClosedFiring({ facts, mayCorrect }: ClosedFiringProps) {
         />
       )}
     </Screen>
+  );
+}
+
+/** To the firing before it on the same rig, or the one after the first. */
+function CompareLink({ facts }: { readonly facts: FiringFacts }) {
+  const { firing } = facts;
+  const firings = useFirings(firing.parent);
+  const at = firings.findIndex((one) => one.id === firing.id);
+  const other = firings[at + 1] ?? firings[at - 1];
+  if (at < 0 || other === undefined) return null;
+  return (
+    <Link className="firing-more" to={paths.compareFirings(firing.id, other.id)}>
+      Compare with {other.number}
+    </Link>
   );
 }
 
@@ -147,7 +167,12 @@ function ClosedHead({ facts }: { readonly facts: FiringFacts }) {
   );
 }
 
-function ClosedChart({ facts }: { readonly facts: FiringFacts }) {
+interface ClosedChartProps {
+  readonly facts: FiringFacts;
+  readonly own: RigCalibration | null;
+}
+
+function ClosedChart({ facts, own }: ClosedChartProps) {
   const { revision, rows, settings, firing } = facts;
   const chart = useMemo(() => {
     const last = rows.at(-1)?.values;
@@ -156,9 +181,10 @@ function ClosedChart({ facts }: { readonly facts: FiringFacts }) {
       spec: revision.spec,
       values: base.values,
       rows,
-      sigmas: sigmasOf(revision.spec, rows),
+      sigmas: sigmasOf({ spec: revision.spec, own }, rows),
+      own,
     });
-  }, [revision, rows, settings]);
+  }, [revision, rows, settings, own]);
   if (chart === null) return null;
   return (
     <div className="firing-chart">

@@ -7,13 +7,15 @@ import { EMPTY_DRAFT, enter, firstBase, formValues } from './reading-form';
 const base = firstBase(SPEC, '7A', SETTINGS);
 const values = formValues(base, EMPTY_DRAFT);
 
+const LAW_ALONE = { spec: SPEC, own: null };
+
 describe('the chart of a firing', () => {
   const rows = standingRows([
     readingDoc(1),
     readingDoc(2, { voltage_kV: 14 }),
     readingDoc(3, { how: 'held' }),
   ]);
-  const chart = firingChart({ spec: SPEC, values, rows, sigmas: sigmasOf(SPEC, rows) });
+  const chart = firingChart({ spec: SPEC, values, rows, sigmas: sigmasOf(LAW_ALONE, rows) });
 
   it('draws self-breaks alone and rings the one out of family', () => {
     expect(chart?.readings?.map((dot) => [dot.number, dot.odd])).toEqual([

@@ -3,6 +3,7 @@ import type { RigSpec } from '../../domain/book/rig-spec';
 import { gapCurve, type GapCurvePoint } from '../../domain/gap/gap-curve';
 import { reachableVoltage } from '../../domain/charging/supply-reach';
 import { chargingOf } from '../../domain/rules/rig-figures';
+import { ownFor, type RigCalibration } from '../../domain/rules/rig-calibration';
 import { gapSetupOf } from '../../domain/rules/rig-gap';
 import type { FormValues } from './reading-form';
 import { isSelfBreak, type StandingRow } from './reading-fit';
@@ -18,6 +19,8 @@ export interface FiringChartInput {
   readonly values: ChartedValues;
   readonly rows: readonly StandingRow[];
   readonly sigmas: ReadonlyMap<string, number>;
+  /** The rig's own curve, drawn over the law where it was measured. */
+  readonly own?: RigCalibration | null;
 }
 
 export const FIRING_CHART_WORDS: ChartWords = {
@@ -42,7 +45,7 @@ const ODD_SIGMA = 3;
  * The law between its two solid sides over gauge pressure at the ambient of the form, the self-breaks of this firing and
  * the working point. Null where the law has no answer; the words for that stand with the reading.
  */
-export function firingChart({ spec, values, rows, sigmas }: FiringChartInput): ChartData | null {
+export function firingChart({ spec, values, rows, sigmas, own = null }: FiringChartInput): ChartData | null {
   const { ambient_bar_abs, temperature_C, gas, pressure_bar_g } = values;
   if (ambient_bar_abs === null || temperature_C === null) return null;
   const selfBreaks = rows.filter((row) => isSelfBreak(row.values));
@@ -78,11 +81,37 @@ export function firingChart({ spec, values, rows, sigmas }: FiringChartInput): C
     y: { ...y, unit: 'kV', decimals: 1 },
     band: { points, above: 'breaks', below: 'holds' },
     law: points.map((point) => ({ x: point.x, y: point.law })),
+    ...ownCurve({ spec, values, own, gauge }),
     readings: selfBreaks.map((row) => dot(row, sigmas)),
     ...workingPoint(values, curve.value[gauge.length]),
     ...limitOf(spec, y.max),
     ...(last.x < x.max - 1e-9 ? { notValid: { from: last.x, label: 'not valid here' } } : {}),
   };
+}
+
+interface OwnInput {
+  readonly spec: RigSpec;
+  readonly values: ChartedValues;
+  readonly own: RigCalibration | null;
+  readonly gauge: readonly number[];
+}
+
+/** Over the pressures that were read and no further: beyond them nobody has measured this gap. */
+function ownCurve({ spec, values, own, gauge }: OwnInput): Pick<ChartData, 'own'> {
+  const { ambient_bar_abs, temperature_C, gas } = values;
+  if (own === null || ambient_bar_abs === null || temperature_C === null) return {};
+  const [from, to] = own.fit.read.pressure_bar_abs;
+  const inside = [
+    from,
+    ...gauge.map((bar_g) => bar_g + ambient_bar_abs).filter((p) => p > from && p < to),
+    to,
+  ];
+  const points = inside.flatMap((pressure_bar_abs) => {
+    const pressure_bar_g = pressure_bar_abs - ambient_bar_abs;
+    const at = ownFor(own.fit, spec, { gas, pressure_bar_g, ambient_bar_abs, temperature_C });
+    return at === undefined || at.extrapolated ? [] : [{ x: pressure_bar_g, y: at.expected_kV }];
+  });
+  return points.length < 2 ? {} : { own: { points, label: 'own' } };
 }
 
 /** Where the form stands: between its two limits, with its voltage once there is one. */

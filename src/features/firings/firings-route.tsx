@@ -49,6 +49,9 @@ export function FiringsRoute() {
     >
       <div className="firing-figure">
         <h1 className="firing-title">Firings{rig === undefined ? '' : ` of ${rig.name}`}</h1>
+        <Link className="firing-more" to={paths.calibration(id)}>
+          Own curve, from measured self-breaks
+        </Link>
         {firings.length === 0 ? (
           <SaysBlock lead="No firing yet.">
             Open one: readiness says what is missing before the first shot.

@@ -21,12 +21,13 @@ export function FitSays({ no, fit }: FitSaysProps) {
       </SaysBlock>
     );
   }
-  const { sigma, words, causes } = fit.value;
+  const { sigma, words, causes, against } = fit.value;
+  const what = against === 'own' ? 'its own curve' : 'the law';
   const [lead = '', rest] = words.split(/(?<=:) /);
   const named = `Reading ${no} ${lead.charAt(0).toLowerCase()}${lead.slice(1)}`;
   return (
     <div className="firing-fit" aria-label={`Reading ${no} against the law`} role="group">
-      {sigma === null ? null : <SigmaScale sigma={sigma} label={sigmaWords(sigma)} />}
+      {sigma === null ? null : <SigmaScale sigma={sigma} label={sigmaWords(sigma, what)} />}
       <div>
         {rest === undefined ? (
           <SaysBlock lead={`Reading ${no}:`}>{words}</SaysBlock>
@@ -50,7 +51,7 @@ export function FitSays({ no, fit }: FitSaysProps) {
   );
 }
 
-function sigmaWords(sigma: number): string {
+function sigmaWords(sigma: number, what: string): string {
   const size = formatFigure(Math.abs(sigma), { digits: { decimals: 1 }, rounding: 'nearest' });
-  return `${size} σ ${sigma < 0 ? 'below' : 'above'} the law`;
+  return `${size} σ ${sigma < 0 ? 'below' : 'above'} ${what}`;
 }

@@ -10,6 +10,7 @@ import { useDraft } from '../../data/use-draft';
 import { useResume } from '../../data/use-resume';
 import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import type { ReadingDoc } from '../../domain/book/documents/reading';
+import type { RigCalibration } from '../../domain/rules/rig-calibration';
 import { beyondEnvelope } from './beyond-envelope';
 import type { BurstView } from './burst';
 import { CorrectDialog } from './correct-dialog';
@@ -28,6 +29,7 @@ import { useBurst } from './use-burst';
 import type { FiringFacts } from './use-firing-facts';
 import { useFiringLog, type Said } from './use-firing-log';
 import { useFootKey } from './use-foot-key';
+import { useCalibrationBefore } from './use-rig-calibration';
 import { useReadingForm, type ReadingForm } from './use-reading-form';
 
 /** Rows that a hand scrolls through at a bench; the closed firing shows them all. */
@@ -57,6 +59,7 @@ export function OpenFiring({ facts }: { readonly facts: FiringFacts }) {
   });
   const log = useFiringLog({ facts, form, onLogged: noteLogged });
   const [correcting, setCorrecting] = useState<ReadingDoc | null>(null);
+  const own = useCalibrationBefore(facts.rig, firing);
   const burst = useBurst({ firing, form, onSaid: log.say });
   const { foot_key, foot_does } = useDisplay().settings;
   useFootKey({
@@ -105,7 +108,14 @@ export function OpenFiring({ facts }: { readonly facts: FiringFacts }) {
       {isPanelOpen(form) ? (
         <ReadingPanel form={form} />
       ) : (
-        <OpenFigure facts={facts} form={form} said={log.said} burst={burst.view} onPick={setCorrecting} />
+        <OpenFigure
+          facts={facts}
+          form={form}
+          said={log.said}
+          burst={burst.view}
+          own={own}
+          onPick={setCorrecting}
+        />
       )}
       {correcting === null ? null : (
         <CorrectDialog
@@ -125,16 +135,21 @@ interface OpenFigureProps {
   readonly form: ReadingForm;
   readonly said: Said | null;
   readonly burst: BurstView;
+  readonly own: RigCalibration | null;
   readonly onPick: (reading: ReadingDoc) => void;
 }
 
-function OpenFigure({ facts, form, said, burst, onPick }: OpenFigureProps) {
+function OpenFigure({ facts, form, said, burst, own, onPick }: OpenFigureProps) {
   const { revision, rows, readings } = facts;
   const { spec } = revision;
   const { values } = form;
   const last = rows.at(-1)?.reading;
-  const sigmas = useMemo(() => sigmasOf(spec, rows), [spec, rows]);
-  const fit = useMemo(() => (last === undefined ? null : fitOf(spec, rows, last.id)), [spec, rows, last]);
+  const against = useMemo(() => ({ spec, own }), [spec, own]);
+  const sigmas = useMemo(() => sigmasOf(against, rows), [against, rows]);
+  const fit = useMemo(
+    () => (last === undefined ? null : fitOf(against, rows, last.id)),
+    [against, rows, last],
+  );
   // The draft is a new object at every key; the chart hangs on five of its figures only.
   const { voltage_kV, pressure_bar_g, ambient_bar_abs, temperature_C, gas } = values;
   const chart = useMemo(
@@ -144,8 +159,9 @@ function OpenFigure({ facts, form, said, burst, onPick }: OpenFigureProps) {
         values: { voltage_kV, pressure_bar_g, ambient_bar_abs, temperature_C, gas },
         rows,
         sigmas,
+        own,
       }),
-    [spec, voltage_kV, pressure_bar_g, ambient_bar_abs, temperature_C, gas, rows, sigmas],
+    [spec, voltage_kV, pressure_bar_g, ambient_bar_abs, temperature_C, gas, rows, sigmas, own],
   );
   return (
     <div className="firing-figure">

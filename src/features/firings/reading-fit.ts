@@ -2,7 +2,8 @@ import type { ReadingValues } from '../../domain/book/bodies/firing-bodies';
 import { standingReading, type ReadingDoc } from '../../domain/book/documents/reading';
 import type { RigSpec } from '../../domain/book/rig-spec';
 import type { Plausibility } from '../../domain/calibration/plausibility';
-import { readingPlausibility } from '../../domain/rules/reading-plausibility';
+import { ownFor, type RigCalibration } from '../../domain/rules/rig-calibration';
+import { plausibilityAgainst } from '../../domain/rules/reading-plausibility';
 import type { Result } from '../../domain/units/result';
 
 /** A reading that stands, with the values that it has now. */
@@ -19,33 +20,58 @@ export function standingRows(readings: readonly ReadingDoc[]): readonly Standing
   });
 }
 
+/** What readings are held against: the revision that they were taken on, and the rig's own curve once it has one. */
+export interface Against {
+  readonly spec: RigSpec;
+  readonly own: RigCalibration | null;
+}
+
 /** How this reading compares, with the self-breaks logged before it in mind. */
-export function fitOf(spec: RigSpec, rows: readonly StandingRow[], id: string): Result<Plausibility> | null {
+export function fitOf(
+  against: Against,
+  rows: readonly StandingRow[],
+  id: string,
+): Result<Plausibility> | null {
   const at = rows.findIndex((row) => row.reading.id === id);
   const row = rows[at];
   if (row === undefined) return null;
   const before: number[] = [];
   for (let i = at - 1; i >= 0 && before.length < 2; i -= 1) {
-    const sigma = sigmaOf(spec, rows[i]);
+    const sigma = sigmaOf(against, rows[i]);
     if (sigma !== null) before.push(sigma);
   }
-  return readingPlausibility(spec, row.values, before);
+  return compared(against, row.values, before);
 }
 
-/** Deviations by reading id. Readings at the same setting share one law, so a burst of them costs one evaluation. */
-export function sigmasOf(spec: RigSpec, rows: readonly StandingRow[]): ReadonlyMap<string, number> {
-  const laws = new Map<string, Law | null>();
+/** Deviations by reading id. */
+export function sigmasOf(against: Against, rows: readonly StandingRow[]): ReadonlyMap<string, number> {
   const sigmas = new Map<string, number>();
-  for (const { reading, values } of rows) {
+  for (const { row, law } of lawsOf(against, rows))
+    sigmas.set(row.reading.id, (row.values.voltage_kV - law.expected_kV) / law.sigma_kV);
+  return sigmas;
+}
+
+/** What the law expects of each self-break at its own setting, kV, by reading id. */
+export function expectedByLaw(spec: RigSpec, rows: readonly StandingRow[]): ReadonlyMap<string, number> {
+  const laws = lawsOf({ spec, own: null }, rows);
+  return new Map(laws.map(({ row, law }) => [row.reading.id, law.expected_kV]));
+}
+
+/** Readings at the same setting share one law, so a burst of them costs one evaluation. */
+function lawsOf(against: Against, rows: readonly StandingRow[]) {
+  const laws = new Map<string, Law | null>();
+  const found: { readonly row: StandingRow; readonly law: Law }[] = [];
+  for (const row of rows) {
+    const { values } = row;
     if (!isSelfBreak(values)) continue;
     const { gas, pressure_bar_g, ambient_bar_abs, temperature_C } = values;
     const setting = [gas, pressure_bar_g, ambient_bar_abs, temperature_C].join();
     const known = laws.get(setting);
-    const law = known === undefined ? lawOf(spec, values) : known;
+    const law = known === undefined ? lawOf(against, values) : known;
     laws.set(setting, law);
-    if (law !== null) sigmas.set(reading.id, (values.voltage_kV - law.expected_kV) / law.sigma_kV);
+    if (law !== null) found.push({ row, law });
   }
-  return sigmas;
+  return found;
 }
 
 export function isSelfBreak(values: ReadingValues): boolean {
@@ -54,13 +80,21 @@ export function isSelfBreak(values: ReadingValues): boolean {
 
 type Law = Pick<Plausibility, 'expected_kV' | 'sigma_kV'>;
 
-function lawOf(spec: RigSpec, values: ReadingValues): Law | null {
-  const fit = readingPlausibility(spec, values, []);
+function lawOf(against: Against, values: ReadingValues): Law | null {
+  const fit = compared(against, values, []);
   return fit.ok ? fit.value : null;
 }
 
-function sigmaOf(spec: RigSpec, row: StandingRow | undefined): number | null {
+function sigmaOf(against: Against, row: StandingRow | undefined): number | null {
   if (row === undefined || !isSelfBreak(row.values)) return null;
-  const fit = readingPlausibility(spec, row.values, []);
+  const fit = compared(against, row.values, []);
   return fit.ok ? fit.value.sigma : null;
+}
+
+function compared(
+  { spec, own }: Against,
+  values: ReadingValues,
+  before: readonly number[],
+): Result<Plausibility> {
+  return plausibilityAgainst(spec, values, { before, own: ownFor(own?.fit ?? null, spec, values) });
 }

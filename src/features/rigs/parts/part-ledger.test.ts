@@ -4,7 +4,7 @@ import type { PartDoc } from '../../../domain/book/documents/part';
 import type { RigDoc } from '../../../domain/book/documents/rig';
 import { HERON_RIG, KETTLE } from '../rigs.fixture';
 import { EMPTY_FIT, fitOf } from './fit-form';
-import { partLedger, remainingWords, shotsText, usedWords } from './part-ledger';
+import { partLedger, remainingWords, shotsText, usedWords } from '../../../domain/rules/part-ledger';
 
 const [revision] = HERON_RIG.revisions;
 if (revision === undefined) throw new Error('Heron has a revision');

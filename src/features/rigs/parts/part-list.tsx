@@ -5,7 +5,7 @@ import { useNames } from '../../../data/use-names';
 import { latestRevision } from '../../../domain/book/documents/rig';
 import { momentWords } from '../../../domain/report/time-words';
 import { formatFigure } from '../../../domain/units/format-quantity';
-import { remainingWords, shotsText, usedWords, type PartLedger } from './part-ledger';
+import { remainingWords, shotsText, usedWords, type PartLedger } from '../../../domain/rules/part-ledger';
 import { placeWords } from './part-words';
 import type { RigParts } from './use-rig-parts';
 

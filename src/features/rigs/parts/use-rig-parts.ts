@@ -5,7 +5,7 @@ import { useFirings, useParts } from '../../../data/use-book';
 import { useDraft } from '../../../data/use-draft';
 import type { RigDoc } from '../../../domain/book/documents/rig';
 import { EMPTY_FIT, fitOf, type FitDraft } from './fit-form';
-import { partLedger } from './part-ledger';
+import { partLedger } from '../../../domain/rules/part-ledger';
 
 const EMPTY_RETIRE: { readonly why: string } = { why: '' };
 

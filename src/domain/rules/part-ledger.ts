@@ -1,13 +1,13 @@
-import type { FiringDoc } from '../../../domain/book/documents/firing';
-import type { PartDoc } from '../../../domain/book/documents/part';
-import { latestRevision, revisionById, type RigDoc } from '../../../domain/book/documents/rig';
-import type { RigSpec } from '../../../domain/book/rig-spec';
-import { plyThickness_m } from '../../../domain/capacitor/capacitance';
-import { dielectricStress } from '../../../domain/capacitor/stress';
-import { firingsEndured, partLife, type PartLife } from '../../../domain/rules/part-life';
-import { formatFigure } from '../../../domain/units/format-quantity';
-import { partWear, type EnduredShots, type PartWear } from '../../../domain/wear/part-wear';
-import type { LifeLaw } from '../../../domain/capacitor/life';
+import type { FiringDoc } from '../book/documents/firing';
+import type { PartDoc } from '../book/documents/part';
+import { latestRevision, revisionById, type RigDoc } from '../book/documents/rig';
+import type { RigSpec } from '../book/rig-spec';
+import { plyThickness_m } from '../capacitor/capacitance';
+import { dielectricStress } from '../capacitor/stress';
+import { firingsEndured, partLife, type PartLife } from './part-life';
+import { formatFigure } from '../units/format-quantity';
+import { partWear, type EnduredShots, type PartWear } from '../wear/part-wear';
+import type { LifeLaw } from '../capacitor/life';
 
 /** What a part has endured, and how much of its life that is reckoned to be. */
 export interface PartLedger {
