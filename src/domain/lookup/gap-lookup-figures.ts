@@ -1,13 +1,13 @@
+import { BREAK_DIGITS, breakText } from '../gap/break-text';
 import type { GapInput } from '../gap/gap-input';
 import type { GapAnswer } from '../gap/self-break';
 import type { WorkingPoint } from '../gap/working-point';
-import { formatFigure } from '../units/format-quantity';
 import type { Figure } from './lookup';
 
-const KV = { unit: 'kV', digits: 3, decimals: 1 } as const;
+const KV = { unit: 'kV', digits: BREAK_DIGITS } as const;
 
 export function gapFigures(gap: GapAnswer, input: GapInput): readonly Figure[] {
-  const stand = formatFigure(gap.stand_at_most_kV, { digits: { decimals: 1 }, rounding: 'down' });
+  const stand = breakText(gap.stand_at_most_kV, 'down');
   return [
     {
       ...KV,

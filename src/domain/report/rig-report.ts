@@ -1,7 +1,7 @@
+import { breakText } from '../gap/break-text';
 import { latestRevision, type RigDoc } from '../book/documents/rig';
 import type { LabSettings } from '../book/rig-spec';
 import { rigDerived } from '../rules/rig-derived';
-import { formatFigure } from '../units/format-quantity';
 import { derivedRows, type DerivedRow } from './derived-rows';
 
 /** A rig on paper: its figures with the digits of the screens, and the two sides of its gap. */
@@ -27,9 +27,9 @@ export function rigReport(rig: RigDoc, settings: LabSettings): RigReport {
   const { selfBreak, at } = derived;
   const sides = selfBreak.ok
     ? {
-        low: oneDecimal(selfBreak.value.low_kV, 'down'),
-        law: oneDecimal(selfBreak.value.law_kV, 'nearest'),
-        high: oneDecimal(selfBreak.value.high_kV, 'up'),
+        low: breakText(selfBreak.value.low_kV, 'down'),
+        law: breakText(selfBreak.value.law_kV, 'nearest'),
+        high: breakText(selfBreak.value.high_kV, 'up'),
         refusal: null,
       }
     : { low: null, law: null, high: null, refusal: selfBreak.refusal.words };
@@ -40,8 +40,4 @@ export function rigReport(rig: RigDoc, settings: LabSettings): RigReport {
     rows: derivedRows(derived),
     gap: { at_bar_g: at.pressure_bar_g, ...sides },
   };
-}
-
-function oneDecimal(kV: number, rounding: 'down' | 'nearest' | 'up'): string {
-  return formatFigure(kV, { digits: { decimals: 1 }, rounding });
 }

@@ -3,6 +3,7 @@ import { TwoFaces } from '../../components/two-faces';
 import { paths } from '../../config/paths';
 import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
+import { breakText } from '../../domain/gap/break-text';
 import { selfBreak } from '../../domain/gap/self-break';
 import { storedAt_J } from '../../domain/rules/rig-figures';
 import { gapInputOf } from '../../domain/rules/rig-gap';
@@ -24,9 +25,9 @@ export function GapPin({ rig, revision, settings }: AtWorkingPoint & { readonly 
       {answer.ok ? (
         <TwoFaces
           label={`Gap at ${at}`}
-          low={one(answer.value.low_kV, 'down')}
-          middle={one(answer.value.law_kV, 'nearest')}
-          high={one(answer.value.high_kV, 'up')}
+          low={breakText(answer.value.low_kV, 'down')}
+          middle={breakText(answer.value.law_kV, 'nearest')}
+          high={breakText(answer.value.high_kV, 'up')}
           unit="kV"
         />
       ) : (
@@ -44,7 +45,7 @@ export function WorkingEnergy({ revision, settings }: AtWorkingPoint) {
   if (!stored.ok) return null;
   return (
     <span className="muted nowrap">
-      {energyFigure(stored.value)} J at {one(answer.value.law_kV, 'nearest')} kV
+      {energyFigure(stored.value)} J at {breakText(answer.value.law_kV, 'nearest')} kV
     </span>
   );
 }
@@ -54,8 +55,4 @@ function atWorkingPoint({ spec }: RigRevision, settings: LabSettings) {
   const { ambient_bar_abs, ambient_C } = settings;
   const answer = selfBreak(gapInputOf(spec, { pressure_bar_g, ambient_bar_abs, temperature_C: ambient_C }));
   return { pressure_bar_g, answer };
-}
-
-function one(value: number, rounding: 'up' | 'down' | 'nearest'): string {
-  return formatFigure(value, { digits: { decimals: 1 }, rounding });
 }

@@ -1,12 +1,12 @@
 import { latestRevision, type RigDoc, type RigRevision } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import type { Step } from '../../domain/book/sheet-spec';
+import { breakText } from '../../domain/gap/break-text';
 import { selfBreak } from '../../domain/gap/self-break';
 import { dayWords } from '../../domain/report/time-words';
 import { standingPermit } from '../../domain/rules/readiness';
 import { rigFigures } from '../../domain/rules/rig-figures';
 import { gapInputOf } from '../../domain/rules/rig-gap';
-import { formatFigure } from '../../domain/units/format-quantity';
 import { ok, refused, type Result } from '../../domain/units/result';
 
 export type ComputedStep = Extract<Step, { type: 'computed' }>;
@@ -62,8 +62,8 @@ function selfBreakSides({ revision, settings }: ComputedFacts): Result<Shown> {
       }),
     );
     if (!answer.ok) return answer;
-    const low = formatFigure(answer.value.low_kV, { digits: { decimals: 1 }, rounding: 'down' });
-    const high = formatFigure(answer.value.high_kV, { digits: { decimals: 1 }, rounding: 'up' });
+    const low = breakText(answer.value.low_kV, 'down');
+    const high = breakText(answer.value.high_kV, 'up');
     lines.push(
       `At ${pressure_bar_g}\u2009bar(g): nothing fires below ${low}\u2009kV, may hold up to ${high}\u2009kV.`,
     );

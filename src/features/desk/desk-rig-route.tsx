@@ -7,6 +7,7 @@ import { envelopeWords } from '../../domain/report/permit-words';
 import { momentWords } from '../../domain/report/time-words';
 import { DeskScreen } from './desk-screen';
 import { IncidentSection } from './incident-section';
+import { PaperSection } from './paper-section';
 import { PartingSection } from './parting-section';
 import { PermitSection, WithdrawSection } from './permit-section';
 import { StandDownSection } from './stand-down-section';
@@ -52,6 +53,7 @@ function OpenedRig({ id }: { readonly id: string }) {
           <IncidentSection rig={rig} zone={zone} />
         </div>
       </div>
+      <PaperSection rig={rig.id} />
     </article>
   );
 }
