@@ -36,6 +36,12 @@ const OpenFiringRoute = lazy(() =>
 const FiringRoute = lazy(() =>
   import('../features/firings/firing-route').then((m) => ({ default: m.FiringRoute })),
 );
+const NotesRoute = lazy(() =>
+  import('../features/notes/notes-route').then((m) => ({ default: m.NotesRoute })),
+);
+const AboutNotesRoute = lazy(() =>
+  import('../features/notes/about-notes-route').then((m) => ({ default: m.AboutNotesRoute })),
+);
 const TracesRoute = lazy(() =>
   import('../features/traces/traces-route').then((m) => ({ default: m.TracesRoute })),
 );
@@ -112,6 +118,8 @@ export const ROUTES: readonly AppRoute[] = [
   { path: patterns.calibration, screen: CalibrationRoute, area: 'Firings' },
   { path: patterns.compareFirings, screen: CompareRoute, area: 'Firings' },
   { path: patterns.firing, screen: FiringRoute, area: 'Firings' },
+  { path: patterns.notes, screen: NotesRoute, area: 'Notes' },
+  { path: patterns.notesOf, screen: AboutNotesRoute, area: 'Notes' },
   { path: patterns.traces, screen: TracesRoute, area: 'Firings' },
   { path: patterns.rigs, screen: RigsRoute, area: 'Rigs' },
   { path: patterns.newRig, screen: NewRigRoute, area: 'Rigs' },

@@ -1,4 +1,5 @@
 import { useMemo, useSyncExternalStore } from 'react';
+import type { About } from '../domain/book/bodies/note-bodies';
 import type { AlignmentDoc } from '../domain/book/documents/alignment';
 import type { CheckDoc } from '../domain/book/documents/check';
 import type { DocKind, DocOf } from '../domain/book/documents/document';
@@ -146,6 +147,11 @@ export function useNotes(about: string): Attached {
     }),
     [notes, photos, traces],
   );
+}
+
+/** What a note, photo or trace is about. */
+export function useAbout({ type, id }: About): DocOf<About['type']> | undefined {
+  return useDoc(type, id);
 }
 
 export function usePerson(id: string | null): PersonDoc | undefined {

@@ -7,6 +7,7 @@ export function BenchRooms({ rig }: { readonly rig: string }) {
     <nav className="bench-rooms" aria-label="Behind the bench">
       <Link to={paths.people(rig)}>Hands and guests</Link>
       <Link to={paths.alignment(rig)}>Alignment</Link>
+      <Link to={paths.notes()}>Notes</Link>
       <Link to={paths.desk()}>Desk</Link>
       <Link to={paths.crew()}>Crew</Link>
       <Link to={paths.handover()}>Handover</Link>

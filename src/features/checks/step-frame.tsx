@@ -1,10 +1,12 @@
 import { useState, type ReactNode } from 'react';
+import { Link } from 'react-router-dom';
 import { FieldColumn } from '../../components/field-column';
 import { FieldRow } from '../../components/field-row';
 import { Screen } from '../../components/frame';
 import { SaysBlock } from '../../components/says-block';
 import { ThumbDome } from '../../components/thumb-dome';
 import { ThumbZone } from '../../components/thumb-zone';
+import { paths } from '../../config/paths';
 import { PURPOSE_WORDS } from '../../domain/report/words';
 import { ReasonDialog } from './reason-dialog';
 import { StepList } from './step-list';
@@ -128,11 +130,12 @@ function WalkRow({ walk }: { readonly walk: CheckWalk }) {
 }
 
 function StepFigure({ walk, children }: { readonly walk: CheckWalk; readonly children: ReactNode }) {
-  const { shown, sheet, rig, revision, said } = walk;
+  const { shown, sheet, rig, revision, said, check } = walk;
   return (
     <div className="check-figure">
       <p className="muted">
-        {PURPOSE_WORDS[sheet.spec.purpose]}, {rig.name}, revision {revision.number}
+        {PURPOSE_WORDS[sheet.spec.purpose]}, {rig.name}, revision {revision.number};{' '}
+        <Link to={paths.notesOf('check', check.id)}>notes and photos</Link>
       </p>
       {shown === null ? null : (
         <>

@@ -1,5 +1,5 @@
+import { bytesWords } from '../../data/photos/photo-size';
 import type { StepProgress } from '../../domain/rules/check-progress';
-import { bytesWords } from './photo-size';
 import { figure } from './step-reading';
 
 /** What stands in the Book for a step, in one line. */

@@ -5,7 +5,8 @@ import { paths } from '../../config/paths';
 export function FiringLinks({ firing }: { readonly firing: string }) {
   return (
     <p className="firing-links">
-      <Link to={paths.traces(firing)}>Traces</Link>
+      <Link to={paths.traces(firing)}>Traces</Link>{' '}
+      <Link to={paths.notesOf('firing', firing)}>Notes and photos</Link>
     </p>
   );
 }

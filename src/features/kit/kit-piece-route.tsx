@@ -1,4 +1,4 @@
-import { useNavigate, useParams } from 'react-router-dom';
+import { Link, useNavigate, useParams } from 'react-router-dom';
 import { FigureFields, FigureKeypad } from '../../components/figure-fields';
 import { Screen } from '../../components/frame';
 import { SaysBlock } from '../../components/says-block';
@@ -106,6 +106,9 @@ function PieceFigure({ kit, deed }: { readonly kit: KitDoc; readonly deed: KitDe
       <p role="status" className={hindrance === null ? '' : 'muted'}>
         {hindrance ?? 'Ready to log.'}
         {save === 'not-saved' ? ' The draft could not be kept on this tablet.' : ''}
+      </p>
+      <p>
+        <Link to={paths.notesOf('kit', kit.id)}>Notes and photos</Link>
       </p>
       <KitHistory kit={kit} zone={zone} />
     </div>

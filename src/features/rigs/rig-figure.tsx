@@ -46,6 +46,11 @@ export function RigFigure({ rig, view, settings }: Props) {
               Parts and wear
             </Link>
           </p>
+          <p>
+            <Link to={paths.notesOf('rig', rig.id)} className="rig-link">
+              Notes and photos
+            </Link>
+          </p>
           <ShortingPoints spec={spec} />
         </div>
       </div>

@@ -1,5 +1,7 @@
+import { Link } from 'react-router-dom';
 import { Caution } from '../../../components/caution';
 import { SaysBlock } from '../../../components/says-block';
+import { paths } from '../../../config/paths';
 import { useLab } from '../../../data/use-book';
 import { useNames } from '../../../data/use-names';
 import { latestRevision } from '../../../domain/book/documents/rig';
@@ -74,6 +76,9 @@ function Ledger({ ledger }: { readonly ledger: PartLedger }) {
   const { serial, note, fitted_on, shots_before } = part.fitted;
   return (
     <div className="part-ledger">
+      <p>
+        <Link to={paths.notesOf('part', part.id)}>Notes and photos</Link>
+      </p>
       <dl className="part-facts">
         <dt>Fitted</dt>
         <dd>
