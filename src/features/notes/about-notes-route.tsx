@@ -129,8 +129,8 @@ function Writing({ screen }: { readonly screen: NotesScreen }) {
           onChange={(caption) => change({ caption })}
         />
         <SaysBlock muted>
-          {bytesWords(photo.bytes.byteLength)}, not kept yet. Its place was left out. It stays on this tablet
-          until it is handed over.
+          {bytesWords(photo.bytes.byteLength)}, not kept yet. Its place was left out. The picture stays on
+          this tablet; the others see its words.
         </SaysBlock>
       </>
     );
