@@ -27,6 +27,18 @@ const ChecksRoute = lazy(() =>
 const CheckRoute = lazy(() =>
   import('../features/checks/check-route').then((m) => ({ default: m.CheckRoute })),
 );
+const SheetsRoute = lazy(() =>
+  import('../features/checks/sheets/sheets-route').then((m) => ({ default: m.SheetsRoute })),
+);
+const SheetRoute = lazy(() =>
+  import('../features/checks/sheets/sheet-route').then((m) => ({ default: m.SheetRoute })),
+);
+const NewSheetRoute = lazy(() =>
+  import('../features/checks/sheets/new-sheet-route').then((m) => ({ default: m.NewSheetRoute })),
+);
+const ChangeSheetRoute = lazy(() =>
+  import('../features/checks/sheets/change-sheet-route').then((m) => ({ default: m.ChangeSheetRoute })),
+);
 const FiringsRoute = lazy(() =>
   import('../features/firings/firings-route').then((m) => ({ default: m.FiringsRoute })),
 );
@@ -113,6 +125,10 @@ export const ROUTES: readonly AppRoute[] = [
   // Making safe may be walked before any PIN; the screens themselves refuse the others.
   { path: patterns.checks, screen: ChecksRoute, area: 'Checks', open: true },
   { path: patterns.check, screen: CheckRoute, area: 'Checks', open: true },
+  { path: patterns.sheets, screen: SheetsRoute, area: 'Checks' },
+  { path: patterns.newSheet, screen: NewSheetRoute, area: 'Checks' },
+  { path: patterns.sheet, screen: SheetRoute, area: 'Checks' },
+  { path: patterns.changeSheet, screen: ChangeSheetRoute, area: 'Checks' },
   { path: patterns.openFiring, screen: OpenFiringRoute, area: 'Firings' },
   { path: patterns.firings, screen: FiringsRoute, area: 'Firings' },
   { path: patterns.calibration, screen: CalibrationRoute, area: 'Firings' },

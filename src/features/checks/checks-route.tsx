@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { useNavigate, useParams } from 'react-router-dom';
+import { Link, useNavigate, useParams } from 'react-router-dom';
 import { Screen } from '../../components/frame';
 import type { HoldOutcome } from '../../components/hold';
 import { HoldButton } from '../../components/hold-button';
@@ -12,9 +12,12 @@ import { useChecks, useRig, useSheets } from '../../data/use-book';
 import { useSession } from '../../data/use-session';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { SheetDoc } from '../../domain/book/documents/sheet';
+import { PURPOSES } from '../../domain/book/sheet-spec';
 import { PURPOSE_WORDS, TOPOLOGY_WORDS } from '../../domain/report/words';
+import { sheetFits } from '../../domain/rules/sheet-fits';
 import { CheckHistory } from './check-history-table';
 import { OpenCheckLine } from './open-check-line';
+import { useMay } from './use-may';
 import './checks.css';
 
 /** The sheets for this rig's circuit, the check that is open, and what earlier ones are worth now. */
@@ -34,11 +37,13 @@ export function ChecksRoute() {
 
 function Checks({ rig }: { readonly rig: RigDoc }) {
   const revision = latestRevision(rig);
-  const sheets = useSheets().filter((sheet) => sheet.spec.topologies.includes(revision.spec.topology));
+  const sheets = useSheets().filter((sheet) => sheetFits(sheet.spec, rig));
   const checks = useChecks(rig.id);
   const open = checks.filter((check) => check.ended === null);
   const [first] = open;
   const navigate = useNavigate();
+  const session = useSession();
+  const may = useMay();
   return (
     <Screen
       thumbs={
@@ -68,13 +73,23 @@ function Checks({ rig }: { readonly rig: RigDoc }) {
               publish one.
             </SaysBlock>
           ) : (
-            sheets.map((sheet) => <SheetLine key={sheet.id} rig={rig} sheet={sheet} />)
+            byUse(sheets).map((sheet) => <SheetLine key={sheet.id} rig={rig} sheet={sheet} />)
           )}
         </section>
+        {session.state === 'open' ? (
+          <Link className="check-more check-more-link" to={paths.sheets()}>
+            Read all check sheets{may('sheet.published') ? ', write or retire one' : ''}
+          </Link>
+        ) : null}
         <CheckHistory rig={rig} checks={checks.filter((check) => check.ended !== null)} />
       </div>
     </Screen>
   );
+}
+
+/** In order of use: before firing and making safe come before what is done once a week. */
+function byUse(sheets: readonly SheetDoc[]): readonly SheetDoc[] {
+  return sheets.toSorted((a, b) => PURPOSES.indexOf(a.spec.purpose) - PURPOSES.indexOf(b.spec.purpose));
 }
 
 function SheetLine({ rig, sheet }: { readonly rig: RigDoc; readonly sheet: SheetDoc }) {
