@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
+import { Choice } from '../../components/choice';
 import { SaysBlock } from '../../components/says-block';
 import { Table, type Column } from '../../components/table';
 import { paths } from '../../config/paths';
@@ -7,8 +8,9 @@ import { useBookState, usePeople } from '../../data/use-book';
 import { useNow } from '../../data/use-now';
 import type { CheckDoc } from '../../domain/book/documents/check';
 import type { RigDoc } from '../../domain/book/documents/rig';
+import { PURPOSES } from '../../domain/book/sheet-spec';
 import { PURPOSE_WORDS } from '../../domain/report/words';
-import { checkAge, checkWorth } from './check-history';
+import { checkAge, checkWorth, filterChecks, type HistoryEnd, type HistoryFilter } from './check-history';
 
 interface CheckHistoryProps {
   readonly rig: RigDoc;
@@ -16,6 +18,12 @@ interface CheckHistoryProps {
 }
 
 const PAGE = 30;
+const ENDS: readonly { readonly value: HistoryEnd; readonly label: string }[] = [
+  { value: 'all', label: 'ended' },
+  { value: 'closed', label: 'closed' },
+  { value: 'abandoned', label: 'abandoned' },
+  { value: 'waived', label: 'with a step waived' },
+];
 
 /** Earlier checks: how they ended, how old they are, and what made them lapse. */
 export function CheckHistory({ rig, checks }: CheckHistoryProps) {
@@ -23,7 +31,10 @@ export function CheckHistory({ rig, checks }: CheckHistoryProps) {
   const { stamp } = useNow(10_000);
   const people = usePeople();
   const [most, setMost] = useState(PAGE);
+  const [filter, setFilter] = useState<HistoryFilter>({ purpose: 'all', end: 'all' });
   if (checks.length === 0) return <SaysBlock muted>No check has been walked on {rig.name} yet.</SaysBlock>;
+  const found = filterChecks(checks, filter);
+  const purposes = PURPOSES.filter((purpose) => checks.some((check) => check.purpose === purpose));
   const columns: Column<CheckDoc>[] = [
     {
       key: 'sheet',
@@ -55,14 +66,32 @@ export function CheckHistory({ rig, checks }: CheckHistoryProps) {
     },
   ];
   return (
-    <section aria-label="Earlier checks">
+    <section aria-label="Earlier checks" className="check-history">
+      {purposes.length < 2 ? null : (
+        <Choice
+          label="Show checks of"
+          options={[
+            { value: 'all', label: 'all' },
+            ...purposes.map((value) => ({ value, label: PURPOSE_WORDS[value] })),
+          ]}
+          value={filter.purpose}
+          onChange={(purpose) => setFilter({ ...filter, purpose })}
+        />
+      )}
+      <Choice
+        label="Show checks that were"
+        options={ENDS}
+        value={filter.end}
+        onChange={(end) => setFilter({ ...filter, end })}
+      />
+      {found.length === 0 ? <SaysBlock muted>No earlier check is like that.</SaysBlock> : null}
       <Table
         caption="Earlier checks, newest first"
         columns={columns}
-        rows={checks.slice(0, most)}
+        rows={found.slice(0, most)}
         rowKey={(row) => row.id}
       />
-      {checks.length > most ? (
+      {found.length > most ? (
         <button
           type="button"
           className="check-more"
@@ -70,7 +99,7 @@ export function CheckHistory({ rig, checks }: CheckHistoryProps) {
             setMost(most + PAGE);
           }}
         >
-          Show {Math.min(PAGE, checks.length - most)} more
+          Show {Math.min(PAGE, found.length - most)} more
         </button>
       ) : null}
     </section>

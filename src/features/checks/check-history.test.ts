@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { CHECK, DEVICE, RIG, trace } from './check.fixture';
-import { checkAge, checkWorth } from './check-history';
+import { CHECK, DEVICE, RIG, stepRecord, trace } from './check.fixture';
+import { checkAge, checkWorth, filterChecks } from './check-history';
 
 const at = (minutes: number) => ({ rig: RIG, device: DEVICE, now: trace('now', minutes).stamp });
 
@@ -34,6 +34,24 @@ describe('what an earlier check is worth', () => {
     );
     expect(checkWorth({ ...CHECK, id: 'earlier' }, at(12))).toBe('replaced by a later check');
     expect(checkWorth({ ...CHECK, purpose: 'make-safe' }, at(12))).toBe('declared shorted');
+  });
+
+  it('says of a gas change what it voids, and of care that it is done', () => {
+    expect(checkWorth({ ...CHECK, purpose: 'gas-change' }, at(12))).toMatch(/before it are void/);
+    expect(checkWorth({ ...CHECK, purpose: 'weekly-care' }, at(12))).toBe('done');
+  });
+
+  it('is found by purpose, by how it ended, and by what was waived', () => {
+    const gas = { ...CHECK, id: 'gas', purpose: 'gas-change' as const };
+    const left = { ...CHECK, id: 'left', ended: { ...CHECK.ended!, how: 'abandoned' as const } };
+    const waived = { ...CHECK, id: 'waived', steps: { flow: stepRecord({ state: 'waived' }) } };
+    const ids = (purpose: 'all' | 'gas-change', end: 'all' | 'closed' | 'abandoned' | 'waived') =>
+      filterChecks([CHECK, gas, left, waived], { purpose, end }).map((one) => one.id);
+    expect(ids('all', 'all')).toEqual(['check', 'gas', 'left', 'waived']);
+    expect(ids('gas-change', 'all')).toEqual(['gas']);
+    expect(ids('all', 'abandoned')).toEqual(['left']);
+    expect(ids('all', 'waived')).toEqual(['waived']);
+    expect(ids('gas-change', 'waived')).toEqual([]);
   });
 
   it('has an age, or says that there is none to be had', () => {

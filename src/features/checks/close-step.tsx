@@ -3,6 +3,8 @@ import { Caution } from '../../components/caution';
 import { SaysBlock } from '../../components/says-block';
 import { ThumbDome } from '../../components/thumb-dome';
 import { paths } from '../../config/paths';
+import type { SheetPurpose } from '../../domain/book/sheet-spec';
+import { PrintRecord } from './print-record';
 import { StepFrame } from './step-frame';
 import type { CheckWalk } from './use-check-walk';
 
@@ -10,7 +12,7 @@ import type { CheckWalk } from './use-check-walk';
 export function CloseStep({ walk }: { readonly walk: CheckWalk }) {
   const { sheet, rig, progress } = walk;
   const waived = progress.steps.filter((one) => one.state === 'waived').length;
-  const makesSafe = sheet.spec.purpose === 'make-safe';
+  const said = CLOSING[sheet.spec.purpose];
   return (
     <StepFrame
       walk={walk}
@@ -27,16 +29,47 @@ export function CloseStep({ walk }: { readonly walk: CheckWalk }) {
     >
       <h1 className="check-title">Every step is done{waived === 0 ? '' : ` or waived, ${waived} of them`}</h1>
       <p className="check-detail">
-        Closing declares {rig.name}: <b>{makesSafe ? 'shorted' : 'short off'}</b>, by you, now.
+        {said.declares === null ? (
+          `Closing declares nothing: ${rig.name} stays as it was declared.`
+        ) : (
+          <>
+            Closing declares {rig.name}: <b>{said.declares}</b>, by you, now.
+          </>
+        )}
       </p>
-      <Caution>
-        {makesSafe
-          ? 'A declaration is no measurement. The shorts stay on.'
-          : 'From here on treat it as charged. The check lapses after 30 min without activity, and after 4 h.'}
-      </Caution>
+      <Caution>{said.caution}</Caution>
     </StepFrame>
   );
 }
+
+interface Closing {
+  readonly declares: 'shorted' | 'short off' | null;
+  readonly caution: string;
+}
+
+const CLOSING: Readonly<Record<SheetPurpose, Closing>> = {
+  'before-firing': {
+    declares: 'short off',
+    caution:
+      'From here on treat it as charged. The check lapses after 30 min without activity, and after 4 h.',
+  },
+  'make-safe': {
+    declares: 'shorted',
+    caution: 'A declaration is no measurement. The shorts stay on.',
+  },
+  'gas-change': {
+    declares: null,
+    caution: 'The gas was changed: the before-firing check is void and has to be walked again.',
+  },
+  'dye-handling': {
+    declares: null,
+    caution: 'Nothing fires while solvent is open in the room. A dye beam needs its own eyewear.',
+  },
+  'weekly-care': {
+    declares: null,
+    caution: 'The shorts stay on. The before-firing check is void and has to be walked again.',
+  },
+};
 
 /** The check has ended: what it declared, and where to go from here. */
 export function EndedStep({ walk }: { readonly walk: CheckWalk }) {
@@ -81,10 +114,18 @@ export function EndedStep({ walk }: { readonly walk: CheckWalk }) {
       ) : (
         <p className="check-detail">
           {ended.irregular === null
-            ? `${rig.name} was declared ${toFire ? 'short off' : 'shorted'}.`
-            : 'Steps were missing: it declared nothing but the danger.'}
+            ? endedWords(sheet.spec.purpose, rig.name)
+            : toFire
+              ? 'Steps were missing: it declared nothing but the danger.'
+              : 'Steps were missing: it declared nothing.'}
         </p>
       )}
+      <PrintRecord walk={walk} />
     </StepFrame>
   );
+}
+
+function endedWords(purpose: SheetPurpose, rig: string): string {
+  const { declares } = CLOSING[purpose];
+  return declares === null ? `It declared nothing about ${rig}.` : `${rig} was declared ${declares}.`;
 }
