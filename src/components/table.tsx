@@ -16,6 +16,13 @@ export interface TableProps<Row> {
   /** Key of the row that is being looked at. */
   readonly picked?: string;
   readonly foot?: ReactNode;
+  /** These rows are a window of a longer table: where they stand in it, and the room of those that are not drawn. */
+  readonly spaced?: {
+    readonly first: number;
+    readonly count: number;
+    readonly before_px: number;
+    readonly after_px: number;
+  };
 }
 
 /** Figures in rows; the header stays while they scroll. */
@@ -27,9 +34,10 @@ export function Table<Row>({
   rowKey,
   picked,
   foot,
+  spaced,
 }: TableProps<Row>) {
   return (
-    <table className="figures">
+    <table className="figures" {...(spaced === undefined ? {} : { 'aria-rowcount': spaced.count + 1 })}>
       <caption className={hideCaption ? 'heard-only' : ''}>{caption}</caption>
       <thead>
         <tr>
@@ -41,10 +49,15 @@ export function Table<Row>({
         </tr>
       </thead>
       <tbody>
-        {rows.map((row) => {
+        <Room px={spaced?.before_px ?? 0} />
+        {rows.map((row, i) => {
           const key = rowKey(row);
           return (
-            <tr key={key} className={key === picked ? 'picked' : ''}>
+            <tr
+              key={key}
+              className={key === picked ? 'picked' : ''}
+              {...(spaced === undefined ? {} : { 'aria-rowindex': spaced.first + i + 2 })}
+            >
               {columns.map((column) => (
                 <td key={column.key} className={column.align ?? 'end'}>
                   {column.cell(row)}
@@ -53,6 +66,7 @@ export function Table<Row>({
             </tr>
           );
         })}
+        <Room px={spaced?.after_px ?? 0} />
       </tbody>
       {foot === undefined ? null : (
         <tfoot>
@@ -63,4 +77,8 @@ export function Table<Row>({
       )}
     </table>
   );
+}
+
+function Room({ px }: { readonly px: number }) {
+  return px === 0 ? null : <tr aria-hidden="true" style={{ height: px }} />;
 }

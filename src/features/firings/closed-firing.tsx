@@ -30,13 +30,10 @@ interface ClosedFiringProps {
   readonly mayCorrect: boolean;
 }
 
-const FIRST_ROWS = 40;
-
 /** A firing as it stands in the Book: what was logged, what came of it, and where its entries are. */
 export function ClosedFiring({ facts, mayCorrect }: ClosedFiringProps) {
   const { firing, readings, rows, revision } = facts;
   const [picked, setPicked] = useState<ReadingDoc | null>(null);
-  const [most, setMost] = useState(FIRST_ROWS);
   const navigate = useNavigate();
   const shown = picked ?? rows.at(-1)?.reading;
   const own = useCalibrationBefore(facts.rig, firing);
@@ -65,30 +62,11 @@ export function ClosedFiring({ facts, mayCorrect }: ClosedFiringProps) {
         <FiringSummary facts={facts} />
         <CompareLink facts={facts} />
         <div className="firing-past">
-          <div className="firing-table">
-            {readings.length === 0 && !facts.loading ? (
-              <SaysBlock muted>No reading was logged in this firing.</SaysBlock>
-            ) : (
-              <ReadingsTable
-                readings={readings}
-                picked={shown?.id}
-                onPick={setPicked}
-                withPlaces
-                most={most}
-              />
-            )}
-            {readings.length > most ? (
-              <button
-                type="button"
-                className="firing-more"
-                onClick={() => {
-                  setMost(readings.length);
-                }}
-              >
-                Show all {readings.length} readings
-              </button>
-            ) : null}
-          </div>
+          {readings.length === 0 && !facts.loading ? (
+            <SaysBlock muted>No reading was logged in this firing.</SaysBlock>
+          ) : (
+            <ReadingsTable readings={readings} picked={shown?.id} onPick={setPicked} withPlaces />
+          )}
           <ClosedChart facts={facts} own={own} />
         </div>
       </div>

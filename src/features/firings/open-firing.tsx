@@ -32,9 +32,6 @@ import { useFootKey } from './use-foot-key';
 import { useCalibrationBefore } from './use-rig-calibration';
 import { useReadingForm, type ReadingForm } from './use-reading-form';
 
-/** Rows that a hand scrolls through at a bench; the closed firing shows them all. */
-const MOST_ROWS = 60;
-
 const BURST_DOME: Readonly<Record<BurstView['type'], string>> = {
   none: 'Start burst',
   running: 'Stop burst',
@@ -177,9 +174,7 @@ function OpenFigure({ facts, form, said, burst, own, onPick }: OpenFigureProps) 
         <FitSays no={last.no} fit={fit} />
       )}
       <div className="firing-past">
-        <div className="firing-table">
-          <ReadingsTable readings={readings} picked={last?.id} onPick={onPick} most={MOST_ROWS} />
-        </div>
+        <ReadingsTable readings={readings} picked={last?.id} onPick={onPick} />
         <div className="firing-chart">
           {chart === null ? (
             <SaysBlock muted>No curve: enter ambient and temperature first.</SaysBlock>

@@ -1,4 +1,6 @@
-import { Table, type Column } from '../../components/table';
+import { useMemo } from 'react';
+import type { Column } from '../../components/table';
+import { WindowedTable } from '../../components/windowed-table';
 import { useEntryState } from '../../data/use-book';
 import { standingReading, type ReadingDoc } from '../../domain/book/documents/reading';
 import { LOOK_WORDS } from '../../domain/report/words';
@@ -11,12 +13,11 @@ interface ReadingsTableProps {
   readonly onPick: (reading: ReadingDoc) => void;
   /** With where each entry is: on this tablet, sent, backed up. */
   readonly withPlaces?: boolean;
-  readonly most: number;
 }
 
 /** Readings, newest first; a touch on one opens it for correcting or striking. */
-export function ReadingsTable({ readings, picked, onPick, withPlaces = false, most }: ReadingsTableProps) {
-  const rows = readings.toReversed().slice(0, most);
+export function ReadingsTable({ readings, picked, onPick, withPlaces = false }: ReadingsTableProps) {
+  const rows = useMemo(() => readings.toReversed(), [readings]);
   const columns: Column<ReadingDoc>[] = [
     {
       key: 'no',
@@ -47,13 +48,13 @@ export function ReadingsTable({ readings, picked, onPick, withPlaces = false, mo
       cell: (row) => <EntryPlace id={row.logged.entry} />,
     });
   return (
-    <Table
+    <WindowedTable
+      className="firing-table"
       caption="Readings, newest first"
       columns={columns}
       rows={rows}
       rowKey={(row) => row.id}
       {...(picked === undefined ? {} : { picked })}
-      {...(readings.length > most ? { foot: `the last ${most} of ${readings.length}` } : {})}
     />
   );
 }
