@@ -6,6 +6,7 @@ import { useSession } from '../../data/use-session';
 import type { RigDoc } from '../../domain/book/documents/rig';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import { dueItems, type DueItem } from '../../domain/rules/due';
+import { useWearFacts } from './use-wear-facts';
 
 const EVERY_MS = 10_000;
 
@@ -18,11 +19,24 @@ export function useDueItems(rig: RigDoc, view: DeclaredView): readonly DueItem[]
   const open_author = useOpenAuthor().length;
   const { device } = useBookState();
   const { stamp, best_ms } = useNow(EVERY_MS);
+  const { worn, drift } = useWearFacts(rig);
   return useMemo(
     () =>
       settings === undefined
         ? []
-        : dueItems({ rig, view, settings, person, kit, open_author, device, stamp, now_ms: best_ms }),
-    [rig, view, settings, person, kit, open_author, device, stamp, best_ms],
+        : dueItems({
+            rig,
+            view,
+            settings,
+            person,
+            kit,
+            worn,
+            drift,
+            open_author,
+            device,
+            stamp,
+            now_ms: best_ms,
+          }),
+    [rig, view, settings, person, kit, worn, drift, open_author, device, stamp, best_ms],
   );
 }
