@@ -2,8 +2,8 @@ import type { Circuit } from '../../src/domain/circuit/circuit-input';
 import { solveTransient, type Transient } from '../../src/domain/circuit/transient';
 import type { Fineness } from '../ngspice/netlist';
 import { randomCircuit, seededRandom } from '../ngspice/random-circuits';
-import { spiceFigures } from '../ngspice/spice-figures';
-import { bestCpuTime_ms } from './best-time';
+import { spiceFigures, spiceFiguresFired } from '../ngspice/spice-figures';
+import { bestTime_ms } from './best-time';
 
 const SEED = 5;
 const COUNT = 12;
@@ -21,7 +21,8 @@ const SPICE: readonly Fineness[] = [
 ];
 /** As many rounds for both, and each about as long, or a busy machine would favour the short one. */
 const ROUNDS = 3;
-const OWN_CALLS = 200;
+const OWN_CALLS = 100;
+const SPICE_RUNS = 4;
 const WARM_CALLS = 100;
 const LIMIT_MS = 5;
 const AIM = 50;
@@ -123,13 +124,16 @@ function warmUp(circuits: readonly Circuit[]): void {
 }
 
 function ownTiming(circuit: Circuit, tolerance: number | undefined, exact: Figures | undefined): Timing {
-  const time_ms = bestCpuTime_ms(() => void solved(circuit, tolerance), { rounds: ROUNDS, calls: OWN_CALLS });
+  const time_ms = bestTime_ms(() => void solved(circuit, tolerance), { rounds: ROUNDS, calls: OWN_CALLS });
   const name = tolerance === undefined ? 'as used' : `tolerance ${String(tolerance)}`;
   return { name, deviation: deviation(solved(circuit, tolerance), exact), ms: time_ms };
 }
 
 function spiceTiming(circuit: Circuit, fineness: Fineness, exact: Figures | undefined): Timing {
-  const rounds = Array.from({ length: ROUNDS }, () => spiceFigures(circuit, fineness));
+  const { fired_s } = spiceFigures(circuit, fineness);
+  const rounds = Array.from({ length: ROUNDS }, () =>
+    spiceFiguresFired(circuit, fineness, { fired_s, runs: SPICE_RUNS }),
+  );
   return {
     name: `${String(1 / fineness.stepShare)} steps, reltol ${String(fineness.relativeTolerance)}`,
     deviation: Math.max(...rounds.map((figures) => deviation(figures, exact))),

@@ -9,19 +9,19 @@ export interface SpiceCurves {
   readonly channel_V: Float64Array;
   readonly gap_A: Float64Array;
   readonly channel_A: Float64Array;
-  /** ngspice's own figure for the analysis alone, without its start and its files. */
+  /** ngspice's own figure for one analysis alone, without its start and its files: time on the clock. */
   readonly analysis_s: number;
 }
 
-/** Runs a deck in ngspice's batch mode. */
-export function runNgspice(deck: readonly string[]): SpiceCurves {
+/** Runs a deck in ngspice's batch mode, `runs` times over: its clock counts whole milliseconds, of all runs together. */
+export function runNgspice(deck: readonly string[], runs = 1): SpiceCurves {
   const folder = mkdtempSync(join(tmpdir(), 'holdoff-ngspice-'));
   try {
     const raw = join(folder, 'out.raw');
     const control = [
       '.control',
-      'run',
-      'rusage totaltime trantime',
+      ...Array.from({ length: runs }, () => 'run'),
+      'rusage trantime',
       `write ${raw} v(hot) v(cold) i(vg) i(vch)`,
     ];
     writeFileSync(join(folder, 'deck.cir'), [...deck, ...control, 'quit', '.endc', '.end', ''].join('\n'));
@@ -33,7 +33,7 @@ export function runNgspice(deck: readonly string[]): SpiceCurves {
     // It writes what it has when it gives up half-way.
     if (/timestep too small|aborted/i.test(said))
       throw new Error(`ngspice gave up:\n${said}\n${deck.join('\n')}`);
-    return readRaw(readFileSync(raw), Number(analysis));
+    return readRaw(readFileSync(raw), Number(analysis) / runs);
   } finally {
     rmSync(folder, { recursive: true });
   }

@@ -15,11 +15,19 @@ export interface SpiceFigures {
 
 /** Solves a circuit with ngspice: once with the channel open, and once more from there if it breaks down. */
 export function spiceFigures(circuit: Circuit, fineness: Fineness): SpiceFigures {
-  const open = runNgspice(netlist(circuit, { fineness, fired_s: null }));
   const { break_V } = circuit.channel;
+  const open = runNgspice(netlist(circuit, { fineness, fired_s: null }));
   const fired_s = break_V === null ? undefined : firstCrossing(open, break_V);
-  if (fired_s === undefined) return figuresOf(open, null);
-  return figuresOf(runNgspice(netlist(circuit, { fineness, fired_s })), fired_s);
+  return fired_s === undefined ? figuresOf(open, null) : spiceFiguresFired(circuit, fineness, { fired_s });
+}
+
+/** The same where the time of the breakdown is known already, null for a channel that stays dark. */
+export function spiceFiguresFired(
+  circuit: Circuit,
+  fineness: Fineness,
+  { fired_s, runs = 1 }: { readonly fired_s: number | null; readonly runs?: number },
+): SpiceFigures {
+  return figuresOf(runNgspice(netlist(circuit, { fineness, fired_s }), runs), fired_s);
 }
 
 function figuresOf(curves: SpiceCurves, fired_s: number | null): SpiceFigures {

@@ -1,7 +1,10 @@
 import fc from 'fast-check';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import type { Circuit, GapLaw } from './circuit-input';
 import { solveTransient, type Transient } from './transient';
+
+// Hundreds of runs: a machine that is busy with other tests takes its time.
+vi.setConfig({ testTimeout: 60_000 });
 
 const spread = (low: number, high: number) =>
   fc.double({ min: Math.log(low), max: Math.log(high), noNaN: true }).map(Math.exp);
@@ -118,6 +121,40 @@ describe('any bench circuit', () => {
     );
   });
 
+  it('goes less high the more stays in its gap, with the channel dark', () => {
+    fc.assert(
+      fc.property(benchCircuit, spread(1, 30), (circuit, ohm) => {
+        const channel = { ...circuit.channel, break_V: null };
+        const peak = (end_ohm: number) =>
+          solved({
+            ...circuit,
+            channel,
+            gap: { law: 'exponential', end_ohm, start_ohm: 0.1, fall_s: 1e-12 },
+            window_s: 8 * Math.sqrt(circuit.gap_H * ringing_F(circuit)),
+          }).peakVoltage_V;
+        return peak(1.2 * ohm) < peak(ohm) * (1 + 1e-5);
+      }),
+      { numRuns: 40 },
+    );
+  });
+
+  it('has lost no less and peaked no lower when it is followed for longer', () => {
+    fc.assert(
+      fc.property(benchCircuit, (circuit) => {
+        const half = solved({ ...circuit, window_s: circuit.window_s / 2 });
+        const whole = solved(circuit);
+        // What is lost only grows, and a peak once reached stays one.
+        return (
+          whole.energy.gap_J >= half.energy.gap_J * (1 - 1e-5) &&
+          whole.energy.channel_J >= half.energy.channel_J * (1 - 1e-5) - 1e-9 &&
+          whole.peakVoltage_V >= half.peakVoltage_V * (1 - 1e-5) &&
+          whole.peakGap_A >= half.peakGap_A * (1 - 1e-5)
+        );
+      }),
+      { numRuns: 40 },
+    );
+  });
+
   it('is the same again, to the last digit', () => {
     fc.assert(
       fc.property(benchCircuit, (circuit) => {
@@ -127,6 +164,12 @@ describe('any bench circuit', () => {
     );
   });
 });
+
+/** Capacitance that rings with the gap. */
+function ringing_F(circuit: Circuit): number {
+  if (circuit.topology === 'lc-inversion') return circuit.first_F;
+  return (circuit.dump_F * circuit.peaking_F) / (circuit.dump_F + circuit.peaking_F);
+}
 
 /** All inductances and resistances doubled and all capacitances halved. */
 function doubled(circuit: Circuit): Circuit {
@@ -163,100 +206,4 @@ function doubledGap(gap: GapLaw): GapLaw {
   const ends = { end_ohm: 2 * gap.end_ohm, start_ohm: 2 * gap.start_ohm };
   // At half the current the action is a quarter and d/sqrt(S) doubles by itself.
   return { ...gap, ...ends };
-}
-
-describe('any numbers at all', () => {
-  const any = fc.double();
-  const anyGap = fc.oneof(
-    fc.record({ law: fc.constant('exponential' as const), end_ohm: any, start_ohm: any, fall_s: any }),
-    fc.record({
-      law: fc.constant('rompe-weizel' as const),
-      end_ohm: any,
-      start_ohm: any,
-      gap_cm: any,
-      pressure_atm_abs: any,
-      constant_cm2_atm_V2s: any,
-    }),
-  );
-
-  it('are refused or give finite figures', () => {
-    const anyCircuit = fc.record({
-      topology: fc.constant('charge-transfer' as const),
-      dump_F: any,
-      peaking_F: any,
-      bleed_ohm: any,
-      charge_V: any,
-      gap_H: any,
-      gap: anyGap,
-      channel: fc.record({ inductance_H: any, break_V: any, end_ohm: any, start_ohm: any, fall_s: any }),
-      window_s: any,
-    });
-    fc.assert(fc.property(anyCircuit, (circuit) => isSound(circuit)));
-  });
-
-  it('are refused or give finite figures over the whole range that is let in', () => {
-    const gap: fc.Arbitrary<GapLaw> = fc.oneof(
-      fc.record({
-        law: fc.constant('exponential' as const),
-        end_ohm: fc.oneof(fc.constant(0), spread(1e-6, 1e4)),
-        start_ohm: spread(0.1, 1e8),
-        fall_s: spread(1e-12, 1e-3),
-      }),
-      fc.record({
-        law: fc.constant('rompe-weizel' as const),
-        end_ohm: fc.oneof(fc.constant(0), spread(1e-6, 1e4)),
-        start_ohm: spread(0.1, 1e8),
-        gap_cm: spread(1e-3, 100),
-        pressure_atm_abs: spread(1e-2, 100),
-        constant_cm2_atm_V2s: spread(1e-2, 100),
-      }),
-    );
-    const wide = {
-      charge_V: spread(1, 1e6),
-      gap_H: spread(1e-11, 1),
-      gap,
-      channel: fc.record({
-        inductance_H: spread(1e-11, 1),
-        break_V: fc.option(spread(1, 1e7)),
-        end_ohm: fc.oneof(fc.constant(0), spread(1e-6, 1e4)),
-        start_ohm: spread(0.1, 1e8),
-        fall_s: spread(1e-12, 1e-3),
-      }),
-      window_s: spread(1e-10, 1e-3),
-    };
-    const wideCircuit: fc.Arbitrary<Circuit> = fc.oneof(
-      fc.record({
-        topology: fc.constant('charge-transfer' as const),
-        dump_F: spread(1e-13, 1e-3),
-        peaking_F: spread(1e-13, 1e-3),
-        bleed_ohm: fc.option(spread(1, 1e12)),
-        ...wide,
-      }),
-      fc.record({
-        topology: fc.constant('lc-inversion' as const),
-        first_F: spread(1e-13, 1e-3),
-        second_F: spread(1e-13, 1e-3),
-        charging_H: spread(1e-11, 1),
-        charging_ohm: fc.oneof(fc.constant(0), spread(1e-6, 1e8)),
-        ...wide,
-      }),
-    );
-    fc.assert(
-      fc.property(wideCircuit, (circuit) => isSound(circuit)),
-      { numRuns: 150 },
-    );
-  }, 60_000);
-});
-
-function isSound(circuit: Circuit): boolean {
-  const result = solveTransient(circuit, { samples: 20 });
-  if (!result.ok) return result.refusal.words.length > 0;
-  const { waveform, energy, warnings, ...figures } = result.value;
-  const curves = [waveform.time_s, waveform.channel_V, waveform.gap_A, waveform.channel_A].flat();
-  return (
-    warnings.every((warning) => warning.words.length > 0) &&
-    [...Object.values(figures), ...Object.values(energy), ...curves].every(
-      (one) => typeof one !== 'number' || Number.isFinite(one),
-    )
-  );
 }

@@ -75,6 +75,8 @@ function peakOf(trace: Trace, curve: Curve): Peak {
     largest = Math.max(largest, Math.abs(pieceEnd(buffer, trace.offset(piece, curve))));
   }
   let peak: Peak = { time_s: 0, size: 0 };
+  // A channel that stays dark has no current to search.
+  if (largest === 0) return peak;
   for (let piece = 0; piece < pieces; piece += 1) {
     const offset = trace.offset(piece, curve);
     if (pieceBound(buffer, offset) < largest * (1 - 1e-12)) continue;

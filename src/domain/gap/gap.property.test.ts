@@ -1,11 +1,14 @@
 import fc from 'fast-check';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import type { Electrodes } from './electrodes';
 import { gapCurve } from './gap-curve';
 import type { GapInput } from './gap-input';
 import { gapFor, pressureFor } from './gap-solve';
 import type { GasName } from './gas-table';
 import { selfBreak, type GapAnswer } from './self-break';
+
+// Hundreds of runs: a machine that is busy with other tests takes its time.
+vi.setConfig({ testTimeout: 60_000 });
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const share = between(0, 1);
