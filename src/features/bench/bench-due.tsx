@@ -1,13 +1,12 @@
 import { Link } from 'react-router-dom';
-import { paths } from '../../config/paths';
 import type { RigDoc } from '../../domain/book/documents/rig';
 import type { DeclaredView } from '../../domain/rules/declared-view';
 import { besides, leadPath, leftWords } from './due-lead';
 import type { DueNext } from './due-next';
 import { useDueItems } from './use-due-items';
 
-/** As many as the column holds beside what was last and what waits. */
-const SHOWN = 2;
+/** As many as the column holds beside what was last and what waits; the list's head leads to all of them. */
+const SHOWN = 1;
 
 interface Props {
   readonly rig: RigDoc;
@@ -19,7 +18,6 @@ interface Props {
 export function BenchDue({ rig, view, primary }: Props) {
   const items = besides(useDueItems(rig, view), primary);
   if (items.length === 0) return null;
-  const more = items.length - SHOWN;
   return (
     <ul className="bench-due" aria-label="Due besides">
       {items.slice(0, SHOWN).map((item) => (
@@ -29,13 +27,6 @@ export function BenchDue({ rig, view, primary }: Props) {
           </Link>
         </li>
       ))}
-      {more > 0 ? (
-        <li>
-          <Link to={paths.due(rig.id)} className="muted">
-            {more} more
-          </Link>
-        </li>
-      ) : null}
     </ul>
   );
 }

@@ -10,6 +10,7 @@ import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import { ageWords, clockWords, dayWords } from '../../domain/report/time-words';
 import { DECLARED_WORDS } from '../../domain/report/words';
+import { energyText } from '../../domain/capacitor/energy-text';
 import { rigFigures } from '../../domain/rules/rig-figures';
 import { formatFigure } from '../../domain/units/format-quantity';
 import { Screen } from '../../components/frame';
@@ -99,9 +100,7 @@ function Face({
   function standingFigures(doc: RigDoc, lab: LabSettings, now_ms: number): readonly FaceReading[] {
     const { spec } = latestRevision(doc);
     const derived = rigFigures(spec, lab);
-    const stored = derived.ok
-      ? formatFigure(derived.value.stored_J, { digits: { decimals: 2 }, rounding: 'up' })
-      : '\u2013';
+    const stored = derived.ok ? energyText(derived.value.stored_J) : '\u2013';
     const wait =
       derived.ok && derived.value.wait.type === 'known' ? String(derived.value.wait.wait_s) : 'not known';
     return [

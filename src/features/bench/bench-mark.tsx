@@ -65,16 +65,20 @@ function Declarer({ rig, view, zone }: Props) {
   if (view.state !== 'not-known') {
     return (
       <>
-        {name}, {when}. Declared, not measured.{stoodDown}
+        {capital(name)}, {when}. Declared, not measured.{stoodDown}
       </>
     );
   }
   const why = view.why ?? '';
   return (
     <>
-      {why.charAt(0).toUpperCase() + why.slice(1)}. Last by {name}, {when}.{stoodDown}
+      {capital(why)}. Last by {name}, {when}.{stoodDown}
     </>
   );
+}
+
+function capital(words: string): string {
+  return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
 /** Whose hands are in and who is checked in; leads to where tags come off. */

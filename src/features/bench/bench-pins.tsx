@@ -4,8 +4,8 @@ import { useLookups } from '../../data/use-book';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
 import { pinnedLookups } from '../../domain/lookup/pinned';
+import { energyText } from '../../domain/capacitor/energy-text';
 import { rigFigures, type RigFigures } from '../../domain/rules/rig-figures';
-import { energyFigure } from './energy-figure';
 import { formatQuantity } from '../../domain/units/format-quantity';
 
 interface Props {
@@ -74,7 +74,7 @@ function StoredPin({ revision, settings, figures }: Omit<Props, 'rig'> & { reado
         Stored at the supply’s limit, {supply_kV} kV and {supply_mA} mA
       </span>
       <span className="bench-pin-row">
-        <Reading value={energyFigure(figures.stored_J)} unit="J" size="pin" />
+        <Reading value={energyText(figures.stored_J)} unit="J" size="pin" />
         <Suspense fallback={null}>
           <WorkingEnergy revision={revision} settings={settings} />
         </Suspense>

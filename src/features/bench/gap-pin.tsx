@@ -3,12 +3,12 @@ import { TwoFaces } from '../../components/two-faces';
 import { paths } from '../../config/paths';
 import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
+import { energyText } from '../../domain/capacitor/energy-text';
 import { breakText } from '../../domain/gap/break-text';
 import { selfBreak } from '../../domain/gap/self-break';
 import { storedAt_J } from '../../domain/rules/rig-figures';
 import { gapInputOf } from '../../domain/rules/rig-gap';
 import { formatFigure } from '../../domain/units/format-quantity';
-import { energyFigure } from './energy-figure';
 
 interface AtWorkingPoint {
   readonly revision: RigRevision;
@@ -45,7 +45,7 @@ export function WorkingEnergy({ revision, settings }: AtWorkingPoint) {
   if (!stored.ok) return null;
   return (
     <span className="muted nowrap">
-      {energyFigure(stored.value)} J at {breakText(answer.value.law_kV, 'nearest')} kV
+      {energyText(stored.value)} J at {breakText(answer.value.law_kV, 'nearest')} kV
     </span>
   );
 }
