@@ -4,9 +4,13 @@ import { paths } from '../../config/paths';
 /** What hangs on a firing beside its readings. */
 export function FiringLinks({ firing }: { readonly firing: string }) {
   return (
-    <p className="firing-links">
-      <Link to={paths.traces(firing)}>Traces</Link>{' '}
-      <Link to={paths.notesOf('firing', firing)}>Notes and photos</Link>
+    <p className="flex flex-wrap gap-x-4">
+      <Link className="firing-more inline-flex items-center" to={paths.traces(firing)}>
+        Traces
+      </Link>
+      <Link className="firing-more inline-flex items-center" to={paths.notesOf('firing', firing)}>
+        Notes and photos
+      </Link>
     </p>
   );
 }

@@ -83,8 +83,8 @@ export function traceSpecs(
   };
   const reading: FigureSpec = {
     key: 'reading',
-    label: 'Reading',
-    unit: 'No.',
+    label: 'Reading No.',
+    unit: '',
     step: 1,
     initial: last > 0 ? String(last) : '',
     source: 'the last one',

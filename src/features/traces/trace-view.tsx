@@ -5,7 +5,7 @@ import { SaysBlock } from '../../components/says-block';
 import { Table } from '../../components/table';
 import type { RigSpec } from '../../domain/book/rig-spec';
 import { channelScale, scaledEnvelope, timeScale } from '../../domain/oscillogram/scaled';
-import { ChannelChoices } from './channel-choices';
+import { ChannelChoice, ChannelSays } from './channel-choices';
 import { comparison, type ComparisonRow } from './comparison';
 import { foundWords } from './found-words';
 import { laidOver, LOOP_WORDS, loopCapacitance_F, simulatedOf } from './simulated';
@@ -51,13 +51,9 @@ export function TraceView({ file, draft, change, spec, rig, look }: Props) {
     <>
       <div className="trace-found">
         <h2>{file.name}</h2>
-        {foundWords(survey).map((words) => (
-          <p key={words} className="muted">
-            {words}
-          </p>
-        ))}
+        <p className="muted">{foundWords(survey).join(' ')}</p>
       </div>
-      <ChannelChoices survey={survey} draft={draft} change={change} index={index} />
+      <ChannelChoice survey={survey} change={change} index={index} />
       <div className="trace-chart">
         <Chart title={`Trace of ${channel.name}`} data={chart} words={TRACE_CHART_WORDS} />
       </div>
@@ -88,16 +84,20 @@ export function TraceView({ file, draft, change, spec, rig, look }: Props) {
           rowKey={(row) => row.key}
         />
       </div>
-      <Choice<Loop>
-        label="Capacitance that rings"
-        options={LOOPS}
-        value={draft.loop}
-        onChange={(loop) => change({ loop })}
-      />
       <p className="muted">
         An inductance from a ring holds for one lumped loop. A probe’s ground lead rings by itself and looks
         the same.
       </p>
+      <ChannelSays survey={survey} draft={draft} change={change} index={index} />
+      <div className="trace-choice">
+        <h3>Capacitance that rings</h3>
+        <Choice<Loop>
+          label="Capacitance that rings"
+          options={LOOPS}
+          value={draft.loop}
+          onChange={(loop) => change({ loop })}
+        />
+      </div>
     </>
   );
 }
