@@ -37,12 +37,13 @@ function placesOf(rig: string | undefined): readonly Place[] {
   ];
 }
 
-/** Desk, Crew, Handover, Alignment and the settings have their place under Bench. */
+/** Desk, Crew, Handover, Alignment, Notes and the settings have their place under Bench. */
 const UNDER_BENCH: ReadonlySet<string> = new Set([
   'desk',
   'crew',
   'handover',
   'alignment',
+  'notes',
   'settings',
   'sign-in',
 ]);

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { useEntryState } from '../../data/use-book';
 import { useNames } from '../../data/use-names';
 import type { NoteDoc, NoteVersion } from '../../domain/book/documents/note';
 import { momentWords } from '../../domain/report/time-words';
@@ -76,12 +77,14 @@ interface VersionProps {
 
 function Version({ version, zone, amended }: VersionProps) {
   const nameOf = useNames();
+  const state = useEntryState(version.entry);
   return (
     <div>
       <p className="note-words">{version.words}</p>
       <p className="muted">
         {amended ? 'amended by ' : ''}
         {nameOf(version.by)}, {momentWords(version.stamp.wall_ms, zone)}
+        {state === undefined ? '' : `; ${state.place}`}
       </p>
     </div>
   );
