@@ -71,6 +71,28 @@ describe('the rules of a sheet', () => {
     expect(codes(late)).toEqual(['wait-after-short', 'no-reading', 'no-second-person']);
   });
 
+  it('reads a sheet of version 1, which knew neither rigs nor marks', () => {
+    const { book, rig } = new PureBench();
+    const options = { by: MILO, version: 1 };
+    const old = book.write('sheet.published', null, { spec: testSheet, replaces: null }, options);
+    expect([old.verdict, old.entry.version]).toEqual(['applied', 1]);
+    const sheetId = old.entry.id;
+    const opened = book.write('check.opened', null, { rig, rig_revision: rig, sheet: sheetId });
+    expect(opened.verdict).toBe('applied');
+  });
+
+  it('is for the rigs that it names alone', () => {
+    const { book, rig } = new PureBench();
+    const open = (rigs: string[]) => {
+      const spec = { ...testSheet, rigs };
+      const { id } = book.write('sheet.published', null, { spec, replaces: null }, { by: MILO }).entry;
+      return (
+        book.write('check.opened', null, { rig, rig_revision: rig, sheet: id }).reason?.code ?? 'applied'
+      );
+    };
+    expect([open([]), open([rig]), open([MILO])]).toEqual(['applied', 'applied', 'sheet-rig']);
+  });
+
   it('is asked by the server too', () => {
     const { book } = new PureBench();
     const publish = (spec: SheetSpec, replaces: string | null = null) =>
