@@ -3,6 +3,7 @@ import type { GapInput } from '../gap/gap-input';
 import type { GapAnswer } from '../gap/self-break';
 import { formatFigure, type Rounding } from '../units/format-quantity';
 import { numberAt } from './fields';
+import { ownKey } from './gap-own';
 import type { Plot, Values } from './lookup';
 
 const CURVE_POINTS = 60;
@@ -37,6 +38,7 @@ export function gapPlot({ values, input, ambient_bar_abs, gap, reachable_kV }: P
       below: 'holds',
     },
     law: points.map(({ x: at, law }) => ({ x: at, y: law })),
+    ...ownOf({ values, input, ambient_bar_abs }, { from, to }),
     point: { x, low: gap.low_kV, high: gap.high_kV },
     ...(reachable_kV === null
       ? {}
@@ -72,6 +74,34 @@ function curveOf(input: GapInput, ambient: number, range: { readonly from: numbe
   }
   return { points, last: points.at(-1)?.x ?? range.to };
 }
+
+/**
+ * The rig's own curve over the pressures that were read, at the gap as it stands here. It says when the gap fires; the two
+ * sides stay the law's.
+ */
+function ownOf(
+  { values, input, ambient_bar_abs }: Pick<Parts, 'values' | 'input' | 'ambient_bar_abs'>,
+  range: { readonly from: number; readonly to: number },
+): Pick<Plot, 'own'> {
+  const [scale = null, offset_mm = null, low = null, high = null] = OWN_KEYS.map((key) =>
+    numberAt(values, key),
+  );
+  if (scale === null || offset_mm === null || low === null || high === null) return {};
+  if (values['own_of'] !== ownKey(values)) return {};
+  const first = Math.max(low, range.from + ambient_bar_abs);
+  const last = Math.min(high, range.to + ambient_bar_abs);
+  if (first >= last) return {};
+  const at = Array.from({ length: OWN_POINTS + 1 }, (_, i) => first + ((last - first) * i) / OWN_POINTS);
+  const curve = gapCurve({ ...input, gap_mm: input.gap_mm + offset_mm }, at);
+  if (!curve.ok) return {};
+  const points = curve.value.flatMap((one) =>
+    one.valid ? [{ x: one.pressure_bar_abs - ambient_bar_abs, y: scale * one.law_kV }] : [],
+  );
+  return points.length < 2 ? {} : { own: { points, label: 'own' } };
+}
+
+const OWN_KEYS = ['own_scale', 'own_offset_mm', 'own_from_bar_abs', 'own_to_bar_abs'] as const;
+const OWN_POINTS = 24;
 
 function windowOf(values: Values, range: { readonly from: number; readonly to: number }) {
   const from = numberAt(values, 'window_from_bar_g');

@@ -1,9 +1,10 @@
 import { chargingOf } from '../rules/rig-figures';
 import { gapSetupOf } from '../rules/rig-gap';
+import { ownValues } from './gap-own';
 import type { Start, StartFrom } from './lookup';
 
 /** What the rig says and nobody enters here: supply, vessel, and the pressures that are allowed. */
-export function gapStart({ spec, settings, envelope = null }: StartFrom): Start {
+export function gapStart({ spec, settings, envelope = null, own = null }: StartFrom): Start {
   const lab = {
     temperature_C: settings?.ambient_C ?? 20,
     ambient_bar_abs: settings?.ambient_bar_abs ?? null,
@@ -49,6 +50,7 @@ export function gapStart({ spec, settings, envelope = null }: StartFrom): Start 
       highest_bar_g: gap.highest_bar_g,
       window_from_bar_g: envelope === null ? null : gap.lowest_bar_g,
       window_to_bar_g: envelope?.max_bar_g ?? null,
+      ...(own === null ? {} : ownValues(own, spec)),
     },
     known: {
       ...known,

@@ -24,6 +24,25 @@ const figure = (key: string, answer = answered()): Figure => {
 };
 
 describe('gap lookup', () => {
+  it('draws the rig’s own curve where it was read, on its own gas and electrodes, and moves no figure', () => {
+    const own = { scale: 0.9, offset_mm: 0, from_bar_abs: 1.8, to_bar_abs: 2.1 };
+    const { values } = GAP_LOOKUP.start({ spec: kettleLikeSpec, settings: labSettings, own });
+    const drawn = answered(values);
+    expect(drawn.figures).toEqual(answered().figures);
+    const points = drawn.plot?.own?.points ?? [];
+    expect(points[0]?.x).toBeCloseTo(1.8 - 0.966, 9);
+    expect(points.at(-1)?.x).toBeCloseTo(2.1 - 0.966, 9);
+    const law = drawn.plot?.law ?? [];
+    for (const { x, y } of points) {
+      const below = law.findLast((one) => one.x <= x);
+      expect(y / (below?.y ?? NaN)).toBeGreaterThan(0.88);
+      expect(y / (below?.y ?? NaN)).toBeLessThan(0.95);
+    }
+    expect(answered({ ...values, gas: 'air' }).plot?.own).toBeUndefined();
+    expect(answered({ ...values, radius_mm: 20 }).plot?.own).toBeUndefined();
+    expect(answered().plot?.own).toBeUndefined();
+  });
+
   it('starts from the rig and the lab, and says which', () => {
     expect(start.values).toMatchObject({ gap_mm: 3, pressure: 1, radius_mm: 12, ambient_bar_abs: 0.966 });
     expect(start.known).toMatchObject({ gap_mm: 'rig', ambient_bar_abs: 'lab', radius_mm: 'assumed' });

@@ -71,6 +71,16 @@ export interface StartFrom {
   readonly spec: RigSpec | null;
   readonly settings: LabSettings | null;
   readonly envelope?: RigSpec['envelope'] | null;
+  /** The rig's own self-break curve, where measured self-breaks gave one. */
+  readonly own?: OwnCurve | null;
+}
+
+/** A rig's own curve as a lookup draws it: the law at the gap plus an offset, times a scale, over what was read. */
+export interface OwnCurve {
+  readonly scale: number;
+  readonly offset_mm: number;
+  readonly from_bar_abs: number;
+  readonly to_bar_abs: number;
 }
 
 /** What a lookup starts from: the rig in hand and the lab, or nothing at all. */

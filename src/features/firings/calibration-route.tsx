@@ -14,7 +14,7 @@ import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
 import type { RigCalibration } from '../../domain/rules/rig-calibration';
 import { calibrationChart, fitFigures, leftOutWords, residualChart } from './calibration-view';
 import { FIRING_CHART_WORDS } from './firing-chart';
-import { useRigCalibration } from './use-rig-calibration';
+import { useRigCalibration } from '../../data/use-rig-calibration';
 import './firings.css';
 
 const RESIDUAL_WORDS: ChartWords = { ...FIRING_CHART_WORDS, law: 'own curve' };

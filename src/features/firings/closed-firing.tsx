@@ -21,7 +21,7 @@ import { FitSays } from './fit-says';
 import { fitOf, sigmasOf } from './reading-fit';
 import { firstBase, nextBase } from './reading-form';
 import { ReadingsTable } from './readings-table';
-import { useCalibrationBefore } from './use-rig-calibration';
+import { useCalibrationBefore } from '../../data/use-rig-calibration';
 import type { FiringFacts } from './use-firing-facts';
 
 interface ClosedFiringProps {

@@ -29,7 +29,7 @@ import { useBurst } from './use-burst';
 import type { FiringFacts } from './use-firing-facts';
 import { useFiringLog, type Said } from './use-firing-log';
 import { useFootKey } from './use-foot-key';
-import { useCalibrationBefore } from './use-rig-calibration';
+import { useCalibrationBefore } from '../../data/use-rig-calibration';
 import { useReadingForm, type ReadingForm } from './use-reading-form';
 
 const BURST_DOME: Readonly<Record<BurstView['type'], string>> = {

@@ -1,8 +1,10 @@
 import { useMemo } from 'react';
 import { useDraft } from '../../data/use-draft';
 import { useNow } from '../../data/use-now';
+import { useOwnCurve } from '../../data/use-rig-calibration';
 import type { LabDoc } from '../../domain/book/documents/lab';
 import { latestRevision, type RigDoc } from '../../domain/book/documents/rig';
+import { ownValues } from '../../domain/lookup/gap-own';
 import type { Lookup, LookupAnswer, Values } from '../../domain/lookup/lookup';
 import { standingPermit } from '../../domain/rules/readiness';
 import type { Refusal } from '../../domain/units/result';
@@ -36,7 +38,13 @@ export function useLookup(lookup: Lookup, rig: RigDoc | undefined, lab: LabDoc |
   const draft = useDraft<LookupForm>(`lookup/${lookup.key}/2/${started}`, initial);
   const form = draft.value;
   const { values: set, find } = form;
-  const ask = useMemo(() => askOf(lookup, { values: set, find }), [lookup, set, find]);
+  // Drawn over the law, never entered, never kept: what was measured changes under a form that stays.
+  const own = useOwnCurve(lookup.key === 'gap' ? rig : undefined);
+  const ask = useMemo(() => {
+    const spec = revision?.spec;
+    const values = own === null || spec === undefined ? set : { ...set, ...ownValues(own, spec) };
+    return askOf(lookup, { values, find });
+  }, [lookup, set, find, own, revision]);
   const { reply, computing } = useComputed(lookup, ask);
   const answered = reply?.ok === true && reply.value.kind === 'answer' ? reply.value : null;
   const solvable = solvableOf(lookup, form.find);

@@ -1,10 +1,11 @@
 import { useEffect, useMemo, useState } from 'react';
-import { useFirings } from '../../data/use-book';
-import { useReadingsOf } from '../../data/use-readings-of';
-import type { FiringDoc } from '../../domain/book/documents/firing';
-import type { RigDoc } from '../../domain/book/documents/rig';
-import { rigCalibration, type RigCalibration } from '../../domain/rules/rig-calibration';
-import type { Result } from '../../domain/units/result';
+import { useFirings } from './use-book';
+import { useReadingsOf } from './use-readings-of';
+import type { FiringDoc } from '../domain/book/documents/firing';
+import type { RigDoc } from '../domain/book/documents/rig';
+import type { OwnCurve } from '../domain/lookup/lookup';
+import { rigCalibration, type RigCalibration } from '../domain/rules/rig-calibration';
+import type { Result } from '../domain/units/result';
 
 /** Firings whose readings are fetched: the newest, since a gap wears. */
 const MOST_FIRINGS = 60;
@@ -23,13 +24,7 @@ export function useRigCalibration(rig: RigDoc): Result<RigCalibration> | undefin
  */
 export function useCalibrationBefore(rig: RigDoc, firing: FiringDoc): RigCalibration | null {
   const firings = useFirings(rig.id);
-  const [due, setDue] = useState(false);
-  useEffect(() => {
-    const timer = setTimeout(() => setDue(true), AFTER_MS);
-    return () => {
-      clearTimeout(timer);
-    };
-  }, []);
+  const due = useAfterFirstPaint();
   const opened_ms = firing.opened.stamp.wall_ms;
   const earlier = useMemo(
     () => (due ? firings.filter((one) => one.opened.stamp.wall_ms < opened_ms) : NONE),
@@ -39,14 +34,41 @@ export function useCalibrationBefore(rig: RigDoc, firing: FiringDoc): RigCalibra
   return found?.ok === true ? found.value : null;
 }
 
-function useCalibrationFrom(rig: RigDoc, firings: readonly FiringDoc[]): Result<RigCalibration> | undefined {
+/** The own curve as lookups draw it; null where there is none, none yet, or no rig. */
+export function useOwnCurve(rig: RigDoc | undefined): OwnCurve | null {
+  const firings = useFirings(rig?.id ?? '');
+  const due = useAfterFirstPaint();
+  const found = useCalibrationFrom(rig, due ? firings : NONE);
+  return useMemo(() => {
+    if (found?.ok !== true) return null;
+    const { scale, offset_mm, read } = found.value.fit;
+    const [from_bar_abs, to_bar_abs] = read.pressure_bar_abs;
+    return { scale: scale.value, offset_mm: offset_mm?.value ?? 0, from_bar_abs, to_bar_abs };
+  }, [found]);
+}
+
+function useAfterFirstPaint(): boolean {
+  const [due, setDue] = useState(false);
+  useEffect(() => {
+    const timer = setTimeout(() => setDue(true), AFTER_MS);
+    return () => {
+      clearTimeout(timer);
+    };
+  }, []);
+  return due;
+}
+
+function useCalibrationFrom(
+  rig: RigDoc | undefined,
+  firings: readonly FiringDoc[],
+): Result<RigCalibration> | undefined {
   const newest = useSteady(useMemo(() => firings.slice(0, MOST_FIRINGS), [firings]));
   const ids = useMemo(() => newest.map((one) => one.id), [newest]);
   const { state, readingsOf } = useReadingsOf(ids);
-  const { revisions } = rig;
+  const revisions = rig?.revisions;
   return useMemo(
     () =>
-      state === 'loading' && newest.length > 0
+      rig === undefined || (state === 'loading' && newest.length > 0)
         ? undefined
         : rigCalibration({ rig, firings: newest, readingsOf }),
     // eslint-disable-next-line react-hooks/exhaustive-deps -- a rig is a new object at every entry about it; its revisions count

@@ -1,0 +1,24 @@
+import type { RigSpec } from '../book/rig-spec';
+import { gapSetupOf } from '../rules/rig-gap';
+import type { OwnCurve, Values } from './lookup';
+
+/** The own curve as values that nobody enters. It belongs to the gas and electrodes that it was read on. */
+export function ownValues(own: OwnCurve, spec: RigSpec): Values {
+  const { scale, offset_mm, from_bar_abs, to_bar_abs } = own;
+  return {
+    own_scale: scale,
+    own_offset_mm: offset_mm,
+    own_from_bar_abs: from_bar_abs,
+    own_to_bar_abs: to_bar_abs,
+    own_of: ownKey({
+      gas: spec.gap.gas,
+      electrodes: gapSetupOf(spec, 20).electrodes.shape,
+      radius_mm: spec.gap.radius_mm,
+    }),
+  };
+}
+
+/** Gas and electrodes of a form: with others than it was read on, the own curve is not drawn. */
+export function ownKey(values: Values): string {
+  return ['gas', 'electrodes', 'radius_mm'].map((key) => values[key] ?? '').join(' ');
+}
