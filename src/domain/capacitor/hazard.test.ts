@@ -64,7 +64,7 @@ describe('hazardBand', () => {
   it('stands with the supply beside it and rounds the energy up', () => {
     const result = hazardBand(5e-9, { kV: 25, mA: 1.5 });
     expect(result.ok && result.value.words).toMatch(
-      /^1\.6\u2009J at the supply\u2019s 25\u2009kV and 1\.5\u2009mA: /,
+      /^1\.57\u2009J at the supply\u2019s 25\u2009kV and 1\.5\u2009mA: /,
     );
     expect(result).toMatchObject({ value: { exceedsTouchLimit: true } });
   });

@@ -1,8 +1,8 @@
 import { checkNumber } from '../units/check-number';
-import { formatFigure } from '../units/format-quantity';
 import { firstRefusal, ok, refused, type Result } from '../units/result';
 import { answer, type Answer, type Basis, type Warning } from '../units/answer';
 import { CAPACITANCE_RULE, storedEnergy, VOLTAGE_RULE } from './energy';
+import { energyText } from './energy-text';
 import { touchVerdict, type TouchVerdict } from './touch';
 
 /** Energy from which a touch makes a person start, J: 0.25 above 400 V (NFPA 70E, read), 1 from 100 V (from memory). */
@@ -71,7 +71,7 @@ export function hazardBand(
   const touch = touchVerdict(capacitance_F, voltage_V);
   if (!touch.ok) return touch;
   const type = bandOf(energy_J, reflex.value.value);
-  const energy = formatFigure(energy_J, { digits: { significant: 2 }, rounding: 'up' });
+  const energy = energyText(energy_J);
   return ok({
     type,
     effect: BAND_WORDS[type],

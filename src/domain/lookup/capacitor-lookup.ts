@@ -1,5 +1,6 @@
 import { bleedPower, bleedWait } from '../capacitor/bleed';
 import { storedEnergy } from '../capacitor/energy';
+import { ENERGY_DIGITS } from '../capacitor/energy-text';
 import { hazardBand } from '../capacitor/hazard';
 import { lifeShots, lifeStressRatio } from '../capacitor/life';
 import { touchVerdict } from '../capacitor/touch';
@@ -117,7 +118,7 @@ function energyFigure(
   return figureOf(['energy', 'stored energy'], energy, {
     rounding: 'up',
     weight: large ? 'answer' : 'main',
-    digits: 2,
+    digits: ENERGY_DIGITS,
     note: hazard.words ?? NO_SUPPLY,
   });
 }

@@ -1,3 +1,4 @@
+import { ENERGY_DIGITS } from '../capacitor/energy-text';
 import type { GainVerdict } from '../channel/gain-window';
 import type { CircuitAnswer } from '../circuit/circuit-answer';
 import type { CircuitParts } from '../circuit/circuit-parts';
@@ -122,7 +123,7 @@ export function ledgerFigures({ made: { parts }, solved }: Solved, stored: strin
       value: energy.start_J,
       unit: 'J',
       rounding: 'up',
-      digits: 2,
+      digits: ENERGY_DIGITS,
       weight: 'main',
       ...(stored === null
         ? { words: 'enter the supply\u2019s kV and mA: an energy says nothing without them' }

@@ -1,10 +1,10 @@
-import { formatFigure } from '../units/format-quantity';
+import { energyText } from '../capacitor/energy-text';
 import { numberAt } from './fields';
 import type { Values } from './lookup';
 
 /** An energy with its supply beside it: no energy stands alone, because the supply is what usually kills. */
 export function energyWords(energy_J: number, values: Values): string {
-  const energy = formatFigure(energy_J, { digits: { significant: 2 }, rounding: 'up' });
+  const energy = energyText(energy_J);
   const [kV, mA] = [numberAt(values, 'supply_kV'), numberAt(values, 'supply_mA')];
   return kV === null || mA === null
     ? `${energy}\u2009J, whatever supply charges it`

@@ -64,8 +64,8 @@ describe('the room lookup, ozone and nitrogen oxides', () => {
   });
 
   it('never names an energy without its supply', () => {
-    expect(figure('spark_power', CORONA).note).toMatch(/0\.91\u2009J.*16\u2009kV and 1\u2009mA/);
-    expect(figure('peak', { subject: 'sound' }).note).toMatch(/0\.91\u2009J.*16\u2009kV and 1\u2009mA/);
+    expect(figure('spark_power', CORONA).note).toMatch(/0\.902\u2009J.*16\u2009kV and 1\u2009mA/);
+    expect(figure('peak', { subject: 'sound' }).note).toMatch(/0\.902\u2009J.*16\u2009kV and 1\u2009mA/);
     expect(figure('peak', { subject: 'sound', supply_kV: null }).note).toMatch(/whatever supply/);
   });
 });

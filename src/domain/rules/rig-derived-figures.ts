@@ -1,5 +1,6 @@
 import type { CapacitorSpec, RigSpec } from '../book/rig-spec';
 import { plyThickness_m } from '../capacitor/capacitance';
+import { ENERGY_DIGITS } from '../capacitor/energy-text';
 import { dielectricStress, stressMargin } from '../capacitor/stress';
 import type { CircuitAnswer } from '../circuit/circuit-answer';
 import { inversionPeak, transferPeak } from '../circuit/ideals';
@@ -58,7 +59,7 @@ export function energyFigures(spec: RigSpec, { figures, broken, at }: Parts): re
       label: 'Stored at the supply\u2019s limit',
       figure: mapResult(figures, ({ stored_J }) => exact(stored_J, 'J', 'Half of C V squared')),
       rounding: 'up',
-      digits: 2,
+      digits: ENERGY_DIGITS,
       words: figures.ok ? figures.value.hazard.words : '',
       caution: true,
     }),
@@ -69,7 +70,7 @@ export function energyFigures(spec: RigSpec, { figures, broken, at }: Parts): re
         mapResult(storedAt_J(spec, law_kV), (joule) => exact(joule, 'J', 'Half of C V squared')),
       ),
       rounding: 'up',
-      digits: 2,
+      digits: ENERGY_DIGITS,
       words: `By the law ${pressure}; a gap that stays shut lets the whole ${supply} through.`,
     }),
     row({
