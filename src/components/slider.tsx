@@ -24,6 +24,7 @@ interface Grip {
   readonly share: number;
   readonly before: number | null;
   readonly moved: boolean;
+  readonly width: number;
 }
 
 /**
@@ -40,7 +41,9 @@ export function Slider({ label, range, value, valueText, ends, onSlide }: Slider
     const box = track.current?.getBoundingClientRect();
     const inside = box === undefined ? 0 : (event.clientX - box.left) / Math.max(1, box.width);
     const start = event.pointerType === 'mouse' ? clamp(inside) : share;
-    grip.current = { pointer: event.pointerId, x: event.clientX, share: start, before: value, moved: false };
+    const width = Math.max(1, box?.width ?? 1);
+    const { pointerId: pointer, clientX: x } = event;
+    grip.current = { pointer, x, share: start, before: value, moved: false, width };
     // A contact that the guard brings back has no live pointer to capture.
     if (event.isTrusted) event.currentTarget.setPointerCapture(event.pointerId);
     if (event.pointerType === 'mouse') onSlide(slideValue(range, start));
@@ -51,8 +54,7 @@ export function Slider({ label, range, value, valueText, ends, onSlide }: Slider
     const travel = event.clientX - held.x;
     if (!held.moved && Math.abs(travel) < STILL_PX) return;
     grip.current = { ...held, moved: true };
-    const width = Math.max(1, track.current?.getBoundingClientRect().width ?? 1);
-    onSlide(slideValue(range, clamp(held.share + travel / width)));
+    onSlide(slideValue(range, clamp(held.share + travel / held.width)));
   };
   const up = (event: PointerEvent): void => {
     if (grip.current?.pointer === event.pointerId) grip.current = null;

@@ -1,4 +1,5 @@
-import { useDeferredValue, useMemo, useRef, useState } from 'react';
+import { useMemo, useRef, useState } from 'react';
+import { useSettled } from '../use-settled';
 import { useSize } from '../use-size';
 import { ChartAxes } from './chart-axes';
 import { ChartCursor, plainWords } from './chart-cursor';
@@ -22,6 +23,9 @@ export interface ChartProps {
   /** Words for what the cursor reads off; a plain sentence of figures when left out. */
   readonly describe?: (values: CursorValues) => string;
 }
+
+/** A hidden table follows once the curve has come to rest; a shown one follows at once. */
+const TABLE_RESTS_MS = 250;
 
 /** The one chart of the app: what matters is the void between two solid bodies. */
 export function Chart({ title, data, words, slice, height_mm, describe }: ChartProps) {
@@ -50,8 +54,9 @@ export function Chart({ title, data, words, slice, height_mm, describe }: ChartP
   // Nothing is drawn beyond a wall, so the axis ends there.
   const x = data.wall === undefined ? data.x : { ...data.x, max: Math.min(data.x.max, data.wall.from) };
   const walled: ChartData = { ...data, x };
-  // The table is read, not watched: while a thumb slides, the drawing goes first.
-  const tabled = useDeferredValue(useMemo(() => ({ title, data, words }), [title, data, words]));
+  const told = useMemo(() => ({ title, data, words }), [title, data, words]);
+  const settled = useSettled(told, TABLE_RESTS_MS);
+  const tabled = asTable ? told : settled;
   const plot: Plot = {
     ...layout,
     x: scaleOf(x, layout.left, layout.right),

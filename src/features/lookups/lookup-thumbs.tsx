@@ -1,3 +1,4 @@
+import { memo, useEffect, useRef, type RefObject } from 'react';
 import type { HoldOutcome } from '../../components/hold';
 import { ThumbDome } from '../../components/thumb-dome';
 import { ThumbZone } from '../../components/thumb-zone';
@@ -12,10 +13,40 @@ import type { LookupView } from './use-lookup';
 /** Keeps what the screen shows, pins it to the Bench, and takes the "what if" back. */
 export function LookupThumbs({ view }: { readonly view: LookupView }) {
   const { lookup, rig, form, answer, refusal, reset } = view;
-  const pinned = pinnedLookups(useLookups(rig?.id ?? '')).some((doc) => doc.kept.lookup === lookup.key);
-  const keep = useKeep(view);
-  const ready = rig !== undefined && answer !== null && refusal === null;
-  const reason = rig === undefined ? 'Take a rig in hand to keep it.' : refusal?.words;
+  const latest = useRef(view);
+  useEffect(() => {
+    latest.current = view;
+  });
+  return (
+    <Thumbs
+      latest={latest}
+      lookup={lookup.key}
+      rig={rig?.id ?? null}
+      whatIf={isWhatIf(form)}
+      refused={refusal?.words ?? null}
+      answered={answer !== null}
+      reset={reset}
+    />
+  );
+}
+
+interface ThumbsProps {
+  /** What is kept is what the screen shows when the hold ends. */
+  readonly latest: RefObject<LookupView>;
+  readonly lookup: string;
+  readonly rig: string | null;
+  readonly whatIf: boolean;
+  readonly refused: string | null;
+  readonly answered: boolean;
+  readonly reset: () => void;
+}
+
+/** Nothing of it changes while a thumb slides, so it is not drawn anew. */
+const Thumbs = memo(function Thumbs({ latest, lookup, rig, whatIf, refused, answered, reset }: ThumbsProps) {
+  const pinned = pinnedLookups(useLookups(rig ?? '')).some((doc) => doc.kept.lookup === lookup);
+  const keep = useKeep(latest);
+  const ready = rig !== null && answered && refused === null;
+  const reason = rig === null ? 'Take a rig in hand to keep it.' : (refused ?? undefined);
   const common = { disabled: !ready, ...(reason === undefined ? {} : { reason }) };
   return (
     <ThumbZone
@@ -34,16 +65,16 @@ export function LookupThumbs({ view }: { readonly view: LookupView }) {
         <ThumbDome
           key="pin"
           hold="half-second"
-          label={pinned && !isWhatIf(form) ? 'Unpin' : 'Pin to bench'}
-          holdLabel={pinned && !isWhatIf(form) ? 'Hold: unpin from the Bench' : 'Hold: pin to the Bench'}
-          onComplete={() => keep(pinned && !isWhatIf(form) ? 'unpin' : 'pin')}
+          label={pinned && !whatIf ? 'Unpin' : 'Pin to bench'}
+          holdLabel={pinned && !whatIf ? 'Hold: unpin from the Bench' : 'Hold: pin to the Bench'}
+          onComplete={() => keep(pinned && !whatIf ? 'unpin' : 'pin')}
           {...common}
         />,
-        ...(isWhatIf(form)
+        ...(whatIf
           ? [
               <ThumbDome
                 key="back"
-                label={rig === undefined ? 'Start afresh' : 'Back to the rig'}
+                label={rig === null ? 'Start afresh' : 'Back to the rig'}
                 onComplete={reset}
               />,
             ]
@@ -51,11 +82,12 @@ export function LookupThumbs({ view }: { readonly view: LookupView }) {
       ]}
     />
   );
-}
+});
 
-function useKeep(view: LookupView): (pin: 'pin' | 'unpin' | undefined) => Promise<HoldOutcome> {
+function useKeep(latest: RefObject<LookupView>): (pin: 'pin' | 'unpin' | undefined) => Promise<HoldOutcome> {
   const append = useAppend();
   return async (pin) => {
+    const view = latest.current;
     const { lookup, rig, revision, form, values, answer, refusal } = view;
     if (rig === undefined || answer === null || refusal !== null) {
       return { type: 'failed', words: refusal?.words ?? 'There is nothing to keep yet.' };
