@@ -249,7 +249,7 @@ describe('what a tablet asks of the Book', () => {
     });
 
     it('tells an older app to come up, and lets it go on', async () => {
-      expect((await tablet.hello({ fold_version: 1, protocol: 1 })).body.state).toBe('ok');
+      expect((await tablet.hello({ protocol: 1 })).body.state).toBe('ok');
       const answer = await tablet.hello({
         cursor: { epoch: lab.epoch, revision: 0, hash: GENESIS_HASH },
         protocol: 0,

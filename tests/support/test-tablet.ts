@@ -1,3 +1,4 @@
+import { FOLD_VERSION } from '../../src/domain/book/fold';
 import {
   createPrivateKey,
   generateKeyPairSync,
@@ -224,7 +225,7 @@ export class TestTablet {
       body: {
         protocol: 1,
         app_version: 'test',
-        fold_version: 1,
+        fold_version: FOLD_VERSION,
         cursor: { epoch: this.epoch, ...this.base },
         acked_seq: 0,
         pending: { count: 0, oldest_wall_ms: null },
