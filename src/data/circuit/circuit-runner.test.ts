@@ -4,7 +4,8 @@ import { refused } from '../../domain/units/result';
 import { FakeCircuitWorker } from '../fakes/circuit-workers';
 import { virtualTime } from '../fakes/virtual-time';
 import type { CircuitReply, CircuitRequest } from './circuit-protocol';
-import { createCircuitRunner, PATIENCE_MS } from './circuit-runner';
+import { PATIENCE_MS } from '../worker/latest-runner';
+import { createCircuitRunner } from './circuit-runner';
 
 const CIRCUIT: Circuit = {
   topology: 'charge-transfer',

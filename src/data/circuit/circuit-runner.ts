@@ -8,8 +8,6 @@ import {
 } from '../worker/latest-runner';
 import type { CircuitRequest, SolveOptions } from './circuit-protocol';
 
-export { PATIENCE_MS } from '../worker/latest-runner';
-
 export type CircuitWorker = RunnerWorker<CircuitRequest>;
 export type CircuitRunnerNeeds = Omit<LatestRunnerNeeds<CircuitRequest>, 'failedWords'>;
 export type CircuitSolve = Asked<CircuitAnswer>;

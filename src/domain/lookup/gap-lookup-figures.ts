@@ -1,4 +1,4 @@
-import { BREAK_DIGITS, breakText } from '../gap/break-text';
+import { BREAK_DIGITS, breakText } from '../rules/break-text';
 import type { GapInput } from '../gap/gap-input';
 import type { GapAnswer } from '../gap/self-break';
 import type { WorkingPoint } from '../gap/working-point';

@@ -1,4 +1,4 @@
-import { breakText } from '../gap/break-text';
+import { breakText } from '../rules/break-text';
 import { latestRevision, type RigDoc } from '../book/documents/rig';
 import type { LabSettings } from '../book/rig-spec';
 import { rigDerived } from '../rules/rig-derived';

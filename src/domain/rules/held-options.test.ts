@@ -54,9 +54,7 @@ describe('what may be done with a held-back entry', () => {
   });
 
   it('offers nobody to adopt a text that cannot be read', () => {
-    expect(heldOptions(held('version', 'kit.melted', {}), { id: id(8), role: 'lead' }).adopt.may).toBe(
-      false,
-    );
+    expect(heldOptions(held('version', 'kit.melted', {}), { id: id(8), role: 'lead' }).adopt.may).toBe(false);
   });
 
   it('lets only the author dismiss it, and nobody while locked', () => {

@@ -4,7 +4,7 @@ import { paths } from '../../config/paths';
 import type { RigDoc, RigRevision } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import { energyText } from '../../domain/capacitor/energy-text';
-import { breakText } from '../../domain/gap/break-text';
+import { breakText } from '../../domain/rules/break-text';
 import { selfBreak } from '../../domain/gap/self-break';
 import { storedAt_J } from '../../domain/rules/rig-figures';
 import { gapInputOf } from '../../domain/rules/rig-gap';

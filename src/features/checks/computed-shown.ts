@@ -1,7 +1,7 @@
 import { latestRevision, type RigDoc, type RigRevision } from '../../domain/book/documents/rig';
 import type { LabSettings } from '../../domain/book/rig-spec';
 import type { Step } from '../../domain/book/sheet-spec';
-import { breakText } from '../../domain/gap/break-text';
+import { breakText } from '../../domain/rules/break-text';
 import { selfBreak } from '../../domain/gap/self-break';
 import { dayWords } from '../../domain/report/time-words';
 import { standingPermit } from '../../domain/rules/readiness';
