@@ -1,13 +1,20 @@
-import { ELECTRODE_SHAPES, type ElectrodeShape } from '../gap/electrodes';
+import { ELECTRODE_SHAPES, type Electrodes } from '../gap/electrodes';
 import { GAS_NAMES } from '../gap/gas-table';
 import type { Field, UnitChoice } from './lookup';
 import { numberAt, textAt } from './fields';
 
-const SHAPE_LABELS: Readonly<Record<ElectrodeShape, string>> = {
+type Shape = Electrodes['shape'];
+
+/** Every shape that the lookup offers: those that a radius says all about, rods and bars. */
+export const SHAPES: readonly Shape[] = [...ELECTRODE_SHAPES, 'capped-rods', 'hex-bars'];
+
+const SHAPE_LABELS: Readonly<Record<Shape, string>> = {
   domed: 'domed',
   sphere: 'spheres',
   cylinder: 'cylinders',
   plane: 'plane',
+  'capped-rods': 'round-ended rods',
+  'hex-bars': 'hexagonal bars',
 };
 
 /** bar(abs) beside bar(g): the same pressure, counted from vacuum; it takes the ambient. */
@@ -23,6 +30,10 @@ const ABSOLUTE: UnitChoice = {
 function fromAmbient(values: Parameters<UnitChoice['toOwn']>[1], move: (ambient: number) => number) {
   const ambient = numberAt(values, 'ambient_bar_abs');
   return ambient === null ? null : Number(move(ambient).toFixed(9));
+}
+
+function hexagonal(values: Parameters<UnitChoice['toOwn']>[1]): boolean {
+  return textAt(values, 'electrodes') === 'hex-bars';
 }
 
 export const GAP_FIELDS: readonly Field[] = [
@@ -121,8 +132,8 @@ export const GAP_FIELDS: readonly Field[] = [
     kind: 'choice',
     key: 'electrodes',
     label: 'Electrodes',
-    options: ELECTRODE_SHAPES.map((value) => ({ value, label: SHAPE_LABELS[value] })),
-    help: 'Shape of the faces that the gap lies between. Domed faces are taken as spheres of their radius.',
+    options: SHAPES.map((value) => ({ value, label: SHAPE_LABELS[value] })),
+    help: 'Shape of the faces that the gap lies between. Domed faces are taken as spheres of their radius; two rods lie on one axis, two bars side by side.',
   },
   {
     kind: 'number',
@@ -134,8 +145,59 @@ export const GAP_FIELDS: readonly Field[] = [
     step: 0.5,
     decimals: 1,
     slide: { from: 2, to: 100, scale: 'log' },
-    help: 'Of the face, the sphere or the cylinder. Measure it with a radius gauge; a gap wider than five radii is refused.',
-    shownFor: (values) => textAt(values, 'electrodes') !== 'plane',
+    help: 'Of the face, the sphere, the cylinder or the rod. Measure it with a radius gauge; a gap wider than five radii is refused.',
+    shownFor: (values) => !['plane', 'hex-bars'].includes(textAt(values, 'electrodes') ?? ''),
+  },
+  {
+    kind: 'number',
+    key: 'rod_length_mm',
+    label: 'Straight part',
+    unit: 'mm',
+    min: 0.05,
+    max: 200_000,
+    step: 1,
+    decimals: 1,
+    slide: { from: 5, to: 500, scale: 'log' },
+    optional: true,
+    help: 'Length of each rod behind its round end. Without it twenty radii are taken, from where on it hardly matters.',
+    shownFor: (values) => textAt(values, 'electrodes') === 'capped-rods',
+  },
+  {
+    kind: 'choice',
+    key: 'facing',
+    label: 'Facing',
+    options: [
+      { value: 'flats', label: 'flat to flat' },
+      { value: 'edges', label: 'edge to edge' },
+    ],
+    help: 'What of the two bars faces the gap. The low side is always taken edge to edge, since a bar may turn.',
+    shownFor: hexagonal,
+  },
+  {
+    kind: 'number',
+    key: 'flats_mm',
+    label: 'Across flats',
+    unit: 'mm',
+    min: 0.5,
+    max: 500,
+    step: 0.5,
+    decimals: 1,
+    slide: { from: 3, to: 50, scale: 'log' },
+    help: 'Width of a bar from flat to flat: the size of the spanner that fits it.',
+    shownFor: hexagonal,
+  },
+  {
+    kind: 'number',
+    key: 'corner_mm',
+    label: 'Corner radius',
+    unit: 'mm',
+    min: 0.001,
+    max: 250,
+    step: 0.1,
+    decimals: 2,
+    slide: { from: 0.05, to: 5, scale: 'log' },
+    help: 'Of the broken edges. Look at it from the end of the bar beside a radius gauge; a sharp edge has no answer.',
+    shownFor: hexagonal,
   },
   {
     kind: 'number',

@@ -26,6 +26,10 @@ export function gapStart({ spec, settings, envelope = null, own = null }: StartF
         irradiated: 'no-uv',
         electrodes: 'domed',
         radius_mm: 12,
+        rod_length_mm: null,
+        facing: 'edges',
+        flats_mm: 12,
+        corner_mm: 1,
         gap_mm: 3,
         gap_error_mm: 0.05,
         pressure: 0,
@@ -42,6 +46,10 @@ export function gapStart({ spec, settings, envelope = null, own = null }: StartF
       irradiated: gap.irradiated ? 'uv' : 'no-uv',
       electrodes: setup.electrodes.shape,
       radius_mm: gap.radius_mm,
+      rod_length_mm: gap.rod_length_mm ?? null,
+      facing: gap.facing ?? null,
+      flats_mm: gap.flats_mm ?? null,
+      corner_mm: gap.corner_mm ?? null,
       gap_mm: gap.gap_mm,
       gap_error_mm: gap.gap_error_mm,
       pressure: (gap.lowest_bar_g + gap.highest_bar_g) / 2,
@@ -62,9 +70,18 @@ export function gapStart({ spec, settings, envelope = null, own = null }: StartF
 
 function everyOther<K>(known: K): Record<string, K> {
   return Object.fromEntries(
-    ['gas', 'irradiated', 'electrodes', 'radius_mm', 'gap_mm', 'gap_error_mm', 'pressure'].map((key) => [
-      key,
-      known,
-    ]),
+    [
+      'gas',
+      'irradiated',
+      'electrodes',
+      'radius_mm',
+      'rod_length_mm',
+      'facing',
+      'flats_mm',
+      'corner_mm',
+      'gap_mm',
+      'gap_error_mm',
+      'pressure',
+    ].map((key) => [key, known]),
   );
 }

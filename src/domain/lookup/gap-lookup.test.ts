@@ -122,6 +122,10 @@ describe('gap lookup', () => {
     [{ ambient_bar_abs: 7 }, 'ambient_bar_abs'],
     [{ radius_mm: -12 }, 'radius_mm'],
     [{ electrodes: 'pointed' }, 'electrodes'],
+    [{ electrodes: 'hex-bars', flats_mm: null, corner_mm: 1, facing: 'flats' }, 'flats_mm'],
+    [{ electrodes: 'hex-bars', flats_mm: 12, corner_mm: 0, facing: 'flats' }, 'corner_mm'],
+    [{ electrodes: 'hex-bars', flats_mm: 12, corner_mm: 1, facing: null }, 'facing'],
+    [{ electrodes: 'capped-rods', rod_length_mm: -1 }, 'rod_length_mm'],
     [{ voltage_kV: 1e6 }, 'voltage_kV'],
     [{ voltage_kV: 3, condition: 'new' }, 'condition'],
   ] as const)('refuses %j in words beside its field', (changes, field) => {
@@ -139,6 +143,23 @@ describe('gap lookup', () => {
     expect(answered().plot?.window).toBeUndefined();
     expect(answered({ vessel_bar_g: 6 }).plot?.notValid?.from).toBeGreaterThan(3.9);
     expect(answered().plot?.band?.points.every(({ low, high }) => low < high)).toBe(true);
+  });
+
+  it('takes the bars and rods of a rig, with the figures of the rig itself', () => {
+    for (const shape of [
+      { electrodes: 'hex-bars', radius_mm: null, flats_mm: 12, corner_mm: 1, facing: 'edges' },
+      { electrodes: 'capped-rods', radius_mm: 6, rod_length_mm: 30 },
+    ] as const) {
+      const spec = { ...kettleLikeSpec, gap: { ...kettleLikeSpec.gap, ...shape } };
+      const { values } = GAP_LOOKUP.start({ spec, settings: labSettings });
+      const answer = GAP_LOOKUP.answer(values);
+      const own = selfBreak(
+        gapInputOf(spec, { pressure_bar_g: 1, ambient_bar_abs: 0.966, temperature_C: labSettings.ambient_C }),
+      );
+      expect(own.ok && answer.ok && answer.value.figures.find(({ key }) => key === 'law')?.value).toBe(
+        own.ok && own.value.law_kV,
+      );
+    }
   });
 
   it('leaves the curve out where none is wanted', () => {

@@ -1,5 +1,5 @@
 import { reachableVoltage, supplyReach, type Charging } from '../charging/supply-reach';
-import { ELECTRODE_SHAPES } from '../gap/electrodes';
+import type { Electrodes } from '../gap/electrodes';
 import type { GapInput, GapSetup } from '../gap/gap-input';
 import { gapFor, pressureFor, type GapPurpose } from '../gap/gap-solve';
 import { isGasName } from '../gap/gas-table';
@@ -9,7 +9,7 @@ import { DIAL_ERRORS } from '../rules/rig-gap';
 import { formatFigure } from '../units/format-quantity';
 import { mapResult, ok, refused, type Refusal, type Result } from '../units/result';
 import { numberAt, textAt } from './fields';
-import { GAP_FIELDS } from './gap-lookup-fields';
+import { GAP_FIELDS, SHAPES } from './gap-lookup-fields';
 import { gapFigures, heldFigures, supplyFigures } from './gap-lookup-figures';
 import { gapPlot } from './gap-lookup-plot';
 import { gapStart } from './gap-lookup-start';
@@ -57,7 +57,7 @@ function purposes(
 export function gapSetupAt(values: Values): Result<GapSetup> {
   const { gas, electrodes } = values;
   if (!isGasName(gas)) return refused(choose('gas', 'Gas', 'choose one of the list'));
-  const shape = ELECTRODE_SHAPES.find((each) => each === electrodes);
+  const shape = SHAPES.find((each) => each === electrodes);
   if (shape === undefined) return refused(choose('electrodes', 'Electrodes', 'choose their shape'));
   for (const [key, name] of ASKED) {
     if (numberAt(values, key) === null)
@@ -65,7 +65,7 @@ export function gapSetupAt(values: Values): Result<GapSetup> {
   }
   return ok({
     gas,
-    electrodes: { shape, radius_mm: numberAt(values, 'radius_mm') },
+    electrodes: electrodesAt(values, shape),
     gap_mm: numberAt(values, 'gap_mm') ?? 0,
     u_gap_mm: numberAt(values, 'gap_error_mm') ?? 0,
     u_pressure_bar: DIAL_ERRORS.pressure_bar,
@@ -74,6 +74,19 @@ export function gapSetupAt(values: Values): Result<GapSetup> {
     // Whatever is not said to be lit counts as dark: the wider band.
     irradiated: textAt(values, 'irradiated') === 'uv',
   });
+}
+
+function electrodesAt(values: Values, shape: Electrodes['shape']): Electrodes {
+  const radius_mm = numberAt(values, 'radius_mm');
+  if (shape === 'capped-rods') return { shape, radius_mm, rod_length_mm: numberAt(values, 'rod_length_mm') };
+  if (shape !== 'hex-bars') return { shape, radius_mm };
+  const facing = textAt(values, 'facing');
+  return {
+    shape,
+    flats_mm: numberAt(values, 'flats_mm'),
+    corner_mm: numberAt(values, 'corner_mm'),
+    facing: facing === 'flats' || facing === 'edges' ? facing : null,
+  };
 }
 
 const ASKED = [

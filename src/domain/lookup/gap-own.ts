@@ -14,11 +14,17 @@ export function ownValues(own: OwnCurve, spec: RigSpec): Values {
       gas: spec.gap.gas,
       electrodes: gapSetupOf(spec, 20).electrodes.shape,
       radius_mm: spec.gap.radius_mm,
+      rod_length_mm: spec.gap.rod_length_mm ?? null,
+      facing: spec.gap.facing ?? null,
+      flats_mm: spec.gap.flats_mm ?? null,
+      corner_mm: spec.gap.corner_mm ?? null,
     }),
   };
 }
 
 /** Gas and electrodes of a form: with others than it was read on, the own curve is not drawn. */
 export function ownKey(values: Values): string {
-  return ['gas', 'electrodes', 'radius_mm'].map((key) => values[key] ?? '').join(' ');
+  return ['gas', 'electrodes', 'radius_mm', 'rod_length_mm', 'facing', 'flats_mm', 'corner_mm']
+    .map((key) => values[key] ?? '')
+    .join(' ');
 }

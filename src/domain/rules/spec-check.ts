@@ -201,10 +201,12 @@ function* envelopeRefusals({ envelope, charging, gap }: RigSpec): Generator<Spec
 function* gapCautions({ gap, envelope }: RigSpec): Generator<SpecObjection> {
   const { electrodes, radius_mm, vessel, highest_bar_g } = gap;
   const shaped = electrodes === 'domed' || electrodes === 'cylinder' || electrodes === 'capped-rods';
-  if ((shaped && radius_mm === null) || (electrodes === 'hex-bars' && gap.flats_mm === undefined))
+  const missing =
+    electrodes === 'hex-bars' ? missingOfBars(gap) : shaped && radius_mm === null ? 'radius_mm' : null;
+  if (missing !== null)
     yield {
       type: 'shape-not-known',
-      field: electrodes === 'hex-bars' ? 'gap.flats_mm' : 'gap.radius_mm',
+      field: `gap.${missing}`,
       words: 'The shape of the electrodes is not known: no self-break voltage can be given.',
     };
   if (vessel !== null && vessel.regulator_max_bar_g > vessel.rated_bar_g)
@@ -219,6 +221,10 @@ function* gapCautions({ gap, envelope }: RigSpec): Generator<SpecObjection> {
       field: 'envelope.max_bar_g',
       words: `The envelope allows more than the highest working pressure, ${bar(highest_bar_g)}.`,
     };
+}
+
+function missingOfBars(gap: RigSpec['gap']): 'flats_mm' | 'corner_mm' | 'facing' | null {
+  return (['flats_mm', 'corner_mm', 'facing'] as const).find((field) => gap[field] === undefined) ?? null;
 }
 
 function* capacitorCautions(spec: RigSpec): Generator<SpecObjection> {

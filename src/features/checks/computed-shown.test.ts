@@ -24,7 +24,7 @@ const text = (shows: ComputedStep['shows'], given = facts): string => {
 describe('computed steps', () => {
   it('never shows an energy without the supply beside it, rounded up', () => {
     // The dump capacitor's 5 nF at 25 kV store 1.5625 J; worked by hand.
-    expect(text('stored-energy')).toMatch(/^1\.6\u2009J at the supply’s 25\u2009kV and 1\.5\u2009mA/);
+    expect(text('stored-energy')).toMatch(/^1\.57\u2009J at the supply’s 25\u2009kV and 1\.5\u2009mA/);
   });
 
   it('gives self-break with both sides at both ends of the allowed pressures', () => {
