@@ -145,10 +145,10 @@ describe('without server and network, started afresh', () => {
     await signInAgain();
     await toDesk();
     await desk.page().getByRole('table').waitFor();
-    // What was fetched is a cache in small storage, which Chromium takes five seconds and more to put on the disk.
-    await desk.page().waitForTimeout(12_000);
+    // What was fetched is a cache in small storage, which Chromium puts on the disk about once a minute, and when it closes.
+    await desk.page().waitForTimeout(2000);
     await lab.killServer();
-    await desk.kill();
+    await desk.quit();
     await desk.open(`${lab.url}/desk`);
     await desk.cutNetwork(true);
     const page = desk.page();

@@ -137,7 +137,7 @@ describe.each(SIZES)('on a %s, offline', (name, size) => {
     const main = again.getByRole('main');
     await main.getByText(/is void with it|no permit to lose/).waitFor();
     await main.getByText('Touches safety').waitFor();
-    expect(await main.innerText()).toMatch(/Gap\s+2.6\s*mm\s+3.1\s*mm/);
+    expect(await main.innerText()).toMatch(/Gap\s+was\s+2\.6\s*mm\s+is\s+3\.1\s*mm/);
   });
 
   it('fits a part with its day, and opens its ledger', async () => {
