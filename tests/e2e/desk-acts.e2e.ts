@@ -145,12 +145,11 @@ describe('without server and network, started afresh', () => {
     await signInAgain();
     await toDesk();
     await desk.page().getByRole('table').waitFor();
-    // What was fetched is a cache in small storage, which Chromium puts on the disk about once a minute, and when it closes.
-    await desk.page().waitForTimeout(2000);
+    // A new page life, not a kill: what was fetched is a cache in small storage, which Chromium brings to the disk late.
+    await desk.page().waitForTimeout(2500);
     await lab.killServer();
-    await desk.quit();
-    await desk.open(`${lab.url}/desk`);
     await desk.cutNetwork(true);
+    await desk.page().goto(`${lab.url}/desk`, { waitUntil: 'commit' });
     const page = desk.page();
     await unlock(page, milo.name);
     await page.getByRole('table').waitFor();

@@ -12,8 +12,6 @@ export interface Tablet {
   readonly page: () => Page;
   /** `kill -9` of the whole browser, as a dying battery would. */
   kill(): Promise<void>;
-  /** Closes the browser as a person would: it puts its small storage on the disk first. */
-  quit(): Promise<void>;
   /** Stops every process of the browser where it stands, as the instant before a power cut. */
   freeze(): void;
   /** Opens the browser again on the same profile. */
@@ -79,16 +77,6 @@ export async function openTablet(
     profile,
     page: () => must().page,
     kill,
-    quit: async () => {
-      const { child } = must();
-      running = undefined;
-      const exit = new Promise((resolve) => child.once('exit', resolve));
-      if (child.pid !== undefined && child.exitCode === null) {
-        process.kill(child.pid, 'SIGTERM');
-        await Promise.race([exit, sleep(10_000)]);
-      }
-      await killGroup(child);
-    },
     freeze: () => {
       const { child } = must();
       if (child.pid !== undefined) process.kill(-child.pid, 'SIGSTOP');
