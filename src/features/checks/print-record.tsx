@@ -21,8 +21,7 @@ function Paper({ walk, onDone }: { readonly walk: CheckWalk; readonly onDone: ()
   useEffect(() => {
     window.print();
     onDone();
-    // It is printed once, as it stood when it was asked for.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- printed once, as it stood when it was asked for
   }, []);
   return createPortal(<Record walk={walk} />, document.body);
 }

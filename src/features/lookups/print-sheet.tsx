@@ -28,8 +28,7 @@ export function PrintSheet({ view, onDone }: Props) {
     return () => {
       wanted = false;
     };
-    // What was on screen when it was asked for is printed, whatever is slid meanwhile.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- what was on screen when it was asked for is printed
   }, []);
   useEffect(() => {
     if (wall === null) return;

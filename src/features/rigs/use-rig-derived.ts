@@ -27,7 +27,7 @@ export function useRigDerived(spec: RigSpec | null, settings: LabSettings | null
   const asked = useMemo(() => {
     if (spec === null || settings === null) return null;
     return { spec, settings, key, rig: circuitToSolve(spec, derivedOf(spec, settings)) };
-    // eslint-disable-next-line react-hooks/exhaustive-deps
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- the key says what the spec says
   }, [key]);
 
   useEffect(() => () => runner.close(), [runner]);
