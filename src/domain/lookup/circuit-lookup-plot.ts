@@ -35,10 +35,8 @@ export function circuitPlot(parts: CircuitParts, { transient, peakVoltage }: Cir
   const peak_kV = transient.peakVoltage_V / 1000;
   const peak_ns = transient.peakVoltage_s * 1e9;
   const { break_kV } = parts.channel;
-  const spans = [
-    ...riseSpan(x, kV),
-    ...(transient.fired_s === null ? [] : [firedSpan(transient.fired_s * 1e9, to)]),
-  ];
+  // Where it breaks is where the voltage crosses the dashed limit: a second span there would lie on the first.
+  const spans = riseSpan(x, kV);
   return {
     title: `Channel voltage over ${formatFigure(to, { digits: { significant: 3 }, rounding: 'nearest' })} ns: peak ${text(peak_kV)} kV at ${text(peak_ns)} ns`,
     x: { label: 'Time', unit: 'ns', min: 0, max: to, decimals: 0 },
@@ -96,12 +94,6 @@ function riseSpan(x: readonly number[], kV: readonly number[]) {
   const to = first(0.9);
   if (from === undefined || to === undefined || !(to > from)) return [];
   return [{ from, to, label: 'rise' }];
-}
-
-const MARK_SHARE = 0.004;
-
-function firedSpan(fired_ns: number, to: number) {
-  return { from: fired_ns, to: Math.min(to, fired_ns + MARK_SHARE * to), label: 'breaks' };
 }
 
 function text(value: number): string {

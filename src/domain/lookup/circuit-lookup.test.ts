@@ -73,7 +73,7 @@ describe.each([
       expect.stringContaining('gap current'),
       expect.stringContaining('channel current'),
     ]);
-    expect(plot?.spans?.map(({ label }) => label)).toEqual(['rise', 'breaks']);
+    expect(plot?.spans?.map(({ label }) => label)).toEqual(['rise']);
     const highest = Math.max(...(plot?.curves?.[0]?.points.map(({ y }) => y) ?? []));
     expect(highest).toBeCloseTo(plot?.point?.y ?? 0, 6);
   });
