@@ -1,11 +1,8 @@
 import { apertureDivergence } from '../beam/output';
-import { BEAM, rigBeam } from '../rules/rig-beam';
+import { BEAM, DAY_S, rigBeam } from '../rules/rig-beam';
 import { storedAt_J } from '../rules/rig-figures';
 import type { RigSpec } from '../book/rig-spec';
 import type { Known, Start, StartFrom, Values } from './lookup';
-
-/** Time base of ultraviolet exposure, s: a working day (IEC 60825-1, from memory). */
-const DAY_S = 30_000;
 
 const NO_RIG = {
   pulse_energy_uJ: 100,
@@ -29,7 +26,7 @@ export function beamStart({ spec }: StartFrom): Start {
   };
   const known: Record<string, Known> = {};
   for (const key of Object.keys(values)) known[key] = 'assumed';
-  return { values, known: spec === null ? known : { ...known, ...knownOf(spec) } };
+  return { values, known: spec === null ? known : { ...known, ...knownOf(spec, values) } };
 }
 
 function fromRig(spec: RigSpec): Values {
@@ -58,10 +55,11 @@ function fromRig(spec: RigSpec): Values {
   };
 }
 
-function knownOf({ beam, channel }: RigSpec): Record<string, Known> {
+function knownOf({ beam, channel }: RigSpec, values: Values): Record<string, Known> {
   const said = (value: unknown): Known => (value === undefined ? 'assumed' : 'rig');
   return {
-    pulse_energy_uJ: 'rig',
+    // Where it is planned with more than the rig declares, that figure is nobody's reading.
+    pulse_energy_uJ: values['pulse_energy_uJ'] === beam.pulse_energy_uJ ? 'rig' : 'assumed',
     wavelength_nm: 'rig',
     rate_Hz: 'rig',
     pulse_ns: said(beam.pulse_ns),

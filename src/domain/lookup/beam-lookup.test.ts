@@ -24,6 +24,15 @@ const WORKED = {
 };
 
 describe('the beam lookup', () => {
+  it('calls the pulse energy the rig’s only where it is the one that the rig declares', () => {
+    const knownAt = (pulse_energy_uJ: number) => {
+      const spec = { ...HERON_SPEC, beam: { ...HERON_SPEC.beam, pulse_energy_uJ } };
+      return BEAM.start({ spec, settings: DEMO_LAB_SETTINGS }).known['pulse_energy_uJ'];
+    };
+    expect(knownAt(60)).toBe('assumed');
+    expect(knownAt(5000)).toBe('rig');
+  });
+
   it('gives the worked beam: 47.1 J/m2, 200 J/m2, density 0.7 up, 0.67 m', () => {
     expect(figure('limit_single', WORKED).value).toBeCloseTo(47.1, 1);
     expect(figure('exposure', WORKED).value).toBeCloseTo(200, 6);

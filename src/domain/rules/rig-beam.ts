@@ -8,7 +8,7 @@ import { narrowest_mm } from './rig-circuit';
 export const BEAM = { pulse_ns: 0.6, width_mm: 1 } as const;
 
 /** Time base of ultraviolet exposure, s: a working day (IEC 60825-1, from memory). */
-const DAY_S = 30_000;
+export const DAY_S = 30_000;
 
 /** A rig's beam as hazards count it. */
 export interface RigBeam {
